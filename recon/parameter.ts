@@ -1,0 +1,41 @@
+/**
+ * Self-describing parameters. From one record come the type of the model's argument, the check of a recipe, the form control,
+ * the value filled from the header, and the extremes that the laws try.
+ */
+import type { Acquisition } from './acquisition';
+
+/** A number with a unit. `fromHeader` returns what the acquisition says, or undefined; `fact` names it in words. */
+export interface Quantity {
+  readonly kind: 'quantity';
+  readonly label: string;
+  readonly unit: string;
+  readonly min: number;
+  readonly max: number;
+  readonly step: number;
+  readonly initial: number;
+  readonly fromHeader?: { readonly fact: string; readonly read: (acquisition: Acquisition) => number | undefined };
+}
+
+/** One of a few. */
+export interface Choice<Value extends string = string> {
+  readonly kind: 'choice';
+  readonly label: string;
+  readonly options: readonly { readonly value: Value; readonly label: string }[];
+  readonly initial: Value;
+}
+
+export type Parameter = Quantity | Choice;
+export type Parameters = Readonly<Record<string, Parameter>>;
+
+/** The values that a model with these parameters receives. */
+export type ValuesOf<P extends Parameters> = {
+  readonly [K in keyof P]: P[K] extends Choice<infer Value> ? Value : number;
+};
+
+export const quantity = (description: Omit<Quantity, 'kind'>): Quantity => ({ kind: 'quantity', ...description });
+
+export const choice = <Value extends string>(description: {
+  label: string;
+  options: readonly { readonly value: Value; readonly label: string }[];
+  initial: NoInfer<Value>;
+}): Choice<Value> => ({ kind: 'choice', ...description });

@@ -1,0 +1,87 @@
+/** The catalogue: what forms, swatches and the recipe are built from. Causes, reconstructions and corrections alike. */
+import { z } from 'zod';
+import { everyMember, identifier, route } from './route';
+
+export const parameterSchema = z.union([
+  z.object({
+    id: z.string(),
+    label: z.string(),
+    unit: z.string(),
+    min: z.number(),
+    max: z.number(),
+    step: z.number(),
+    initial: z.number(),
+    /** The scan fact that filled `initial`, in words, when an image was named in the query. */
+    fromHeader: z.string().optional(),
+  }),
+  z.object({
+    id: z.string(),
+    label: z.string(),
+    options: z.array(z.object({ value: z.string(), label: z.string() })),
+    initial: z.string(),
+  }),
+]);
+export type CatalogueParameter = z.infer<typeof parameterSchema>;
+
+export const stages = ['object', 'encoding', 'receive', 'reconstruction'] as const;
+export const stageSchema = z.enum(stages);
+export type Stage = z.infer<typeof stageSchema>;
+
+export const sourceSchema = z.object({
+  citation: z.string(),
+  year: z.number().int().optional(),
+  doi: z.string().optional(),
+  equation: z.string().optional(),
+  /** `confirmed`: looked up. `from memory`: standard literature, not checked. `common practice`: a fact of the trade. */
+  standing: z.enum(['confirmed', 'from memory', 'common practice']),
+});
+export const remedySchema = z.object({
+  change: z.string(),
+  who: z.enum(['technologist', 'physicist', 'licensed service']),
+  price: z.string(),
+});
+
+export const causeSchema = z.object({
+  id: z.string(),
+  title: z.string(),
+  stage: stageSchema,
+  parameters: z.array(parameterSchema),
+  looks: z.object({ image: z.string(), kspace: z.string() }),
+  /** Whether the bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
+  needsObjectPhase: z.boolean(),
+  remedies: z.array(remedySchema),
+  sources: z.array(sourceSchema),
+});
+export type Cause = z.infer<typeof causeSchema>;
+
+export const methodSchema = z.object({
+  id: z.string(),
+  title: z.string(),
+  parameters: z.array(parameterSchema),
+  looks: z.object({ image: z.string(), kspace: z.string() }),
+  sources: z.array(sourceSchema),
+});
+export type Method = z.infer<typeof methodSchema>;
+
+export const listCauses = route({
+  method: 'get',
+  path: '/api/causes',
+  summary: 'Every modelled cause, in the order of the signal chain; with `imageId`, initial values come from its scan facts',
+  access: everyMember,
+  query: z.object({ imageId: identifier.optional() }),
+  output: z.array(causeSchema),
+});
+export const listReconstructions = route({
+  method: 'get',
+  path: '/api/reconstructions',
+  summary: 'Every reconstruction method',
+  access: everyMember,
+  output: z.array(methodSchema),
+});
+export const listCorrections = route({
+  method: 'get',
+  path: '/api/corrections',
+  summary: 'Every correction that can be tried on a bad image',
+  access: everyMember,
+  output: z.array(methodSchema),
+});
