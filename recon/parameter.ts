@@ -27,9 +27,9 @@ export interface Choice<Value extends string = string> {
 export type Parameter = Quantity | Choice;
 export type Parameters = Readonly<Record<string, Parameter>>;
 
-/** The values that a model with these parameters receives. */
+/** The values that a model with these parameters receives. Of parameters that are not known by name: numbers or strings. */
 export type ValuesOf<P extends Parameters> = {
-  readonly [K in keyof P]: P[K] extends Choice<infer Value> ? Value : number;
+  readonly [K in keyof P]: P[K] extends Choice<infer Value> ? Value : P[K] extends Quantity ? number : number | string;
 };
 
 export const quantity = (description: Omit<Quantity, 'kind'>): Quantity => ({ kind: 'quantity', ...description });

@@ -1,0 +1,68 @@
+/** The catalogue as plain objects, in the shape that goes over the wire: what forms, swatches and recipes are built from. */
+import type { Acquisition } from './acquisition';
+import type { Cause, Reconstruction, Remedy, Source } from './cause';
+import { initialOf } from './initial';
+import type { Parameter, Parameters } from './parameter';
+
+export type DescribedParameter =
+  | {
+      id: string;
+      label: string;
+      unit: string;
+      min: number;
+      max: number;
+      step: number;
+      initial: number;
+      /** The scan fact that filled `initial`, in words. */
+      fromHeader?: string;
+    }
+  | { id: string; label: string; options: { value: string; label: string }[]; initial: string };
+
+export interface DescribedReconstruction {
+  id: string;
+  title: string;
+  parameters: DescribedParameter[];
+  looks: { image: string; kspace: string };
+  sources: Source[];
+}
+
+export interface DescribedCause extends DescribedReconstruction {
+  stage: Cause['stage'];
+  needsObjectPhase: boolean;
+  remedies: Remedy[];
+}
+
+function describeParameter(id: string, parameter: Parameter, acquisition?: Acquisition): DescribedParameter {
+  if (parameter.kind === 'choice') {
+    const { label, options, initial } = parameter;
+    return { id, label, options: options.map((option) => ({ ...option })), initial };
+  }
+  const { label, unit, min, max, step } = parameter;
+  const { value, fact } = initialOf(parameter, acquisition);
+  const described = { id, label, unit, min, max, step, initial: Number(value) };
+  return fact === undefined ? described : { ...described, fromHeader: `${fact} in the header` };
+}
+
+const describeParameters = (parameters: Parameters, acquisition?: Acquisition): DescribedParameter[] =>
+  Object.entries(parameters).map(([id, parameter]) => describeParameter(id, parameter, acquisition));
+
+/** A cause; with `acquisition`, initial values come from the scan facts where they say one. */
+export const describeCause = (cause: Cause, acquisition?: Acquisition): DescribedCause => ({
+  id: cause.id,
+  title: cause.title,
+  stage: cause.stage,
+  parameters: describeParameters(cause.parameters, acquisition),
+  looks: { ...cause.looks },
+  needsObjectPhase: cause.needsObjectPhase === true,
+  remedies: cause.remedies.map((remedy) => ({ ...remedy })),
+  sources: cause.sources.map((source) => ({ ...source })),
+});
+
+/** A reconstruction, in the same way. */
+export const describeReconstruction = (method: Reconstruction, acquisition?: Acquisition): DescribedReconstruction => ({
+  id: method.id,
+  title: method.title,
+  parameters: describeParameters(method.parameters, acquisition),
+  looks: { ...method.looks },
+  sources: method.sources.map((source) => ({ ...source })),
+});

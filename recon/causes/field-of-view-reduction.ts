@@ -1,0 +1,82 @@
+/**
+ * Wrap-around: the field of view along the phase encoding is smaller than the object, I'(y) = Σ_m I(y + y0 + m·n), n = round(r·N),
+ * for the n pixels about the centre y0 of the new window. The sum is complex and comes before any magnitude. The pixel size stays;
+ * the lines of k-space lie 1/(n·Δ) apart. It stands before every cause that leaves lines out: it decides which lines there are.
+ */
+import { phaseEncodeAxis } from '../acquisition';
+import type { Encoded } from '../cause';
+import { defineCause } from '../cause';
+import { inverseAlong, transformAlong } from '../fourier';
+import type { ComplexPlane } from '../grid';
+import { centredGrid, complexZeros } from '../grid';
+import { fullyTaken } from '../lines';
+import { quantity } from '../parameter';
+
+/** Adds the lines of `plane` along `axis` up modulo `n`, about the line `offset` from the centre. */
+function fold(plane: ComplexPlane, axis: 0 | 1, n: number, offset: number): ComplexPlane {
+  const { rows, columns, spacing } = plane;
+  const folded = complexZeros(centredGrid(axis === 0 ? n : rows, axis === 1 ? n : columns, spacing));
+  const length = axis === 0 ? rows : columns;
+  const target = Int32Array.from({ length }, (_, index) => {
+    const position = index - Math.floor(length / 2) - offset + Math.floor(n / 2);
+    return ((position % n) + n) % n;
+  });
+  for (let row = 0; row < rows; row++) {
+    for (let column = 0; column < columns; column++) {
+      const toRow = axis === 0 ? (target[row] as number) : row;
+      const toColumn = axis === 1 ? (target[column] as number) : column;
+      const from = row * columns + column;
+      const to = toRow * folded.columns + toColumn;
+      folded.re[to] = (folded.re[to] as number) + (plane.re[from] as number);
+      folded.im[to] = (folded.im[to] as number) + (plane.im[from] as number);
+    }
+  }
+  return folded;
+}
+
+export const fieldOfViewReduction = defineCause({
+  id: 'field-of-view-reduction',
+  title: 'Wrap-around',
+  stage: 'encoding',
+  needsObjectPhase: true,
+  parameters: {
+    fraction: quantity({
+      label: 'Phase field of view',
+      unit: 'of full',
+      min: 0.4,
+      max: 1,
+      step: 0.01,
+      initial: 0.75,
+      fromHeader: {
+        fact: 'Percent phase field of view',
+        read: ({ phaseFieldOfViewFraction: r }) => (r !== undefined && r < 1 ? r : undefined),
+      },
+    }),
+    offCentre: quantity({ label: 'Off-centre', unit: 'of full', min: -0.25, max: 0.25, step: 0.01, initial: 0 }),
+  },
+  identity: { fraction: 1, offCentre: 0 },
+  looks: {
+    image:
+      'What reaches out of the field of view on one side along the phase encoding comes in again on the opposite side, laid over what is there; where the phases of the two differ they subtract.',
+    kspace: 'Not visible: there are fewer lines, further apart, but none is missing and none is marked.',
+  },
+  sources: [
+    { citation: 'Zhuo J, Gullapalli RP. MR artifacts, safety, and quality control. RadioGraphics 26:275', year: 2006, standing: 'confirmed' },
+    { citation: 'Pusey E et al. Magnetic resonance imaging artifacts. RadioGraphics 6:891', year: 1986, standing: 'from memory' },
+    { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'from memory' },
+  ],
+  remedies: [
+    { change: 'Make the phase field of view larger than the anatomy', who: 'technologist', price: 'Longer, or coarser pixels, in proportion; SNR rises with either' },
+    { change: 'Oversample along the phase encoding', who: 'technologist', price: 'Longer in proportion, unless averages are cut by as much; SNR then stays' },
+    { change: 'Swap phase and frequency encoding, so that the short side of the anatomy is phase encoded', who: 'technologist', price: 'Motion ghosts and chemical shift turn with it; other gradients work hardest: check the conditions of an implant' },
+    { change: 'Saturation bands over the anatomy outside the field of view', who: 'technologist', price: 'More RF (SAR rises) and a longer minimum TR' },
+    { change: 'Arms out of the plane; switch off coil elements that only see the outside', who: 'technologist', price: 'A minute at the table; signal falls at the edge of the coil' },
+  ],
+  apply(kspace, { fraction, offCentre }, { acquisition }): Encoded {
+    const axis = phaseEncodeAxis(acquisition.phaseEncode);
+    const length = axis === 0 ? kspace.rows : kspace.columns;
+    const n = Math.max(1, Math.round(fraction * length));
+    const offset = Math.round(offCentre * length);
+    return fullyTaken(transformAlong(fold(inverseAlong(kspace, axis), axis, n, offset), axis));
+  },
+});

@@ -1,0 +1,8 @@
+/** Every modelled cause, in the order of the signal chain. */
+import type { Cause } from '../cause';
+import { fieldOfViewReduction } from './field-of-view-reduction';
+import { partialFourier } from './partial-fourier';
+import { periodicMotion } from './periodic-motion';
+import { uniformUndersampling } from './uniform-undersampling';
+
+export const causes: readonly Cause[] = [fieldOfViewReduction, uniformUndersampling, partialFourier, periodicMotion];
