@@ -99,7 +99,7 @@ export const fonts = {
 } as const;
 
 /** Pixels. Nothing below 11. */
-export const sizes = { caption: 11, small: 12, label: 13, body: 15, heading: 15, title: 18, display: 28 } as const;
+export const sizes = { caption: 11, small: 12, label: 13, detail: 14, heading: 15, body: 16, title: 20, display: 28 } as const;
 
 /** The grid is 4 pixels: `space(3)` is 12. */
 export const space = (steps: number): number => steps * 4;
