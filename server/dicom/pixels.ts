@@ -1,0 +1,166 @@
+/**
+ * Pixel data to values: bits masked and sign-extended, padding made zero, rescaled. Sizes are checked against the bytes that are
+ * there before anything is allocated. Sources: DICOM PS3.3 C.7.6.3 and C.11.1, PS3.5 section 8.
+ */
+import type { Element } from 'dicom-parser';
+import type { Header } from './header';
+import type { Warning } from './warnings';
+import { refuse, type Refused } from './refusal';
+
+export interface Pixels {
+  readonly rows: number;
+  readonly columns: number;
+  /** Rescaled, [row, column]. */
+  readonly values: Float32Array<ArrayBuffer>;
+  /** 1st and 99.8th percentile of the values, padding left out. */
+  readonly range: readonly [number, number];
+  /** Share of pixels that are exactly zero as stored, or padding. */
+  readonly zeroFraction: number;
+  readonly warnings: readonly Warning[];
+}
+
+/** Sides in pixels. MR matrices end at 2048 in practice; smaller than 8 is no image (common practice). */
+const smallestSide = 8;
+const largestSide = 4096;
+const rangePercentiles = [0.01, 0.998] as const;
+
+interface Layout {
+  readonly rows: number;
+  readonly columns: number;
+  readonly bytesPerPixel: 1 | 2;
+  readonly bitsStored: number;
+  readonly shift: number;
+  readonly signed: boolean;
+}
+
+export function readPixels(bytes: Uint8Array, header: Header, element: Element): Pixels | Refused {
+  const layout = layoutOf(header);
+  if ('refused' in layout) return layout;
+  const expected = layout.rows * layout.columns * layout.bytesPerPixel;
+  // An odd number of bytes is padded to an even one.
+  if (element.length < expected || element.length > expected + 1) {
+    const claim = `${layout.columns} × ${layout.rows} pixels of ${layout.bytesPerPixel * 8} bits need ${expected} bytes`;
+    return refuse('size', `The header and the pixels disagree: ${claim}, and the file holds ${element.length}. Export it again.`);
+  }
+  return rescaled(storedValues(bytes, element.dataOffset, layout), layout, header);
+}
+
+function layoutOf(header: Header): Layout | Refused {
+  const rows = header.number('rows');
+  const columns = header.number('columns');
+  if (rows === undefined || columns === undefined) return refuse('size', 'The header does not say how many rows and columns there are.');
+  const fits = (side: number) => side >= smallestSide && side <= largestSide;
+  if (!fits(rows) || !fits(columns)) {
+    return refuse(
+      'size',
+      `The header claims ${columns} × ${rows} pixels; images from ${smallestSide} to ${largestSide} pixels a side are read.`,
+    );
+  }
+  const bitsAllocated = header.number('bitsAllocated');
+  if (bitsAllocated !== 8 && bitsAllocated !== 16) {
+    return refuse('bit-depth', `Pixels of ${bitsAllocated ?? 'an unknown number of'} bits are not read; 8 and 16 are.`);
+  }
+  const bitsStored = header.number('bitsStored') ?? bitsAllocated;
+  const highBit = header.number('highBit') ?? bitsStored - 1;
+  if (bitsStored < 8 || bitsStored > bitsAllocated || highBit < bitsStored - 1 || highBit >= bitsAllocated) {
+    return refuse(
+      'bit-depth',
+      `The header says ${bitsStored} bits stored up to bit ${highBit} of ${bitsAllocated}: that cannot be, or is not read.`,
+    );
+  }
+  const signed = header.number('pixelRepresentation') === 1;
+  return { rows, columns, bytesPerPixel: bitsAllocated === 8 ? 1 : 2, bitsStored, shift: highBit + 1 - bitsStored, signed };
+}
+
+/** Stored values as the integers they stand for. Bits outside BitsStored, where old files kept overlays, are masked away. */
+function storedValues(bytes: Uint8Array, offset: number, { rows, columns, bytesPerPixel, bitsStored, shift, signed }: Layout): Int32Array {
+  const view = new DataView(bytes.buffer, bytes.byteOffset + offset, rows * columns * bytesPerPixel);
+  const stored = new Int32Array(rows * columns);
+  const unused = 32 - bitsStored;
+  for (let i = 0; i < stored.length; i++) {
+    const word = bytesPerPixel === 1 ? view.getUint8(i) : view.getUint16(2 * i, true);
+    const top = (word >>> shift) << unused;
+    stored[i] = signed ? top >> unused : top >>> unused;
+  }
+  return stored;
+}
+
+/** Stored values reach from −32768 (signed) to 65535 (unsigned). */
+const signOffset = 1 << 15;
+const nStoredValues = 3 << 15;
+
+function rescaled(stored: Int32Array, layout: Layout, header: Header): Pixels {
+  const { slope, intercept, warning } = rescaleOf(header);
+  const padding = paddingValue(header, layout);
+  // Padding that stands for zero anyway needs no care of its own.
+  const mapped = padding === 0 && intercept === 0 ? undefined : padding;
+  const values = new Float32Array(stored.length);
+  const counts = new Uint32Array(nStoredValues);
+  let padded = 0;
+  let negative = 0;
+  for (let i = 0; i < stored.length; i++) {
+    const value = stored[i] as number;
+    if (value === mapped) {
+      padded++;
+      continue;
+    }
+    if (value < 0) negative++;
+    counts[value + signOffset] = (counts[value + signOffset] as number) + 1;
+    values[i] = slope * value + intercept;
+  }
+  const { rows, columns } = layout;
+  const range = rangeOf(counts, stored.length - padded, (value) => slope * value + intercept);
+  const zeroFraction = ((counts[signOffset] as number) + padded) / stored.length;
+  const warnings = [warning, paddingWarning(padded), negativeWarning(negative)].filter((found) => found !== undefined);
+  return { rows, columns, values, range, zeroFraction, warnings };
+}
+
+/** The value that marks places without an image, read with the sign of the pixels whatever VR the file gave it. */
+function paddingValue(header: Header, { signed }: Layout): number | undefined {
+  const value = header.number('pixelPaddingValue');
+  if (value === undefined) return undefined;
+  return signed ? (value << 16) >> 16 : value & 0xffff;
+}
+
+function rescaleOf(header: Header): { slope: number; intercept: number; warning?: Warning } {
+  const slope = header.number('rescaleSlope') ?? 1;
+  const intercept = header.number('rescaleIntercept') ?? 0;
+  if (slope > 0) return { slope, intercept };
+  const text = 'The rescale slope in the header is not positive and was left out: values are as stored, in the scanner’s own units.';
+  return { slope: 1, intercept: 0, warning: { code: 'rescale-ignored', text } };
+}
+
+/** Percentiles by counting; the two ends are kept apart, so that a window can be made of them. */
+function rangeOf(counts: Uint32Array, total: number, rescale: (stored: number) => number): readonly [number, number] {
+  const [low, high] = rangePercentiles.map((fraction) => rescale(storedPercentile(counts, total * fraction)));
+  const from = Math.fround(low ?? 0);
+  const to = Math.fround(high ?? 0);
+  return to > from ? [from, to] : [from, from + 1];
+}
+
+/** The smallest stored value at which more than `rank` values are counted, or the largest that occurs. */
+function storedPercentile(counts: Uint32Array, rank: number): number {
+  let seen = 0;
+  let last = 0;
+  for (let index = 0; index < counts.length; index++) {
+    const count = counts[index] as number;
+    if (count === 0) continue;
+    seen += count;
+    last = index - signOffset;
+    if (seen > rank) break;
+  }
+  return last;
+}
+
+function paddingWarning(padded: number): Warning | undefined {
+  if (padded === 0) return undefined;
+  return { code: 'padding', text: `${padded} pixels held the padding value, which marks places without an image; they were set to zero.` };
+}
+
+function negativeWarning(negative: number): Warning | undefined {
+  if (negative === 0) return undefined;
+  return {
+    code: 'negative-values',
+    text: `${negative} pixels are negative, which a magnitude cannot be: a filter, an interpolation or a subtraction made them.`,
+  };
+}

@@ -1,0 +1,10 @@
+/** Why a file is not taken: a code of the contract's closed list and a reason that tells a technologist what to do about it. */
+import type { RefusalCode } from '../contract/images';
+
+export interface Refused {
+  readonly refused: { readonly code: RefusalCode; readonly reason: string };
+}
+
+export const refuse = (code: RefusalCode, reason: string): Refused => ({ refused: { code, reason } });
+
+export const isRefused = (outcome: object): outcome is Refused => 'refused' in outcome;
