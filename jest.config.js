@@ -1,0 +1,53 @@
+/**
+ * Five projects: recon, server, components, architecture, browser. `npm test` runs them all; `npx jest tests/server/sessions.test.ts`
+ * runs one file, `npx jest --selectProjects recon` one project.
+ *
+ * Tests of the server project find in `process.env.TEST_DATABASE_URL` the superuser's address of a throw-away PostgreSQL cluster: make a
+ * database of your own in it, and drop it afterwards. `npm test` starts that cluster; a run by hand that finds the variable unset
+ * starts one in the system's temporary folder, and the last such run to end stops it.
+ *
+ * The browser project tests the production build at `process.env.PICKGLASS_URL`; without it, it starts the product by itself.
+ */
+const compiled = {
+  '\\.[cm]?[jt]sx?$': [
+    'babel-jest',
+    {
+      configFile: false,
+      babelrc: false,
+      presets: [['babel-preset-expo', { reactCompiler: false }]],
+      caller: { name: 'metro', platform: 'web', bundler: 'metro', isServer: true, engine: 'node' },
+    },
+  ],
+};
+
+/** Packages that are only published as ES modules, which Jest's require cannot load as they are. */
+const modulesOnly = ['jose', 'fast-png', 'iobuffer', 'pure-rand'];
+
+const onNode = {
+  testEnvironment: 'node',
+  transform: compiled,
+  transformIgnorePatterns: [`/node_modules/(?!(${modulesOnly.join('|')})/)`],
+  moduleNameMapper: { '^@/(.*)$': '<rootDir>/$1' },
+};
+
+/** @type {import('jest').Config} */
+module.exports = {
+  projects: [
+    { ...onNode, displayName: 'recon', testMatch: ['<rootDir>/tests/{recon,laws}/**/*.test.ts'] },
+    {
+      ...onNode,
+      displayName: 'server',
+      testMatch: ['<rootDir>/tests/{server,db,workers}/**/*.test.ts'],
+      globalSetup: '<rootDir>/tests/database/start.mjs',
+      globalTeardown: '<rootDir>/tests/database/stop.mjs',
+    },
+    {
+      preset: 'jest-expo/web',
+      displayName: 'components',
+      testMatch: ['<rootDir>/tests/components/**/*.test.{ts,tsx}'],
+      moduleNameMapper: { '^@/(.*)$': '<rootDir>/$1' },
+    },
+    { ...onNode, displayName: 'architecture', testMatch: ['<rootDir>/tests/architecture.test.ts'] },
+    { ...onNode, displayName: 'browser', testMatch: ['<rootDir>/tests/e2e/**/*.test.ts'] },
+  ],
+};
