@@ -1,6 +1,7 @@
 /**
  * The only attributes of a DICOM file that are ever looked at, besides the pixels. An allow-list and no block-list: whatever is
- * not named here (patient, people, places, dates, UIDs, free text, private groups) cannot be read by the rest of this folder.
+ * not named here (patient, people, places, dates, UIDs, free text, private groups but one number) cannot be read by the rest of
+ * this folder.
  * Tags, names and VRs: DICOM PS3.6. None of those marked `stored` is in the list of identifying attributes, PS3.15 table E.1-1,
  * but the times, of which only the time of day is kept, and the coil and software texts are screened besides.
  */
@@ -27,6 +28,8 @@ export const allowList = {
   modality: checked('x00080060', 'CS'),
   conversionType: checked('x00080064', 'CS'),
   complexImageComponent: checked('x00089208', 'CS'),
+  geParametersCreator: checked('x00430010', 'LO'),
+  geImageKind: checked('x0043102f', 'SS'),
   burnedInAnnotation: checked('x00280301', 'CS'),
   imageType: stored('x00080008', 'CS'),
 

@@ -24,6 +24,10 @@ const otherComponents: Readonly<Record<string, string>> = {
   MIXED: 'a mixture of complex components',
 };
 
+/** The private number by which one maker tells the component, where Image Type does not (from memory: GE, image kind). */
+const privateComponents: readonly string[] = ['M', 'P', 'R', 'I'];
+const privateCreatorOfComponents = 'GEMS_PARM_01';
+
 type Check = (header: Header) => Refused | undefined;
 
 export function refuseKindOfImage(header: Header): Refused | undefined {
@@ -57,7 +61,7 @@ const otherModalities: Check = (header) => {
 
 /** Two capital letters are a modality; anything else is not repeated. */
 const modalityInWords = (modality: string): string =>
-  /^[A-Z]{2,8}$/.test(modality) && modality.length <= 3 ? `The modality is ${modality}.` : 'The modality is another one.';
+  /^[A-Z]{2}$/.test(modality) ? `The modality is ${modality}.` : 'The modality is another one.';
 
 const burnedInText: Check = (header) =>
   header.text('burnedInAnnotation') === 'YES'
@@ -99,8 +103,13 @@ const colour: Check = (header) => {
 
 const components: Check = (header) => {
   const complexImageComponent = header.text('complexImageComponent');
-  const values = [...header.texts('imageType').slice(2), complexImageComponent ?? 'MAGNITUDE'];
+  const values = [...header.texts('imageType').slice(2), complexImageComponent ?? 'MAGNITUDE', privateComponent(header)];
   const other = values.map((value) => otherComponents[value]).find((words) => words !== undefined);
   if (other === undefined) return undefined;
   return refuse('not-magnitude', `This is ${other}; only magnitude images are taken yet. Send the magnitude image of the same scan.`);
 };
+
+function privateComponent(header: Header): string {
+  if (header.text('geParametersCreator') !== privateCreatorOfComponents) return 'M';
+  return privateComponents[header.number('geImageKind') ?? 0] ?? 'M';
+}

@@ -22,6 +22,8 @@ export interface Pixels {
 /** Sides in pixels. MR matrices end at 2048 in practice; smaller than 8 is no image (common practice). */
 const smallestSide = 8;
 const largestSide = 4096;
+/** Slopes of MR are within a few powers of ten of 1; far beyond, float32 would overflow. */
+const largestRescale = 1e12;
 const rangePercentiles = [0.01, 0.998] as const;
 
 interface Layout {
@@ -49,7 +51,7 @@ function layoutOf(header: Header): Layout | Refused {
   const rows = header.number('rows');
   const columns = header.number('columns');
   if (rows === undefined || columns === undefined) return refuse('size', 'The header does not say how many rows and columns there are.');
-  const fits = (side: number) => side >= smallestSide && side <= largestSide;
+  const fits = (side: number) => Number.isInteger(side) && side >= smallestSide && side <= largestSide;
   if (!fits(rows) || !fits(columns)) {
     return refuse(
       'size',
@@ -62,7 +64,8 @@ function layoutOf(header: Header): Layout | Refused {
   }
   const bitsStored = header.number('bitsStored') ?? bitsAllocated;
   const highBit = header.number('highBit') ?? bitsStored - 1;
-  if (bitsStored < 8 || bitsStored > bitsAllocated || highBit < bitsStored - 1 || highBit >= bitsAllocated) {
+  const possible = Number.isInteger(bitsStored) && Number.isInteger(highBit) && highBit >= bitsStored - 1 && highBit < bitsAllocated;
+  if (!possible || bitsStored < 8) {
     return refuse(
       'bit-depth',
       `The header says ${bitsStored} bits stored up to bit ${highBit} of ${bitsAllocated}: that cannot be, or is not read.`,
@@ -123,10 +126,11 @@ function paddingValue(header: Header, { signed }: Layout): number | undefined {
 }
 
 function rescaleOf(header: Header): { slope: number; intercept: number; warning?: Warning } {
-  const slope = header.number('rescaleSlope') ?? 1;
-  const intercept = header.number('rescaleIntercept') ?? 0;
-  if (slope > 0) return { slope, intercept };
-  const text = 'The rescale slope in the header is not positive and was left out: values are as stored, in the scanner’s own units.';
+  const [slope = 1] = header.numbers('rescaleSlope');
+  const [intercept = 0] = header.numbers('rescaleIntercept');
+  // NaN, which stands for what is no number, fails both.
+  if (slope >= 1 / largestRescale && slope <= largestRescale && Math.abs(intercept) <= largestRescale) return { slope, intercept };
+  const text = 'The rescale slope and intercept in the header make no sense and were left out: values are as stored.';
   return { slope: 1, intercept: 0, warning: { code: 'rescale-ignored', text } };
 }
 
