@@ -10,7 +10,8 @@ export const gyromagneticRatio = 42.577478518e6;
 export const fatShift = 3.5e-6;
 
 /** Readout gradient from bandwidth and size of a pixel, G = BW/(γ̄·Δx). */
-export const readoutGradient = (bandwidthPerPixel: number, pixelSize: number): number => bandwidthPerPixel / (gyromagneticRatio * pixelSize);
+export const readoutGradient = (bandwidthPerPixel: number, pixelSize: number): number =>
+  bandwidthPerPixel / (gyromagneticRatio * pixelSize);
 
 /** Hertz that lie on a metre along the readout, BW/Δx. */
 export const hertzPerMetre = (bandwidthPerPixel: number, pixelSize: number): number => bandwidthPerPixel / pixelSize;
@@ -46,7 +47,12 @@ export interface Vial {
 
 /** What the receiver hears from `vials` under a readout gradient, at times of `dwell` apart, time 0 at index floor(n/2):
  *  s(t) = Σ amount·exp(−i2πγ̄·G·x·t). Throws for fewer than one sample. */
-export function vialSignal(vials: readonly Vial[], gradient: number, dwell: number, nSamples: number): { re: Float64Array; im: Float64Array } {
+export function vialSignal(
+  vials: readonly Vial[],
+  gradient: number,
+  dwell: number,
+  nSamples: number,
+): { re: Float64Array; im: Float64Array } {
   if (!(nSamples >= 1)) throw RangeError(`nSamples must be at least 1, got ${nSamples}`);
   const re = new Float64Array(nSamples);
   const im = new Float64Array(nSamples);

@@ -2,7 +2,7 @@
  * What the scan facts imply, worked out for the facts panel: the relations of `encoding.ts` in the units of the console (mT/m, Hz/mm,
  * ms, px), each with its formula and, where a fact is missing, what would be needed.
  */
-import type { Acquisition } from './acquisition';
+import type { Acquisition, PhaseEncode } from './acquisition';
 import { phaseEncodeAxis } from './acquisition';
 import { fatShiftPixels, ghostPosition, hertzPerMetre, readoutGradient, readoutTime } from './encoding';
 import type { Grid } from './grid';
@@ -35,9 +35,26 @@ function worked(named: Named, facts: readonly Fact[], relation: (...values: numb
 /** Size of the image; its spacing in metres is left out where the header is silent. */
 type ImageGrid = Pick<Grid, 'rows' | 'columns'> & { readonly spacing?: Grid['spacing'] | undefined };
 
-function readoutImplications({ bandwidthPerPixel, imagingFrequency }: Acquisition, pixelSize: number | undefined): Implication[] {
+type AxisMayBeUnknown = Omit<Acquisition, 'phaseEncode'> & { readonly phaseEncode?: PhaseEncode | undefined };
+
+/** Lines along the phase encoding, and metres of a pixel along the readout; undefined where they hang on an axis not known. */
+function alongAxes(
+  phaseEncode: PhaseEncode | undefined,
+  size: readonly [number, number],
+  spacing: Grid['spacing'] | undefined,
+): [nLines: number | undefined, pixelSize: number | undefined] {
+  const phaseAxis = phaseEncode && phaseEncodeAxis(phaseEncode);
+  const pick = (pair: readonly [number, number], axis: 0 | 1 | undefined): number | undefined => {
+    if (axis !== undefined) return pair[axis];
+    return pair[0] === pair[1] ? pair[0] : undefined;
+  };
+  const readoutAxis = phaseAxis === undefined ? undefined : phaseAxis === 0 ? 1 : 0;
+  return [pick(size, phaseAxis), spacing && pick(spacing, readoutAxis)];
+}
+
+function readoutImplications({ bandwidthPerPixel, imagingFrequency }: AxisMayBeUnknown, pixelSize: number | undefined): Implication[] {
   const bandwidth = { name: 'the bandwidth per pixel', value: bandwidthPerPixel };
-  const spacing = { name: 'the pixel spacing', value: pixelSize };
+  const spacing = { name: 'the pixel spacing along the readout', value: pixelSize };
   const frequency = { name: 'the imaging frequency', value: imagingFrequency };
   return [
     worked(
@@ -63,7 +80,11 @@ function readoutImplications({ bandwidthPerPixel, imagingFrequency }: Acquisitio
   ];
 }
 
-function ghostImplications({ repetitionTime, averages }: Acquisition, nLines: number, ghostFrequency: number | undefined): Implication[] {
+function ghostImplications(
+  { repetitionTime, averages }: AxisMayBeUnknown,
+  nLines: number | undefined,
+  ghostFrequency: number | undefined,
+): Implication[] {
   const facts = [
     { name: 'TR', value: repetitionTime },
     { name: 'the frequency of the motion', value: ghostFrequency },
@@ -73,16 +94,21 @@ function ghostImplications({ repetitionTime, averages }: Acquisition, nLines: nu
   const named = { label: 'First ghost', formula: 'frac(TR · averages · f)' };
   return [
     worked({ ...named, id: 'ghost-fraction', unit: 'of phase FOV' }, facts, position),
-    worked({ ...named, id: 'ghost-pixels', unit: 'px', formula: `N · ${named.formula}` }, facts, (TR, f) => nLines * position(TR, f)),
+    worked(
+      { ...named, id: 'ghost-pixels', unit: 'px', formula: `N · ${named.formula}` },
+      [...facts, { name: 'the phase-encode axis', value: nLines }],
+      (TR, f, N) => N * position(TR, f),
+    ),
   ].map((implication) => (implication.value === null ? implication : { ...implication, ...assumed }));
 }
 
-/** `ghostFrequency` in hertz: the motion whose ghost is looked for. */
-export function implications(acquisition: Acquisition, grid: ImageGrid, ghostFrequency?: number): Implication[] {
-  const phaseAxis = phaseEncodeAxis(acquisition.phaseEncode);
-  const nLines = phaseAxis === 0 ? grid.rows : grid.columns;
+/** `ghostFrequency` in hertz: the motion whose ghost is looked for. Without a phase-encode axis nothing along an axis is worked out,
+ *  unless the image is the same along both. */
+export function implications(acquisition: AxisMayBeUnknown, grid: ImageGrid, ghostFrequency?: number): Implication[] {
+  const { rows, columns, spacing } = grid;
+  const [nLines, pixelSize] = alongAxes(acquisition.phaseEncode, [rows, columns], spacing);
   return [
-    ...readoutImplications(acquisition, grid.spacing?.[phaseAxis === 0 ? 1 : 0]),
+    ...readoutImplications(acquisition, pixelSize),
     ...ghostImplications(acquisition, nLines, ghostFrequency),
     worked(
       { id: 'echo-trains', label: 'Echo trains for one image', unit: '', formula: 'lines acquired / echo train length' },

@@ -32,7 +32,10 @@ function valueFaults(parameters: Parameters, values: ParameterValues, path: Reci
   for (const id of Object.keys(values)) {
     if (Object.hasOwn(parameters, id)) continue;
     const known = Object.keys(parameters);
-    faults.push({ path: [...path, id], message: `${id} is not a parameter here; ${known.length ? `known: ${listed(known)}` : 'there are none'}` });
+    faults.push({
+      path: [...path, id],
+      message: `${id} is not a parameter here; ${known.length ? `known: ${listed(known)}` : 'there are none'}`,
+    });
   }
   return faults;
 }

@@ -61,16 +61,40 @@ export const fieldOfViewReduction = defineCause({
     kspace: 'Not visible: there are fewer lines, further apart, but none is missing and none is marked.',
   },
   sources: [
-    { citation: 'Zhuo J, Gullapalli RP. MR artifacts, safety, and quality control. RadioGraphics 26:275', year: 2006, standing: 'confirmed' },
+    {
+      citation: 'Zhuo J, Gullapalli RP. MR artifacts, safety, and quality control. RadioGraphics 26:275',
+      year: 2006,
+      standing: 'confirmed',
+    },
     { citation: 'Pusey E et al. Magnetic resonance imaging artifacts. RadioGraphics 6:891', year: 1986, standing: 'from memory' },
     { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'from memory' },
   ],
   remedies: [
-    { change: 'Make the phase field of view larger than the anatomy', who: 'technologist', price: 'Longer, or coarser pixels, in proportion; SNR rises with either' },
-    { change: 'Oversample along the phase encoding', who: 'technologist', price: 'Longer in proportion, unless averages are cut by as much; SNR then stays' },
-    { change: 'Swap phase and frequency encoding, so that the short side of the anatomy is phase encoded', who: 'technologist', price: 'Motion ghosts and chemical shift turn with it; other gradients work hardest: check the conditions of an implant' },
-    { change: 'Saturation bands over the anatomy outside the field of view', who: 'technologist', price: 'More RF (SAR rises) and a longer minimum TR' },
-    { change: 'Arms out of the plane; switch off coil elements that only see the outside', who: 'technologist', price: 'A minute at the table; signal falls at the edge of the coil' },
+    {
+      change: 'Make the phase field of view larger than the anatomy',
+      who: 'technologist',
+      price: 'Longer, or coarser pixels, in proportion; SNR rises with either',
+    },
+    {
+      change: 'Oversample along the phase encoding',
+      who: 'technologist',
+      price: 'Longer in proportion, unless averages are cut by as much; SNR then stays',
+    },
+    {
+      change: 'Swap phase and frequency encoding, so that the short side of the anatomy is phase encoded',
+      who: 'technologist',
+      price: 'Motion ghosts and chemical shift turn with it; other gradients work hardest: check the conditions of an implant',
+    },
+    {
+      change: 'Saturation bands over the anatomy outside the field of view',
+      who: 'technologist',
+      price: 'More RF (SAR rises) and a longer minimum TR',
+    },
+    {
+      change: 'Arms out of the plane; switch off coil elements that only see the outside',
+      who: 'technologist',
+      price: 'A minute at the table; signal falls at the edge of the coil',
+    },
   ],
   apply(kspace, { fraction, offCentre }, { acquisition }): Encoded {
     const axis = phaseEncodeAxis(acquisition.phaseEncode);

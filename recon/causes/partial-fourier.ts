@@ -33,15 +33,39 @@ export const partialFourier = defineCause({
     kspace: 'One side is empty beyond the band 2f−1 about the centre. The k-space of a magnitude image is symmetric and does not show it.',
   },
   sources: [
-    { citation: 'Noll DC, Nishimura DG, Macovski A. Homodyne detection in magnetic resonance imaging. IEEE Trans Med Imaging 10:154', year: 1991, standing: 'from memory' },
-    { citation: 'Haacke EM, Lindskog ED, Lin W. A fast, iterative, partial-Fourier technique. J Magn Reson 92:126', year: 1991, standing: 'from memory' },
-    { citation: 'McGibney G et al. Quantitative evaluation of several partial Fourier reconstruction algorithms. Magn Reson Med 30:51', year: 1993, standing: 'from memory' },
+    {
+      citation: 'Noll DC, Nishimura DG, Macovski A. Homodyne detection in magnetic resonance imaging. IEEE Trans Med Imaging 10:154',
+      year: 1991,
+      standing: 'from memory',
+    },
+    {
+      citation: 'Haacke EM, Lindskog ED, Lin W. A fast, iterative, partial-Fourier technique. J Magn Reson 92:126',
+      year: 1991,
+      standing: 'from memory',
+    },
+    {
+      citation: 'McGibney G et al. Quantitative evaluation of several partial Fourier reconstruction algorithms. Magn Reson Med 30:51',
+      year: 1993,
+      standing: 'from memory',
+    },
   ],
   remedies: [
-    { change: 'Raise the fraction: 7/8, or all lines', who: 'technologist', price: 'Longer in proportion, or a longer shortest TE in echo-planar scans; SNR rises with the square root of the fraction' },
-    { change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less', who: 'technologist', price: 'Other contrast; a refocusing pulse raises SAR' },
+    {
+      change: 'Raise the fraction: 7/8, or all lines',
+      who: 'technologist',
+      price: 'Longer in proportion, or a longer shortest TE in echo-planar scans; SNR rises with the square root of the fraction',
+    },
+    {
+      change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less',
+      who: 'technologist',
+      price: 'Other contrast; a refocusing pulse raises SAR',
+    },
     { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute' },
-    { change: 'Try the other reconstruction of the missing side, iterative instead of homodyne, where the console offers it', who: 'physicist', price: 'Slower reconstruction' },
+    {
+      change: 'Try the other reconstruction of the missing side, iterative instead of homodyne, where the console offers it',
+      who: 'physicist',
+      price: 'Slower reconstruction',
+    },
   ],
   apply(kspace, { fraction }, { acquisition }) {
     const lines = linesOf(kspace, acquisition);

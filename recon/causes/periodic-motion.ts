@@ -15,7 +15,8 @@ import { quantity } from '../parameter';
 const assumedRepetitionTime = 0.5;
 
 /** Seconds from one line to the next. */
-export const lineInterval = ({ repetitionTime, averages }: Acquisition): number => (repetitionTime ?? assumedRepetitionTime) * (averages ?? 1);
+export const lineInterval = ({ repetitionTime, averages }: Acquisition): number =>
+  (repetitionTime ?? assumedRepetitionTime) * (averages ?? 1);
 
 export const periodicMotion = defineCause({
   id: 'periodic-motion',
@@ -30,20 +31,50 @@ export const periodicMotion = defineCause({
   looks: {
     image:
       'Faint copies of the whole object along the phase encoding, whatever way the motion goes, at equal steps of frac(TR × averages × frequency) of the field of view. Where the header has no TR, 500 ms is assumed.',
-    kspace: 'The phase swings from line to line with the period of the motion; the magnitude stays. The k-space of the magnitude image shows faint bands across the phase encoding instead.',
+    kspace:
+      'The phase swings from line to line with the period of the motion; the magnitude stays. The k-space of the magnitude image shows faint bands across the phase encoding instead.',
   },
   sources: [
     { citation: 'Wood ML, Henkelman RM. MR image artifacts from periodic motion. Med Phys 12:143', year: 1985, standing: 'from memory' },
-    { citation: 'Wood ML, Henkelman RM. Suppression of respiratory motion artifacts in magnetic resonance imaging. Med Phys 13:794', year: 1986, doi: '10.1118/1.595851', standing: 'confirmed' },
-    { citation: 'Haacke EM, Patrick JL. Reducing motion artifacts in two-dimensional Fourier transform imaging. Magn Reson Imaging 4:359', year: 1986, standing: 'from memory' },
+    {
+      citation: 'Wood ML, Henkelman RM. Suppression of respiratory motion artifacts in magnetic resonance imaging. Med Phys 13:794',
+      year: 1986,
+      doi: '10.1118/1.595851',
+      standing: 'confirmed',
+    },
+    {
+      citation: 'Haacke EM, Patrick JL. Reducing motion artifacts in two-dimensional Fourier transform imaging. Magn Reson Imaging 4:359',
+      year: 1986,
+      standing: 'from memory',
+    },
   ],
   remedies: [
-    { change: 'Breath-hold, or coach quiet breathing with a belt', who: 'technologist', price: 'The scan must fit one breath; the patient must be able to' },
-    { change: 'Trigger or gate on breathing or pulse, or use a navigator', who: 'technologist', price: 'Longer, often twice; TR follows the patient, and contrast with it' },
-    { change: 'Saturation band over the moving tissue, or fat saturation', who: 'technologist', price: 'More RF (SAR rises) and a longer minimum TR' },
-    { change: 'Flow compensation', who: 'technologist', price: 'Longer shortest TE; gradients switch harder: nerve stimulation and the conditions of an implant' },
+    {
+      change: 'Breath-hold, or coach quiet breathing with a belt',
+      who: 'technologist',
+      price: 'The scan must fit one breath; the patient must be able to',
+    },
+    {
+      change: 'Trigger or gate on breathing or pulse, or use a navigator',
+      who: 'technologist',
+      price: 'Longer, often twice; TR follows the patient, and contrast with it',
+    },
+    {
+      change: 'Saturation band over the moving tissue, or fat saturation',
+      who: 'technologist',
+      price: 'More RF (SAR rises) and a longer minimum TR',
+    },
+    {
+      change: 'Flow compensation',
+      who: 'technologist',
+      price: 'Longer shortest TE; gradients switch harder: nerve stimulation and the conditions of an implant',
+    },
     { change: 'More averages', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
-    { change: 'Swap phase and frequency encoding: the ghosts then run the other way, clear of the organ', who: 'technologist', price: 'Wrap-around turns with them; oversample if the long side is now phase encoded' },
+    {
+      change: 'Swap phase and frequency encoding: the ghosts then run the other way, clear of the organ',
+      who: 'technologist',
+      price: 'Wrap-around turns with them; oversample if the long side is now phase encoded',
+    },
     { change: 'Change TR so that the ghost falls outside the organ', who: 'physicist', price: 'Contrast changes with TR' },
   ],
   apply(kspace, { frequency: f, phaseSwing: a, start }, { acquisition }) {

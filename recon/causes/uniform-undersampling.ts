@@ -30,7 +30,8 @@ export const uniformUndersampling = defineCause({
   looks: {
     image:
       'R overlapping copies of the object, one R-th of the field of view apart along the phase encoding, each one R-th as bright; calibration lines add a blurred true image to them.',
-    kspace: 'Of every R lines only one is filled, apart from a full band in the middle where there are calibration lines. The k-space of the magnitude image does not show the gaps.',
+    kspace:
+      'Of every R lines only one is filled, apart from a full band in the middle where there are calibration lines. The k-space of the magnitude image does not show the gaps.',
   },
   sources: [
     { citation: 'Pruessmann KP et al. SENSE: sensitivity encoding for fast MRI. Magn Reson Med 42:952', year: 1999, standing: 'confirmed' },
@@ -38,9 +39,17 @@ export const uniformUndersampling = defineCause({
   ],
   remedies: [
     { change: 'Lower the acceleration factor', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
-    { change: 'Acquire the calibration again, after the patient has settled, with the field of view of the scan', who: 'technologist', price: 'Seconds to a minute' },
+    {
+      change: 'Acquire the calibration again, after the patient has settled, with the field of view of the scan',
+      who: 'technologist',
+      price: 'Seconds to a minute',
+    },
     { change: 'Take more reference lines', who: 'technologist', price: 'A little longer' },
-    { change: 'Use a coil with more elements along the phase encoding, all of them selected and seated', who: 'technologist', price: 'A new set-up of the patient' },
+    {
+      change: 'Use a coil with more elements along the phase encoding, all of them selected and seated',
+      who: 'technologist',
+      price: 'A new set-up of the patient',
+    },
     { change: 'Check every element of the coil on a phantom', who: 'physicist', price: 'The coil is out of use meanwhile' },
   ],
   apply(kspace, { accelerationFactor, calibrationLines }, { acquisition }) {

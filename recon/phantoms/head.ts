@@ -99,7 +99,7 @@ function sulcus(turn: number, random: Random): Ellipse[] {
 function sulci(random: Random): Ellipse[] {
   const steps = 40;
   return Array.from({ length: steps }, (_, i) => (360 * (i + 0.3 * (random.uniform() - 0.5))) / steps)
-    .filter((degrees) => Math.abs(((degrees + 90) % 180) - 90) > 5 && Math.abs(degrees % 180 - 90) > 8)
+    .filter((degrees) => Math.abs(((degrees + 90) % 180) - 90) > 5 && Math.abs((degrees % 180) - 90) > 8)
     .flatMap((degrees) => sulcus((degrees * Math.PI) / 180, random));
 }
 

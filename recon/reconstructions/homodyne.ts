@@ -47,7 +47,8 @@ export const homodyne = defineReconstruction({
   title: 'Homodyne',
   parameters: {},
   looks: {
-    image: 'As sharp as with all lines where the phase of the object is smooth; dark or bright where it changes within the blur of the symmetric band.',
+    image:
+      'As sharp as with all lines where the phase of the object is smooth; dark or bright where it changes within the blur of the symmetric band.',
     kspace: 'The missing side is made up from the other as its conjugate, so that the k-space of the image looks complete.',
   },
   sources: [
