@@ -23,6 +23,8 @@ const jsonLimit = '256kb';
 export function createApp(deps: Dependencies, { clientFolder }: { clientFolder?: string } = {}): Express {
   const server = express();
   server.disable('x-powered-by');
+  // Answers of the API are not kept, so a hash over megabytes of planes would be work for nothing.
+  server.disable('etag');
   server.use(logRequests(deps.log));
   server.use(protect(deps.env.publicOrigin?.startsWith('https:') ?? false));
   server.use(compress());

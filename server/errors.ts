@@ -124,6 +124,9 @@ export function answerErrors(log: Logger): ErrorRequestHandler {
       return;
     }
     if (problem.retryAfterSeconds !== undefined) response.set('Retry-After', String(problem.retryAfterSeconds));
-    response.status(problemStatus[problem.code]).type('application/problem+json').send(JSON.stringify(problemOf(problem)));
+    response
+      .status(problemStatus[problem.code])
+      .type('application/problem+json')
+      .send(JSON.stringify(problemOf(problem)));
   };
 }

@@ -3,6 +3,7 @@
  * cookies or file names, because any of them may carry what a person typed about a patient.
  */
 import { randomUUID } from 'node:crypto';
+import type { IncomingMessage, ServerResponse } from 'node:http';
 import type { RequestHandler } from 'express';
 import { pino, type DestinationStream, type Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
@@ -11,6 +12,8 @@ import { pinoHttp } from 'pino-http';
 export function openLog(level: string, destination?: DestinationStream): Logger {
   const options = {
     level,
+    // The name of the machine says nothing that the owner of the log does not know.
+    base: undefined,
     redact: ['req.headers', 'res.headers', '*.password', '*.cookie', '*.authorization'],
     serializers: { err: describeError },
   };
@@ -24,10 +27,18 @@ export function logRequests(log: Logger): RequestHandler {
     genReqId: () => randomUUID(),
     serializers: { req: () => undefined, res: () => undefined, err: describeError },
     quietReqLogger: true,
-    customProps: (request, response) => ({ method: request.method, route: routeOf(request), status: response.statusCode }),
     customLogLevel: (_request, response, error) => (error !== undefined || response.statusCode >= 500 ? 'warn' : 'info'),
+    customSuccessObject: (request, response, { responseTime }) => describeAnswer(request, response, responseTime),
+    customErrorObject: (request, response, _error, { responseTime }) => describeAnswer(request, response, responseTime),
   });
 }
+
+const describeAnswer = (request: IncomingMessage, { statusCode }: ServerResponse, milliseconds: number) => ({
+  method: request.method,
+  route: routeOf(request),
+  status: statusCode,
+  milliseconds,
+});
 
 /** The pattern that matched, `/api/cases/:caseId`, without the values in it. */
 const routeOf = (request: object): string => {
@@ -45,7 +56,10 @@ function describeError(error: unknown): Record<string, unknown> {
     code,
     message: fromDatabase ? 'the database refused a statement' : error.message,
     constraint: 'constraint_name' in error ? error.constraint_name : undefined,
-    stack: error.stack?.split('\n').filter((line) => /^\s+at /.test(line)).join('\n'),
+    stack: error.stack
+      ?.split('\n')
+      .filter((line) => /^\s+at /.test(line))
+      .join('\n'),
     cause: error.cause === undefined ? undefined : describeError(error.cause),
   };
 }

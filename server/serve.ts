@@ -151,7 +151,11 @@ function send<O extends z.ZodType>(
   }
   if (!isBinary(result)) throw new TypeError(`${nameOf(route)} must answer with bytes`);
   const { bytes, mediaType, headers = {} } = result;
-  response.status(route.status).set(headers).type(mediaType).send(Buffer.from(bytes.buffer, bytes.byteOffset, bytes.byteLength));
+  response
+    .status(route.status)
+    .set(headers)
+    .type(mediaType)
+    .send(Buffer.from(bytes.buffer, bytes.byteOffset, bytes.byteLength));
 }
 
 const isBinary = (value: unknown): value is Binary => typeof value === 'object' && value !== null && 'bytes' in value;

@@ -63,7 +63,13 @@ export const marks = pgTable(
 
 export const comments = pgTable(
   'comments',
-  { id: uuid().primaryKey().defaultRandom(), caseId: ofCase(), text: text().notNull(), authorId: byMember('author_id'), createdAt: madeAt() },
+  {
+    id: uuid().primaryKey().defaultRandom(),
+    caseId: ofCase(),
+    text: text().notNull(),
+    authorId: byMember('author_id'),
+    createdAt: madeAt(),
+  },
   (table) => [index('comments_of_case').on(table.caseId)],
 );
 

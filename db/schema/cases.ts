@@ -21,7 +21,10 @@ export const cases = pgTable(
     title: text().notNull(),
     scannerId: uuid('scanner_id').references(() => scanners.id),
     coilId: uuid('coil_id').references(() => coils.id),
-    seen: sightingWord().array().notNull().default(sql`'{}'::sighting[]`),
+    seen: sightingWord()
+      .array()
+      .notNull()
+      .default(sql`'{}'::sighting[]`),
     direction: directionWord().notNull().default('unknown'),
     howOften: frequencyWord('how_often').notNull().default('unknown'),
     cost: imageCostWord().notNull().default('unknown'),

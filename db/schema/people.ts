@@ -22,7 +22,10 @@ export const members = pgTable(
     role: roleWord().notNull(),
     passwordHash: text('password_hash').notNull(),
   },
-  (table) => [uniqueIndex('members_email_in_any_case').on(sql`lower(${table.email})`), index('members_of_department').on(table.departmentId)],
+  (table) => [
+    uniqueIndex('members_email_in_any_case').on(sql`lower(${table.email})`),
+    index('members_of_department').on(table.departmentId),
+  ],
 );
 
 export const sessions = pgTable(

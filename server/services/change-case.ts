@@ -22,7 +22,12 @@ export async function fileCase(db: Database, caller: Caller, { images, ...fields
     await addCaseImages(tx, filed.id, uniqueByImage(images));
     await addEvents(tx, [
       { caseId: filed.id, actorId: caller.memberId, kind: 'filed', to: 'reported', text: `Filed as case ${filed.number}` },
-      ...images.map(({ role }) => ({ caseId: filed.id, actorId: caller.memberId, kind: 'image-added' as const, text: `Image added: ${role}` })),
+      ...images.map(({ role }) => ({
+        caseId: filed.id,
+        actorId: caller.memberId,
+        kind: 'image-added' as const,
+        text: `Image added: ${role}`,
+      })),
     ]);
     return readCase(tx, caller, filed.id);
   });
@@ -38,7 +43,9 @@ export async function changeCase(
   return db.transaction(async (tx) => {
     const current = await lockOpenCase(tx, caller, caseId);
     if (current.version !== version) {
-      throw new AppError('version-conflict', { detail: `The case is at version ${current.version}; the change was made on version ${version}` });
+      throw new AppError('version-conflict', {
+        detail: `The case is at version ${current.version}; the change was made on version ${version}`,
+      });
     }
     const changed = Object.keys(fields);
     if (changed.length === 0) return readCase(tx, caller, caseId);

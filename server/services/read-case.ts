@@ -31,7 +31,11 @@ export async function readCase(db: Database, caller: Caller, caseId: string): Pr
 }
 
 /** One page of the department's cases, with how many there are in each state. */
-export async function findCases(db: Database, caller: Caller, query: z.output<typeof listCases.query>): Promise<z.input<typeof listCases.output>> {
+export async function findCases(
+  db: Database,
+  caller: Caller,
+  query: z.output<typeof listCases.query>,
+): Promise<z.input<typeof listCases.output>> {
   const { order, descending, offset, limit, ...filter } = query;
   const found = await findCasesOf(db, caller.departmentId, filter, { order, descending: descending === 'true', offset, limit });
   const images = await listCaseImages(
@@ -45,7 +49,12 @@ export async function findCases(db: Database, caller: Caller, query: z.output<ty
     return filter.state === 'open' ? state !== 'closed' : state === filter.state;
   });
   return {
-    cases: found.map((one) => summarise(one, images.filter(({ caseId }) => caseId === one.row.id))),
+    cases: found.map((one) =>
+      summarise(
+        one,
+        images.filter(({ caseId }) => caseId === one.row.id),
+      ),
+    ),
     total: chosen.reduce((sum, state) => sum + countIn(state), 0),
     counts: {
       reported: countIn('reported'),

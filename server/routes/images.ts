@@ -1,0 +1,24 @@
+import * as contract from '../contract/images';
+import { serve, type App } from '../serve';
+import { fileReader } from '../services/file-reader';
+import { formAskedFor } from '../services/planes-answer';
+import { correctFacts, readImage, readImplications, readPixels, readThumbnail } from '../services/read-image';
+import { takeUpload } from '../services/upload-images';
+
+export function serveImages(app: App): void {
+  const { deps } = app;
+  const { db } = deps;
+  serve(app, contract.uploadImages, ({ caller, request }) => takeUpload(deps, caller, request), {
+    reader: fileReader(deps),
+    status: ({ images }) => (images.length > 0 ? contract.uploadImages.status : 422),
+  });
+  serve(app, contract.readImage, ({ caller, params }) => readImage(db, caller, params.imageId));
+  serve(app, contract.correctFacts, ({ caller, params, body }) => correctFacts(db, caller, params.imageId, body));
+  serve(app, contract.readPixels, ({ caller, params, query, request, gone }) =>
+    readPixels(deps, caller, { ...params, ...query, form: formAskedFor(request) }, gone),
+  );
+  serve(app, contract.readThumbnail, ({ caller, params, query, gone }) => readThumbnail(deps, caller, { ...params, ...query }, gone));
+  serve(app, contract.readImplications, ({ caller, params, query }) =>
+    readImplications(db, caller, params.imageId, query.ghostFrequencyHz),
+  );
+}

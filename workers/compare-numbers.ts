@@ -1,0 +1,64 @@
+/** The numbers that hold a simulated image against another one, which is laid over it in millimetres first. */
+import type { Acquisition } from '../recon/acquisition';
+import type { Grid, Plane } from '../recon/grid';
+import { ghostRatio, type GhostRatio } from '../recon/metrics/ghost-ratio';
+import { leastSquaresGain, nrmse } from '../recon/metrics/nrmse';
+import { ssim } from '../recon/metrics/ssim';
+import { resample } from '../recon/resample';
+import type { SimulationNumbers } from './job';
+
+/** Grids that agree to a thousandth of a pixel are the same: positions are read from decimal strings. */
+const pixelTolerance = 1e-3;
+/** The side of the window of `ssim`. */
+const ssimWindow = 11;
+
+const nothingToCompare = { nrmse: null, gain: null, ssim: null, ghostRatioOfBad: null };
+
+/** Numbers of `simulated` alone and against `bad`; null, with the reason, where one cannot be had. */
+export function compareNumbers(simulated: Plane, bad: Plane | undefined, { phaseEncode }: Acquisition): SimulationNumbers {
+  const ghost = ghostRatio(simulated, phaseEncode);
+  const own = { ghostRatio: ghost.value, ghostRegions: regionsOf(ghost) };
+  const because = ghost.because === undefined ? {} : { reason: ghost.because };
+  if (bad === undefined) return { ...nothingToCompare, ...own, ...because };
+
+  const laidOver = isSameGrid(simulated, bad) ? bad : tryResample(bad, simulated);
+  if (laidOver === undefined) return { ...nothingToCompare, ...own, reason: 'the two images have no part of space in common' };
+  const error = nrmse(simulated, laidOver);
+  if (!Number.isFinite(error))
+    return { ...nothingToCompare, ...own, reason: 'the image to compare with is empty where the simulated one lies' };
+  const isLargeEnough = Math.min(simulated.rows, simulated.columns) >= ssimWindow;
+  return {
+    ...own,
+    ...because,
+    nrmse: error,
+    gain: leastSquaresGain(simulated, laidOver),
+    ssim: isLargeEnough ? ssim(simulated, laidOver) : null,
+    ghostRatioOfBad: ghostRatio(laidOver, phaseEncode).value,
+  };
+}
+
+function regionsOf({ regions }: GhostRatio): NonNullable<SimulationNumbers['ghostRegions']> {
+  const named = [
+    { kind: 'object', region: regions.object },
+    { kind: 'ghost', region: regions.ghost },
+    { kind: 'air', region: regions.otherAir },
+  ] as const;
+  return named.flatMap(({ kind, region: { nPixels: pixels, mean } }) => (mean === null ? [] : [{ kind, pixels, mean }]));
+}
+
+function isSameGrid(a: Grid, b: Grid): boolean {
+  if (a.rows !== b.rows || a.columns !== b.columns) return false;
+  return ([0, 1] as const).every((axis) => {
+    const pixel = a.spacing[axis];
+    return Math.abs(pixel - b.spacing[axis]) < pixelTolerance * pixel && Math.abs(a.origin[axis] - b.origin[axis]) < pixelTolerance * pixel;
+  });
+}
+
+function tryResample(plane: Plane, grid: Grid): Plane | undefined {
+  try {
+    return resample(plane, grid);
+  } catch (error) {
+    if (error instanceof RangeError) return undefined;
+    throw error;
+  }
+}

@@ -1,0 +1,96 @@
+/** Messages between the server and its worker threads. Image values are shared memory; what comes back is moved, never copied. */
+import type { Acquisition } from '../recon/acquisition';
+import type { Recipe } from '../recon/recipe';
+
+/** One frame of a stored image: float32 values, [row, column], from `frame` · rows · columns on. */
+export interface ImageSource {
+  readonly imageId: string;
+  readonly frame: number;
+  readonly rows: number;
+  readonly columns: number;
+  /** Row, column; null where the header is silent, and then 1 mm is assumed. */
+  readonly spacingMm: readonly [number, number] | null;
+  readonly values: SharedArrayBuffer;
+}
+
+export type PlaneName = 'image' | 'kspace' | 'kspaceOfImage';
+export type PlaneForm = 'exact' | 'display';
+export type Domain = 'image' | 'kspace';
+
+/** A plane as it travels: what the bytes of an answer are. Spacing and origin in mm, or cycles per metre for k-space. */
+export interface PlaneDescription {
+  readonly name: string;
+  readonly rows: number;
+  readonly columns: number;
+  readonly type: 'float32' | 'complex64' | 'uint16';
+  readonly spacing: [number, number];
+  readonly origin: [number, number];
+  readonly low?: number;
+  readonly high?: number;
+}
+
+export interface Planes {
+  readonly planes: PlaneDescription[];
+  readonly bytes: Uint8Array;
+}
+
+export interface SimulationNumbers {
+  readonly nrmse: number | null;
+  readonly gain: number | null;
+  readonly ssim: number | null;
+  readonly ghostRatio: number | null;
+  readonly ghostRatioOfBad: number | null;
+  readonly ghostRegions?: { kind: 'object' | 'ghost' | 'air'; pixels: number; mean: number }[];
+  readonly reason?: string;
+  readonly computedInMs?: number;
+}
+
+/** Runs a recipe: planes back, and numbers against another image where one is named. */
+export interface SimulateJob {
+  readonly kind: 'simulate';
+  readonly source: ImageSource;
+  readonly recipe: Recipe;
+  readonly acquisition: Acquisition;
+  readonly outputs: readonly PlaneName[];
+  readonly compareWith?: ImageSource;
+  readonly form: PlaneForm;
+}
+export interface SimulateResult extends Planes {
+  readonly numbers: SimulationNumbers;
+}
+
+/** Runs a recipe to keep it: digest of the image plane, numbers, and two small pictures marked as simulated. */
+export interface TrialJob {
+  readonly kind: 'trial';
+  readonly source: ImageSource;
+  readonly recipe: Recipe;
+  readonly acquisition: Acquisition;
+  readonly compareWith?: ImageSource;
+  /** Values drawn black and white in the picture: those of the source, so that a case's pictures can be held against each other. */
+  readonly window: readonly [number, number];
+}
+export interface TrialResult {
+  readonly digest: string;
+  readonly numbers: SimulationNumbers;
+  readonly imageThumbnail: Uint8Array;
+  readonly kspaceThumbnail: Uint8Array;
+}
+
+/** The stored values of an image, or their transform. */
+export interface PixelsJob {
+  readonly kind: 'pixels';
+  readonly source: ImageSource;
+  readonly domain: Domain;
+  readonly form: PlaneForm;
+}
+
+/** A small PNG of an image or of its log-magnitude k-space. `window`: the values drawn black and white. */
+export interface ThumbnailJob {
+  readonly kind: 'thumbnail';
+  readonly source: ImageSource;
+  readonly domain: Domain;
+  readonly window: readonly [number, number];
+}
+export interface ThumbnailResult {
+  readonly bytes: Uint8Array;
+}
