@@ -10,7 +10,7 @@ import { runCommand, SetUpError } from './run-command.mjs';
 export function findProgram(name) {
   return (process.env.PATH ?? '')
     .split(delimiter)
-    .map((folder) => join(folder, name))
+    .map((/** @type {string} */ folder) => join(folder, name))
     .find(isExecutable);
 }
 
