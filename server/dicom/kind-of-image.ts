@@ -3,7 +3,7 @@
  * reason first that exporting the same image again could not cure. Attributes: DICOM PS3.3 C.7.6.1, C.8.3.1, C.8.13.3.
  */
 import type { Header } from './header';
-import { refuse, type Refused } from './refusal';
+import { count, refuse, type Refused } from './refusal';
 
 export const mrImageStorage = '1.2.840.10008.5.1.4.1.1.4';
 const enhancedMr = new Set(['1.2.840.10008.5.1.4.1.1.4.1', '1.2.840.10008.5.1.4.1.1.4.4']);
@@ -85,7 +85,7 @@ const mosaic: Check = (header) =>
 
 const multiFrame: Check = (header) => {
   const frames = header.number('numberOfFrames') ?? 1;
-  return frames > 1 ? refuse('multi-frame', `The file holds ${Math.round(frames)} frames; only single images are read yet.`) : undefined;
+  return frames > 1 ? refuse('multi-frame', `The file holds ${count(frames)} frames; only single images are read yet.`) : undefined;
 };
 
 const colour: Check = (header) => {

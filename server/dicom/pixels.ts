@@ -5,7 +5,7 @@
 import type { Element } from 'dicom-parser';
 import type { Header } from './header';
 import type { Warning } from './warnings';
-import { refuse, type Refused } from './refusal';
+import { count, refuse, type Refused } from './refusal';
 
 export interface Pixels {
   readonly rows: number;
@@ -53,14 +53,12 @@ function layoutOf(header: Header): Layout | Refused {
   if (rows === undefined || columns === undefined) return refuse('size', 'The header does not say how many rows and columns there are.');
   const fits = (side: number) => Number.isInteger(side) && side >= smallestSide && side <= largestSide;
   if (!fits(rows) || !fits(columns)) {
-    return refuse(
-      'size',
-      `The header claims ${columns} × ${rows} pixels; images from ${smallestSide} to ${largestSide} pixels a side are read.`,
-    );
+    const claim = `The header claims ${count(columns)} columns and ${count(rows)} rows`;
+    return refuse('size', `${claim}; images from ${smallestSide} to ${largestSide} pixels a side are read.`);
   }
   const bitsAllocated = header.number('bitsAllocated');
   if (bitsAllocated !== 8 && bitsAllocated !== 16) {
-    return refuse('bit-depth', `Pixels of ${bitsAllocated ?? 'an unknown number of'} bits are not read; 8 and 16 are.`);
+    return refuse('bit-depth', `The header claims pixels of ${count(bitsAllocated)} bits; 8 and 16 are read.`);
   }
   const bitsStored = header.number('bitsStored') ?? bitsAllocated;
   const highBit = header.number('highBit') ?? bitsStored - 1;
@@ -68,7 +66,7 @@ function layoutOf(header: Header): Layout | Refused {
   if (!possible || bitsStored < 8) {
     return refuse(
       'bit-depth',
-      `The header says ${bitsStored} bits stored up to bit ${highBit} of ${bitsAllocated}: that cannot be, or is not read.`,
+      `The header claims ${count(bitsStored)} bits of ${bitsAllocated}, which cannot be, or is not read; 8 to 16 are.`,
     );
   }
   const signed = header.number('pixelRepresentation') === 1;

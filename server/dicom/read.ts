@@ -3,11 +3,12 @@
  * worker thread. Here: uncompressed little endian, one frame, MR magnitude. Of everything else in a file only the names of the
  * tags come out, as the account of what was removed.
  */
+import type { Element } from 'dicom-parser';
 import type { ScanFacts } from '../contract/facts';
 import type { Image } from '../contract/images';
 import { deidentificationOf } from './deidentification';
 import { factsOf } from './facts';
-import { headerOf } from './header';
+import { headerOf, type Header } from './header';
 import { refuseKindOfImage } from './kind-of-image';
 import { elementsAfter, parse, type Parsed } from './parse';
 import { readPixels } from './pixels';
@@ -35,7 +36,7 @@ function readImage(bytes: Uint8Array): AcceptedImage | Refused {
   const parsed = parse(bytes);
   if (isRefused(parsed)) return parsed;
   const header = headerOf(parsed.dataSet);
-  const pixelData = refuseKindOfImage(header) ?? readablePixelData(parsed);
+  const pixelData = pixelDataOf(parsed, header);
   if (isRefused(pixelData)) return pixelData;
   const pixels = readPixels(bytes, header, pixelData);
   if (isRefused(pixels)) return pixels;
@@ -55,16 +56,18 @@ function readImage(bytes: Uint8Array): AcceptedImage | Refused {
   };
 }
 
-function readablePixelData({ dataSet, transferSyntax, pixelData }: Parsed) {
+/** The pixel data of an image that is taken. */
+function pixelDataOf({ transferSyntax, pixelData }: Parsed, header: Header): Element | Refused {
+  // A header that was cut off before its modality is not an image of another kind.
+  const kind = pixelData === undefined && header.text('modality') === undefined ? undefined : refuseKindOfImage(header);
+  if (kind !== undefined) return kind;
   if (pixelData === undefined || pixelData.length === 0) {
     return refuse('no-pixels', 'The file holds a header and no pixels, or was cut off before them. Export the image itself.');
   }
   if (!uncompressedLittleEndian.has(transferSyntax)) return refuse('transfer-syntax', `The pixels are ${whyNotRead(transferSyntax)}.`);
-  if (pixelData.hadUndefinedLength === true) {
-    return refuse(
-      'transfer-syntax',
-      'The pixels are packed as if compressed, though the header says they are not. Export the image again, uncompressed.',
-    );
-  }
-  return pixelData;
+  if (pixelData.hadUndefinedLength !== true) return pixelData;
+  return refuse(
+    'transfer-syntax',
+    'The pixels are packed as if compressed, though the header says they are not. Export the image again, uncompressed.',
+  );
 }

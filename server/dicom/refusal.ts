@@ -8,3 +8,7 @@ export interface Refused {
 export const refuse = (code: RefusalCode, reason: string): Refused => ({ refused: { code, reason } });
 
 export const isRefused = (outcome: object): outcome is Refused => 'refused' in outcome;
+
+/** A number of the header in words for a reason: only a count that DICOM can mean is repeated, for anything may stand there. */
+export const count = (value: number | undefined): string =>
+  value !== undefined && Number.isInteger(value) && value >= 0 && value <= 65_535 ? String(value) : 'an impossible number of';

@@ -22,7 +22,7 @@ const identifying: readonly RegExp[] = [
   /[^\x20-\x7e]/, // not printable ASCII
   /[\^=@]/, // person name components and groups, e-mail
   /^\s*[A-Za-z'-]+,\s*[A-Za-z]/, // surname, given name
-  /\b(mr|mrs|ms|miss|dr|prof)\.?\s+[A-Z][a-z]/i, // a form of address and a name
+  /\b(Mr|Mrs|Ms|Miss|Dr|Prof)\.?\s+[A-Z][a-z]/, // a form of address and a name; MR is another thing
   /\d{6}/, // patient and accession numbers, dates without separators
   /\b(19|20)\d\d[-./ ]\d{1,2}[-./ ]\d{1,2}\b/, // year first
   /\b\d{1,2}[-./ ]\d{1,2}[-./ ](19|20)\d\d\b/, // year last
