@@ -6,7 +6,9 @@ import type { ErrorRequestHandler } from 'express';
 import { MulterError } from 'multer';
 import type { Logger } from 'pino';
 import type { z } from 'zod';
+import { isQueueFull } from '../workers/pool';
 import { problemStatus, type Issue, type Problem, type ProblemCode } from './contract/problem';
+import { errorCode } from './error-code';
 
 const titles: Record<ProblemCode, string> = {
   'invalid-input': 'Something in the request is not as it must be',
@@ -75,9 +77,9 @@ const networkAway = new Set(['ECONNREFUSED', 'ECONNRESET', 'ENOTFOUND', 'EPIPE',
 
 /** Whether `error`, or the error it wraps, says that the database cannot be reached. */
 export function isDatabaseAway(error: unknown): boolean {
-  if (!(error instanceof Error)) return false;
-  const code = 'code' in error && typeof error.code === 'string' ? error.code : '';
-  return databaseAway.test(code) || networkAway.has(code) || isDatabaseAway(error.cause);
+  const code = errorCode(error) ?? '';
+  if (databaseAway.test(code) || networkAway.has(code)) return true;
+  return error instanceof Error && error.cause !== undefined && isDatabaseAway(error.cause);
 }
 
 const uploadLimits: Partial<Record<MulterError['code'], string>> = {
@@ -91,6 +93,7 @@ export function asAppError(error: unknown): AppError {
   if (error instanceof AppError) return error;
   if (error instanceof MulterError) return fromMulter(error);
   if (isDatabaseAway(error)) return new AppError('database-away');
+  if (isQueueFull(error)) return new AppError('busy', { retryAfterSeconds: 1 });
   return fromBodyParser(error) ?? new AppError('unexpected');
 }
 
@@ -114,9 +117,14 @@ function fromBodyParser(error: unknown): AppError | undefined {
   return undefined;
 }
 
+/** What is left when a client goes away: a stopped job, half an upload. Nobody waits for an answer, and nothing is wrong here. */
+const isDeparture = (error: unknown): boolean =>
+  error instanceof Error && (error.name === 'AbortError' || /^Request (aborted|closed)$/.test(error.message));
+
 /** The one error middleware. */
 export function answerErrors(log: Logger): ErrorRequestHandler {
   return (error: unknown, request, response, next) => {
+    if (response.destroyed && isDeparture(error)) return;
     const problem = asAppError(error);
     if (problem.code === 'unexpected') log.error({ err: error, method: request.method }, 'unexpected error');
     if (response.headersSent) {

@@ -7,6 +7,7 @@ import type { IncomingMessage, ServerResponse } from 'node:http';
 import type { RequestHandler } from 'express';
 import { pino, type DestinationStream, type Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
+import { errorCode } from './error-code';
 
 /** The log of a server; `destination` is standard output unless a test listens. */
 export function openLog(level: string, destination?: DestinationStream): Logger {
@@ -49,11 +50,10 @@ const routeOf = (request: object): string => {
 /** An error without the values in it: the database's messages repeat parameters and rows, so only their codes are kept. */
 function describeError(error: unknown): Record<string, unknown> {
   if (!(error instanceof Error)) return { type: typeof error };
-  const code = 'code' in error && typeof error.code === 'string' ? error.code : undefined;
   const fromDatabase = 'query' in error || 'severity' in error;
   return {
     type: error.name,
-    code,
+    code: errorCode(error),
     message: fromDatabase ? 'the database refused a statement' : error.message,
     constraint: 'constraint_name' in error ? error.constraint_name : undefined,
     stack: error.stack

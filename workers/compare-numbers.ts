@@ -1,5 +1,5 @@
 /** The numbers that hold a simulated image against another one, which is laid over it in millimetres first. */
-import type { Acquisition } from '../recon/acquisition';
+import type { Acquisition, PhaseEncode } from '../recon/acquisition';
 import type { Grid, Plane } from '../recon/grid';
 import { ghostRatio, type GhostRatio } from '../recon/metrics/ghost-ratio';
 import { leastSquaresGain, nrmse } from '../recon/metrics/nrmse';
@@ -14,16 +14,30 @@ const ssimWindow = 11;
 
 const nothingToCompare = { nrmse: null, gain: null, ssim: null, ghostRatioOfBad: null };
 
+/** An image to compare with; `key` names it, so that what was worked out about it is kept while a slider moves. */
+export interface Reference {
+  readonly key: string;
+  readonly plane: () => Plane;
+}
+
+/** A reference on the grid of the simulated image, with its own ghost ratio. */
+interface LaidOver {
+  readonly key: string;
+  readonly plane: Plane;
+  readonly ghostRatio: number | null;
+}
+let newest: LaidOver | undefined;
+
 /** Numbers of `simulated` alone and against `bad`; null, with the reason, where one cannot be had. */
-export function compareNumbers(simulated: Plane, bad: Plane | undefined, { phaseEncode }: Acquisition): SimulationNumbers {
+export function compareNumbers(simulated: Plane, bad: Reference | undefined, { phaseEncode }: Acquisition): SimulationNumbers {
   const ghost = ghostRatio(simulated, phaseEncode);
   const own = { ghostRatio: ghost.value, ghostRegions: regionsOf(ghost) };
   const because = ghost.because === undefined ? {} : { reason: ghost.because };
   if (bad === undefined) return { ...nothingToCompare, ...own, ...because };
 
-  const laidOver = isSameGrid(simulated, bad) ? bad : tryResample(bad, simulated);
+  const laidOver = layOver(bad, simulated, phaseEncode);
   if (laidOver === undefined) return { ...nothingToCompare, ...own, reason: 'the two images have no part of space in common' };
-  const error = nrmse(simulated, laidOver);
+  const error = nrmse(simulated, laidOver.plane);
   if (!Number.isFinite(error))
     return { ...nothingToCompare, ...own, reason: 'the image to compare with is empty where the simulated one lies' };
   const isLargeEnough = Math.min(simulated.rows, simulated.columns) >= ssimWindow;
@@ -31,10 +45,21 @@ export function compareNumbers(simulated: Plane, bad: Plane | undefined, { phase
     ...own,
     ...because,
     nrmse: error,
-    gain: leastSquaresGain(simulated, laidOver),
-    ssim: isLargeEnough ? ssim(simulated, laidOver) : null,
-    ghostRatioOfBad: ghostRatio(laidOver, phaseEncode).value,
+    gain: leastSquaresGain(simulated, laidOver.plane),
+    ssim: isLargeEnough ? ssim(simulated, laidOver.plane) : null,
+    ghostRatioOfBad: laidOver.ghostRatio,
   };
+}
+
+/** The reference in the place of `grid`, in millimetres; the newest one is kept. Undefined where the two do not meet. */
+function layOver({ key: image, plane }: Reference, grid: Plane, phaseEncode: PhaseEncode): LaidOver | undefined {
+  const key = [image, phaseEncode, grid.rows, grid.columns, ...grid.spacing, ...grid.origin].join(' ');
+  if (newest?.key === key) return newest;
+  const original = plane();
+  const laid = isSameGrid(grid, original) ? original : tryResample(original, grid);
+  if (laid === undefined) return undefined;
+  newest = { key, plane: laid, ghostRatio: ghostRatio(laid, phaseEncode).value };
+  return newest;
 }
 
 function regionsOf({ regions }: GhostRatio): NonNullable<SimulationNumbers['ghostRegions']> {

@@ -5,7 +5,7 @@ import { transform } from '../recon/fourier';
 import { asComplex, centredGrid, type Plane } from '../recon/grid';
 import { prepare, simulate, type PreparedObject, type Simulation } from '../recon/simulate';
 import type { Recipe } from '../recon/recipe';
-import { compareNumbers } from './compare-numbers';
+import { compareNumbers, type Reference } from './compare-numbers';
 import { encodePlanes, logMagnitude, type NamedPlane } from './encode-planes';
 import { handBack } from './hand-back';
 import type {
@@ -46,7 +46,7 @@ export default function runJob(job: Job): SimulateResult | TrialResult | Planes 
 function runSimulation({ source, recipe, acquisition, outputs, compareWith, form }: SimulateJob): SimulateResult {
   const start = performance.now();
   const simulation = simulate(preparedObject(source, recipe), recipe, acquisition);
-  const numbers = compareNumbers(simulation.image, compareWith && planeOf(compareWith), acquisition);
+  const numbers = compareNumbers(simulation.image, compareWith && referenceOf(compareWith), acquisition);
   const planes = encodePlanes(
     outputs.map((name) => namedPlane(simulation, name)),
     form,
@@ -60,7 +60,7 @@ function runTrial({ source, recipe, acquisition, compareWith, window }: TrialJob
   const log = logMagnitude(kspaceOfImage());
   return {
     digest: createHash('sha256').update(bytes).digest('hex'),
-    numbers: compareNumbers(image, compareWith && planeOf(compareWith), acquisition),
+    numbers: compareNumbers(image, compareWith && referenceOf(compareWith), acquisition),
     imageThumbnail: smallPicture({ values: image.values, grid: image, window, simulated: true }),
     kspaceThumbnail: smallPicture({ values: log, grid: { ...image, spacing: [1, 1] }, window: kspaceWindow, simulated: true }),
   };
@@ -93,6 +93,8 @@ function planeOf({ values, frame, rows, columns, spacingMm }: ImageSource): Plan
   const stored = new Float32Array(values, frame * n * Float32Array.BYTES_PER_ELEMENT, n);
   return { ...centredGrid(rows, columns, [rowMm / 1000, columnMm / 1000]), values: Float64Array.from(stored) };
 }
+
+const referenceOf = (source: ImageSource): Reference => ({ key: `${source.imageId} ${source.frame}`, plane: () => planeOf(source) });
 
 /** The object of a recipe, from the few that were used last. */
 function preparedObject(source: ImageSource, recipe: Pick<Recipe, 'objectPhase'> | undefined): PreparedObject {

@@ -30,30 +30,38 @@ export function smallPicture({ values, grid, window, simulated = false }: Drawin
   return encode({ width: picture.width, height: picture.height, data: picture.levels, channels: 1, depth: 8 });
 }
 
-/** Each pixel is the mean of the values it covers. */
+/** Each pixel is the mean over the area it covers, parts of samples included: a fine texture gives no moiré. */
 function reduce(values: Float64Array, { rows, columns, spacing }: Drawing['grid'], [low, high]: Drawing['window']): Picture {
   const { width, height } = sidesOf(rows, columns, spacing);
+  const across = Array.from({ length: width }, (_, x) => shares(x, width, columns));
+  const narrowed = new Float64Array(rows * width);
+  for (let row = 0; row < rows; row++) {
+    across.forEach((parts, x) => {
+      narrowed[row * width + x] = parts.reduce((sum, [column, share]) => sum + share * (values[row * columns + column] as number), 0);
+    });
+  }
   const levels = new Uint8Array(width * height);
   const factor = 255 / (high > low ? high - low : 1);
   for (let y = 0; y < height; y++) {
-    const [top, bottom] = covered(y, height, rows);
+    const parts = shares(y, height, rows);
     for (let x = 0; x < width; x++) {
-      const [left, right] = covered(x, width, columns);
-      let sum = 0;
-      for (let row = top; row < bottom; row++) {
-        for (let column = left; column < right; column++) sum += values[row * columns + column] as number;
-      }
-      const level = (sum / ((bottom - top) * (right - left)) - low) * factor;
-      levels[y * width + x] = Math.max(0, Math.min(255, Math.round(level)));
+      const mean = parts.reduce((sum, [row, share]) => sum + share * (narrowed[row * width + x] as number), 0);
+      levels[y * width + x] = Math.max(0, Math.min(255, Math.round((mean - low) * factor)));
     }
   }
   return { width, height, levels };
 }
 
-/** First index and the one after the last that output pixel `index` of `n` covers; at least one. */
-function covered(index: number, n: number, nSource: number): [number, number] {
-  const first = Math.floor((index * nSource) / n);
-  return [first, Math.max(first + 1, Math.floor(((index + 1) * nSource) / n))];
+/** Which of `nSource` samples output sample `index` of `n` covers, and by what share of itself; the shares add up to 1. */
+function shares(index: number, n: number, nSource: number): [sample: number, share: number][] {
+  const from = (index * nSource) / n;
+  const to = ((index + 1) * nSource) / n;
+  const parts: [number, number][] = [];
+  for (let sample = Math.floor(from); sample < to && sample < nSource; sample++) {
+    const share = (Math.min(to, sample + 1) - Math.max(from, sample)) / (to - from);
+    if (share > 0) parts.push([sample, share]);
+  }
+  return parts;
 }
 
 function sidesOf(rows: number, columns: number, [rowSpacing, columnSpacing]: Grid['spacing']) {

@@ -5,6 +5,7 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { chmod, mkdir, open, readFile, rename, rm, stat } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
+import { errorCode } from '../error-code';
 import type { ObjectStore } from './object-store';
 
 const digestPattern = /^[0-9a-f]{64}$/;
@@ -40,7 +41,7 @@ async function exists(place: string, size: number): Promise<boolean> {
   try {
     return (await stat(place)).size === size;
   } catch (error) {
-    if (error instanceof Error && 'code' in error && error.code === 'ENOENT') return false;
+    if (errorCode(error) === 'ENOENT') return false;
     throw error;
   }
 }
