@@ -47,6 +47,8 @@ interface CauseBase<P extends Parameters> extends Described<P> {
   readonly remedies: readonly Remedy[];
   /** The bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
   readonly needsObjectPhase?: boolean;
+  /** The result may have another number of lines. Left out: the shape stays. */
+  readonly changesMatrix?: boolean;
   /** Parameter values at which the cause does nothing, where there are such. */
   readonly identity?: ValuesOf<P>;
 }

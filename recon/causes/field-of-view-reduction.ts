@@ -39,6 +39,7 @@ export const fieldOfViewReduction = defineCause({
   title: 'Wrap-around',
   stage: 'encoding',
   needsObjectPhase: true,
+  changesMatrix: true,
   parameters: {
     fraction: quantity({
       label: 'Phase field of view',

@@ -11,7 +11,15 @@ const rounding = 1e-13;
 
 describe('The transform equals the explicit sum', () => {
   // 16: radix 4. 12 × 18: 2, 3, 4. 15 × 21: odd, 3, 5, 7. 22 × 13: 11, 13. 17 × 34 and 1 × 19: primes that need the chirp.
-  const sizes = [[16, 16], [12, 18], [15, 21], [22, 13], [17, 34], [1, 19], [5, 1]] as const;
+  const sizes = [
+    [16, 16],
+    [12, 18],
+    [15, 21],
+    [22, 13],
+    [17, 34],
+    [1, 19],
+    [5, 1],
+  ] as const;
   test.each(sizes)('on %i rows and %i columns, there and back', (rows, columns) => {
     const plane = noisePlane(rows, columns);
     // The explicit sum rounds its angles too: 2π · rows · columns turns at 1e-16.
@@ -68,7 +76,11 @@ describe('Theorems of the transform', () => {
     expect(largestDifference(inverseAlong(inverseAlong(plane, 1), 0), inverse(plane))).toBeLessThan(rounding);
   });
 
-  test.each([[32, 3], [27, -4], [31, 5]])('On %i rows the phase factor exp(−i2π·ky·d/M) moves the image by %i rows', (rows, d) => {
+  test.each([
+    [32, 3],
+    [27, -4],
+    [31, 5],
+  ])('On %i rows the phase factor exp(−i2π·ky·d/M) moves the image by %i rows', (rows, d) => {
     const plane = noisePlane(rows, 9);
     const kspace = transform(plane);
     for (let row = 0; row < rows; row++) {
@@ -101,7 +113,11 @@ describe('Theorems of the transform', () => {
     const plane = noisePlane(16, 16);
     plane.im.fill(0);
     const { re, im } = transform(plane);
-    for (const [row, column] of [[3, 5], [8, 1], [12, 15]] as const) {
+    for (const [row, column] of [
+      [3, 5],
+      [8, 1],
+      [12, 15],
+    ] as const) {
       const i = row * 16 + column;
       const opposite = (16 - row) * 16 + 16 - column;
       expect(re[opposite]).toBeCloseTo(re[i] ?? NaN, 12);

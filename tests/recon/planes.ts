@@ -29,7 +29,10 @@ export const absolute = (plane: ComplexPlane, row: number, column: number): numb
 /** Largest modulus of the difference of two planes of the same size. */
 export function largestDifference(a: ComplexPlane, b: ComplexPlane): number {
   if (a.rows !== b.rows || a.columns !== b.columns) return Infinity;
-  return a.re.reduce((largest, value, i) => Math.max(largest, Math.hypot(value - (b.re[i] ?? NaN), (a.im[i] ?? NaN) - (b.im[i] ?? NaN))), 0);
+  return a.re.reduce(
+    (largest, value, i) => Math.max(largest, Math.hypot(value - (b.re[i] ?? NaN), (a.im[i] ?? NaN) - (b.im[i] ?? NaN))),
+    0,
+  );
 }
 
 export const energy = ({ re, im }: ComplexPlane): number => re.reduce((sum, value, i) => sum + value ** 2 + (im[i] ?? NaN) ** 2, 0);

@@ -1,0 +1,35 @@
+/** Which lines partial Fourier takes. What becomes of the others is checked with the reconstructions. */
+import type { Acquisition } from '../../../recon/acquisition';
+import { linesOf, takenLines } from '../../../recon/lines';
+import { simulate } from '../../../recon/simulate';
+import { reference } from '../../reference/values';
+import { noisePlane } from '../planes';
+
+const acquisition: Acquisition = { phaseEncode: 'row' };
+
+function takenOf(n: number, fraction: number): readonly boolean[] {
+  const recipe = {
+    steps: [{ cause: 'partial-fourier', parameters: { fraction } }],
+    reconstruction: { method: 'zero-filled', parameters: {} },
+    seed: 1,
+  };
+  const { kspace } = simulate(noisePlane(6, n), recipe, acquisition);
+  return takenLines(kspace, linesOf(kspace, acquisition));
+}
+
+describe('Partial Fourier', () => {
+  test.each([0.625, 0.75, 0.875] as const)('of %f takes the lines ky ≥ −(2f−1)N/2: a symmetric band of 2f−1', (fraction) => {
+    const n = 128;
+    const taken = takenOf(n, fraction);
+    expect(taken.filter(Boolean)).toHaveLength(fraction * n);
+    const below = n / 2 - taken.indexOf(true);
+    // Noll et al. 1991 (from memory): both sides are complete within (2f−1)N/2.
+    expect((2 * below) / n).toBe(reference.symmetricBand[fraction]);
+    expect(taken.indexOf(true) - n / 2).toBe((-(2 * fraction - 1) * n) / 2);
+    expect(taken.slice(taken.indexOf(true))).not.toContain(false);
+  });
+
+  test('takes the nearest whole number of an odd count of lines', () => {
+    expect(takenOf(51, 0.75).filter(Boolean)).toHaveLength(38);
+  });
+});

@@ -1,0 +1,117 @@
+/** Ghosts of periodic motion: where they fall (Wood & Henkelman, Med Phys 1985;12:143) and how bright they are (Jacobi–Anger). */
+import { jv } from 'cephes';
+import type { Acquisition } from '../../../recon/acquisition';
+import { centredGrid, complexZeros } from '../../../recon/grid';
+import type { Plane } from '../../../recon/grid';
+import { transform } from '../../../recon/fourier';
+import { simulate } from '../../../recon/simulate';
+import { reference } from '../../reference/values';
+import { box, energy, noisePlane } from '../planes';
+
+const motion = (frequency: number, phaseSwing: number, start = 0) => ({
+  cause: 'periodic-motion',
+  parameters: { frequency, phaseSwing, start },
+});
+const recipeOf = (...steps: { cause: string; parameters: Record<string, number> }[]) => ({
+  steps,
+  reconstruction: { method: 'zero-filled', parameters: {} },
+  seed: 1,
+});
+const acquisition: Acquisition = { phaseEncode: 'column', repetitionTime: 0.5, averages: 1 };
+
+/** A blob with smooth edges about the centre row: its ghosts can be placed to a part of a pixel. */
+function blob(rows: number): ReturnType<typeof complexZeros> {
+  const plane = complexZeros(centredGrid(rows, 1, [1e-3, 1e-3]));
+  for (let row = 0; row < rows; row++) plane.re[row] = Math.exp(-((row - Math.floor(rows / 2)) ** 2) / (2 * 3 ** 2));
+  return plane;
+}
+
+/** Centre of mass of the image within 12 rows of `near`, counted from the centre row. */
+function centreOfMass({ values, rows }: Plane, near: number): number {
+  let sum = 0;
+  let moment = 0;
+  for (let d = Math.round(near) - 12; d <= Math.round(near) + 12; d++) {
+    const value = values[Math.floor(rows / 2) + d] ?? NaN;
+    sum += value;
+    moment += value * d;
+  }
+  return moment / sum;
+}
+
+describe('Where ghosts fall', () => {
+  const places = [
+    [256, 0.5, 0.25, reference.ghostShift256],
+    [192, 2.3, 1.2, reference.ghostShift192],
+  ] as const;
+  test.each(places)('%i lines, TR %f s, %f Hz: %f px along the phase encoding, on both sides', (rows, repetitionTime, f, shift) => {
+    const { image } = simulate(blob(rows), recipeOf(motion(f, 0.3)), { ...acquisition, repetitionTime });
+    for (const side of [-1, 1]) {
+      // The second ghost, J2/J1 = 0.07 of the first and at twice the distance, has no part within 12 rows; the tail of a broken period
+      // (the lines do not hold a whole number of cycles) moves the centre of mass by up to a tenth of a pixel.
+      expect(Math.abs(centreOfMass(image, side * shift) - side * shift)).toBeLessThan(0.15);
+    }
+  });
+
+  test('Averages lengthen the time from line to line: two averages of half the TR give the same ghosts', () => {
+    const one = simulate(blob(128), recipeOf(motion(0.3, 0.5)), { ...acquisition, repetitionTime: 0.8, averages: 1 });
+    const two = simulate(blob(128), recipeOf(motion(0.3, 0.5)), { ...acquisition, repetitionTime: 0.4, averages: 2 });
+    expect(two.image.values).toEqual(one.image.values);
+  });
+
+  test('Without TR in the header 500 ms is assumed, as the description says', () => {
+    const assumed = simulate(blob(128), recipeOf(motion(0.3, 0.5)), { phaseEncode: 'column' });
+    const stated = simulate(blob(128), recipeOf(motion(0.3, 0.5)), acquisition);
+    expect(assumed.image.values).toEqual(stated.image.values);
+  });
+
+  test('Skipped lines take no time: with R = 2 the first ghost falls at frac(TR·f)/2 of the field of view', () => {
+    const undersampling = { cause: 'uniform-undersampling', parameters: { accelerationFactor: 2, calibrationLines: 0 } };
+    // Derived from the line count: of 256 lines 128 are taken, 0.5 s · 0.25 Hz = 1/8 cycle apart, so 16 px and copies 128 px on.
+    const { image } = simulate(blob(256), recipeOf(motion(0.25, 0.5), undersampling), acquisition);
+    const at = (d: number) => image.values[128 + d] ?? NaN;
+    expect(at(16) / at(0)).toBeCloseTo(jv(1, 0.5) / jv(0, 0.5), 3);
+    expect(at(32)).toBeLessThan(0.2 * at(16));
+  });
+});
+
+describe('How bright ghosts are', () => {
+  // 64 lines, 1/8 cycle a line: whole cycles, ghosts 8 px apart, object 6 px: orders do not overlap but for n and n ± 8.
+  test.each([0.25, 0.5, 1, 2] as const)('With a swing of %f rad the ghost of order j has the amplitude J_j', (swing) => {
+    const { image } = simulate(box(64, [29, 35], [20, 44]), recipeOf(motion(0.25, swing, 40)), acquisition);
+    const brightness = (order: number) => image.values[(32 + 8 * order) * 64 + 30] ?? NaN;
+    for (const order of [0, 1, 2, 3]) {
+      // Orders j − 8 and j + 8 fall on order j: at a swing of 2, J_5 = 0.007 falls on J_3 and J_7 = 1.7e-4 on J_1.
+      const overlap = Math.abs(jv(8 - order, swing)) + Math.abs(jv(8 + order, swing));
+      expect(Math.abs(brightness(order) - Math.abs(jv(order, swing)))).toBeLessThanOrEqual(overlap + 1e-9);
+      expect(Math.abs(jv(order, swing) - (reference.bessel[swing][order] ?? NaN))).toBeLessThan(1e-9);
+    }
+  });
+
+  test('16 cycles over 128 lines give the ratio of the outside simulation', () => {
+    // 0.5 s · 0.25 Hz · 128 = 16 cycles: ghosts 16 px away.
+    const { image } = simulate(box(128, [40, 60], [50, 70]), recipeOf(motion(0.25, 0.5)), acquisition);
+    const ratio = (image.values[(50 + 16) * 128 + 60] ?? NaN) / (image.values[50 * 128 + 60] ?? NaN);
+    // 1e-6 is the tolerance of the reference. Its phase starts at the centre line, which turns the ghost but leaves its modulus only
+    // where nothing overlaps: rows 50 and 66 are 4 px clear of the second order.
+    expect(ratio).toBeCloseTo(reference.phaseGhostRatio, 6);
+  });
+});
+
+describe('What k-space shows', () => {
+  test('The phase of the lines swings, their magnitude stays', () => {
+    const object = noisePlane(32, 8);
+    const before = transform(object);
+    const { kspace } = simulate(object, recipeOf(motion(0.4, 1)), acquisition);
+    kspace.re.forEach((re, i) => {
+      expect(Math.hypot(re, kspace.im[i] ?? NaN)).toBeCloseTo(Math.hypot(before.re[i] ?? NaN, before.im[i] ?? NaN), 12);
+    });
+    expect(energy(kspace)).toBeCloseTo(energy(before), 8);
+    const line = 5;
+    const turn =
+      Math.atan2(kspace.im[line * 8] ?? NaN, kspace.re[line * 8] ?? NaN) -
+      Math.atan2(before.im[line * 8] ?? NaN, before.re[line * 8] ?? NaN);
+    // a·sin(2π·f·T·n + φ), n counted from the first line.
+    expect(Math.cos(turn)).toBeCloseTo(Math.cos(Math.sin(2 * Math.PI * 0.4 * 0.5 * line)), 12);
+    expect(Math.sin(turn)).toBeCloseTo(Math.sin(Math.sin(2 * Math.PI * 0.4 * 0.5 * line)), 12);
+  });
+});
