@@ -1,10 +1,12 @@
 /**
  * A field: its label above, its frame, and under it what concerns it: an error with a triangle (the permitted range, in words),
- * or where a value came from. A value from the header has a stitched frame until somebody changes it.
+ * or where a value came from; or a question about it. A value from the header has a stitched frame until somebody changes it.
  */
 import { useId, useState } from 'react';
 import { TextInput, View, type TextInputProps } from 'react-native';
 import { Glyph } from './glyph';
+import { LinkText } from './link-text';
+import { insideBar } from './stitches';
 import { Text, textVariants } from './text';
 import { radius, space, type Colours } from './theme';
 import { useTheme } from './theme-context';
@@ -17,6 +19,8 @@ export interface TextFieldProps {
   /** A word on where the value came from or what is expected. */
   note?: string | undefined;
   fromHeader?: boolean;
+  /** Something about the text is doubted (a name?): asked in weld, with a way to keep it. It does not stand in the way. */
+  question?: { text: string; onKeep: () => void } | undefined;
   lines?: number;
   /** Sentences are set in the sans, values in the mono. */
   prose?: boolean;
@@ -36,7 +40,7 @@ const frameOf = (colours: Colours, { error, fromHeader, disabled }: TextFieldPro
 });
 
 export function TextField(props: TextFieldProps) {
-  const { label, value, onChange, error, note, lines = 1, prose = false, disabled = false } = props;
+  const { label, value, onChange, error, note, question, lines = 1, prose = false, disabled = false } = props;
   const { colours } = useTheme();
   const id = useId();
   const [height, setHeight] = useState(0);
@@ -46,7 +50,10 @@ export function TextField(props: TextFieldProps) {
       <Text variant="small" tone="inkSoft" nativeID={`${id}-label`}>
         {label}
       </Text>
-      <View {...{ dataSet: { field: 'true' } }} style={[{ borderRadius: radius.control }, frameOf(colours, props)]}>
+      <View
+        {...{ dataSet: { field: 'true' } }}
+        style={[{ borderRadius: radius.control }, frameOf(colours, props), question ? insideBar('bottom', 2, colours.weldThread) : null]}
+      >
         <TextInput
           value={value}
           onChangeText={onChange}
@@ -73,6 +80,15 @@ export function TextField(props: TextFieldProps) {
           ]}
         />
       </View>
+      {question && !error ? (
+        <View role="status" style={{ flexDirection: 'row', alignItems: 'center', gap: 6 }}>
+          <Glyph name="note" colour={colours.weld} size={14} />
+          <Text variant="small" tone="weld" style={{ flexShrink: 1 }}>
+            {question.text}
+          </Text>
+          <LinkText label="keep it" onPress={question.onKeep} />
+        </View>
+      ) : null}
       {error || note ? (
         <View nativeID={`${id}-note`} role={error ? 'alert' : undefined} style={{ flexDirection: 'row', gap: 6, paddingTop: 2 }}>
           {error ? <Glyph name="danger" colour={colours.madder} size={14} /> : null}

@@ -1,0 +1,5 @@
+import { CausesScreen } from '@/components/cause/causes-screen';
+
+export default function CausesRoute() {
+  return <CausesScreen />;
+}

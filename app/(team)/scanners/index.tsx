@@ -1,0 +1,5 @@
+import { ScannersScreen } from '@/components/scanner/scanners-screen';
+
+export default function ScannersRoute() {
+  return <ScannersScreen />;
+}

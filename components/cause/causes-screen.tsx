@@ -1,0 +1,97 @@
+/** The catalogue: every modelled cause on the warp thread of the signal chain, stage after stage. */
+import { ScrollView, View } from 'react-native';
+import { useCauses } from '@/components/api/catalogue';
+import { LoadingWarp } from '@/components/ui/loading-warp';
+import { PageHead } from '@/components/ui/page-head';
+import { Press } from '@/components/ui/press';
+import { Glyph } from '@/components/ui/glyph';
+import { ProblemNotice } from '@/components/ui/problem-notice';
+import { Screen } from '@/components/ui/screen';
+import { Text } from '@/components/ui/text';
+import { gutter, space } from '@/components/ui/theme';
+import { useTheme } from '@/components/ui/theme-context';
+import { useLayout } from '@/components/ui/use-layout';
+import type { Cause } from '@/server/contract/catalogue';
+import { causesByStage, stageWords } from './stage-words';
+
+function CauseRow({ cause }: { cause: Cause }) {
+  const { colours } = useTheme();
+  return (
+    <Press
+      href={{ pathname: '/causes/[causeId]', params: { causeId: cause.id } }}
+      aria-label={`${cause.title}: ${cause.looks.image}`}
+      style={({ hovered }) => ({
+        flexDirection: 'row',
+        alignItems: 'center',
+        gap: space(3),
+        paddingVertical: space(3),
+        borderTopWidth: 1,
+        borderTopColor: colours.rule,
+        backgroundColor: hovered ? colours.clothSunk : 'transparent',
+      })}
+    >
+      <View style={{ flex: 1, gap: 2 }}>
+        <Text variant="caseTitle">{cause.title}</Text>
+        <Text variant="detail" tone="inkSoft">
+          {cause.looks.image}
+        </Text>
+        <Text variant="small" tone="inkFaint">
+          k-space: {cause.looks.kspace}
+        </Text>
+      </View>
+      <Glyph name="right" colour={colours.inkFaint} />
+    </Press>
+  );
+}
+
+function Stages({ causes }: { causes: readonly Cause[] }) {
+  const { colours } = useTheme();
+  return (
+    <View style={{ maxWidth: 760, paddingLeft: 40, paddingRight: gutter.phone, paddingBottom: space(8) }}>
+      <View style={{ position: 'absolute', left: 21, top: 24, bottom: 0, width: 2, backgroundColor: colours.ruleStrong }} />
+      {causesByStage(causes).map(({ stage, causes: ofStage }) => (
+        <View key={stage} role="region" aria-label={stageWords[stage]} style={{ paddingBottom: space(3) }}>
+          <View
+            style={{ flexDirection: 'row', alignItems: 'baseline', justifyContent: 'space-between', paddingTop: 11, paddingBottom: 10 }}
+          >
+            <View
+              style={{
+                position: 'absolute',
+                left: -24,
+                top: 15,
+                width: 12,
+                height: 12,
+                borderWidth: 2,
+                borderColor: colours.ruleStrong,
+                backgroundColor: ofStage.length > 0 ? colours.ruleStrong : colours.cloth,
+              }}
+            />
+            <Text variant="heading" level={2}>
+              {stageWords[stage]}
+            </Text>
+            <Text variant="small" tone="inkFaint">
+              {ofStage.length === 0 ? 'none modelled yet' : ofStage.length}
+            </Text>
+          </View>
+          {ofStage.map((cause) => (
+            <CauseRow key={cause.id} cause={cause} />
+          ))}
+        </View>
+      ))}
+    </View>
+  );
+}
+
+export function CausesScreen() {
+  const wide = useLayout() === 'wide';
+  const { data, error, refetch } = useCauses();
+  return (
+    <Screen title="Causes" still head={<PageHead title="Causes" />}>
+      <ScrollView style={{ flex: 1 }} contentContainerStyle={{ paddingLeft: wide ? space(2) : 0 }}>
+        {error ? <ProblemNotice error={error} onRetry={() => void refetch()} /> : null}
+        {!data && !error ? <LoadingWarp what="fetching the catalogue" /> : null}
+        {data ? <Stages causes={data} /> : null}
+      </ScrollView>
+    </Screen>
+  );
+}
