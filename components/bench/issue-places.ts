@@ -15,7 +15,8 @@ export const objectPhaseControl = 'objectPhase';
 /** The control that a path into the request points at, or null. The path may start at `recipe` or inside it. */
 export function controlAt(path: readonly (string | number)[]): string | null {
   const [head, second, third, fourth] = path[0] === 'recipe' ? path.slice(1) : path;
-  if (head === 'steps' && second !== undefined && third === 'parameters' && fourth !== undefined) return stepControl(Number(second), String(fourth));
+  if (head === 'steps' && second !== undefined && third === 'parameters' && fourth !== undefined)
+    return stepControl(Number(second), String(fourth));
   if (head === 'reconstruction' && second === 'parameters' && third !== undefined) return reconstructionControl(String(third));
   if (head === 'objectPhase') return objectPhaseControl;
   return null;

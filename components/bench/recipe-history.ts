@@ -60,7 +60,10 @@ function changed(recipe: Recipe, action: Change): Recipe {
       return { ...recipe, reconstruction: { method, parameters: { ...parameters, [action.parameter]: action.value } } };
     }
     case 'set-object-phase':
-      return { ...recipe, objectPhase: action.range > 0 ? { range: action.range, seed: recipe.objectPhase?.seed ?? recipe.seed } : undefined };
+      return {
+        ...recipe,
+        objectPhase: action.range > 0 ? { range: action.range, seed: recipe.objectPhase?.seed ?? recipe.seed } : undefined,
+      };
   }
 }
 

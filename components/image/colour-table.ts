@@ -31,7 +31,9 @@ let wheel: Uint32Array | undefined;
 
 /** The hue circle at one lightness: −π and π are the same colour, and no phase looks brighter than another. */
 function hueWheel(): Uint32Array {
-  wheel ??= Uint32Array.from({ length: nHues }, (_, i) => packColour(...srgbFromOklch(phaseLightness, phaseChroma, (2 * Math.PI * i) / nHues)));
+  wheel ??= Uint32Array.from({ length: nHues }, (_, i) =>
+    packColour(...srgbFromOklch(phaseLightness, phaseChroma, (2 * Math.PI * i) / nHues)),
+  );
   return wheel;
 }
 

@@ -44,7 +44,8 @@ const rulerEnd = 7;
 
 function arrowPath(from: Point, to: Point): string {
   const angle = Math.atan2(to.y - from.y, to.x - from.x);
-  const barb = (turn: number) => `M${to.x} ${to.y}L${to.x - arrowHead * Math.cos(angle + turn)} ${to.y - arrowHead * Math.sin(angle + turn)}`;
+  const barb = (turn: number) =>
+    `M${to.x} ${to.y}L${to.x - arrowHead * Math.cos(angle + turn)} ${to.y - arrowHead * Math.sin(angle + turn)}`;
   return `M${from.x} ${from.y}L${to.x} ${to.y}${barb(0.45)}${barb(-0.45)}`;
 }
 

@@ -31,5 +31,7 @@ export function PixelPlane({ plane, table, mask, style, name }: PixelPlaneProps)
   useLayoutEffect(() => {
     surface.current?.show({ rows: plane.rows, columns: plane.columns, bytes: paintPixels(plane, table, mask) });
   }, [plane, table, mask, skia]);
-  return <canvas ref={canvas} aria-hidden data-plane={name ?? plane.name} style={{ ...style, imageRendering: 'pixelated', display: 'block' }} />;
+  return (
+    <canvas ref={canvas} aria-hidden data-plane={name ?? plane.name} style={{ ...style, imageRendering: 'pixelated', display: 'block' }} />
+  );
 }

@@ -48,7 +48,13 @@ export function skiaPixelSurface(skia: Skia, canvas: HTMLCanvasElement): PixelSu
     show(pixels) {
       const target = ofSize(pixels);
       const { rows, columns, bytes } = pixels;
-      const info = { width: columns, height: rows, colorType: skia.ColorType.RGBA_8888, alphaType: skia.AlphaType.Opaque, colorSpace: skia.ColorSpace.SRGB };
+      const info = {
+        width: columns,
+        height: rows,
+        colorType: skia.ColorType.RGBA_8888,
+        alphaType: skia.AlphaType.Opaque,
+        colorSpace: skia.ColorSpace.SRGB,
+      };
       const image = target && skia.MakeImage(info, bytes, 4 * columns);
       if (!target || !image) return;
       target.getCanvas().drawImage(image, 0, 0);

@@ -34,7 +34,10 @@ export function zoomRegion(region: Region, factor: number, at: { readonly x: num
   const scale = Math.min(1, Math.max(smallest, region.rows / grid.rows / factor));
   const rows = grid.rows * scale;
   const columns = grid.columns * scale;
-  return bounded({ rows, columns, top: region.top + at.y * (region.rows - rows), left: region.left + at.x * (region.columns - columns) }, grid);
+  return bounded(
+    { rows, columns, top: region.top + at.y * (region.rows - rows), left: region.left + at.x * (region.columns - columns) },
+    grid,
+  );
 }
 
 /** Moves the picture by fractions of what is visible; to the right and down are positive. */
@@ -44,7 +47,11 @@ export const panRegion = (region: Region, right: number, down: number, grid: Pla
 export const magnification = (region: Region, grid: PlaneGrid): number => grid.rows / region.rows;
 
 /** Where a plane lies on a picture of another grid that shows `region`: fractions of the picture, by millimetres. */
-export function placement(plane: PlaneGrid, frame: PlaneGrid, region: Region): { left: number; top: number; width: number; height: number } {
+export function placement(
+  plane: PlaneGrid,
+  frame: PlaneGrid,
+  region: Region,
+): { left: number; top: number; width: number; height: number } {
   const along = (axis: 0 | 1, start: number, visible: number, n: number) => {
     const firstEdge = plane.origin[axis] - plane.spacing[axis] / 2;
     const frameEdge = frame.origin[axis] - frame.spacing[axis] / 2;
@@ -56,4 +63,10 @@ export function placement(plane: PlaneGrid, frame: PlaneGrid, region: Region): {
   const vertical = along(0, region.top, region.rows, plane.rows);
   const horizontal = along(1, region.left, region.columns, plane.columns);
   return { left: horizontal.from, width: horizontal.extent, top: vertical.from, height: vertical.extent };
+}
+
+/** The region moved as little as needed so that the sample is on the table. */
+export function regionShowing(region: Region, row: number, column: number, grid: PlaneGrid): Region {
+  const moved = (start: number, visible: number, index: number) => Math.min(index, Math.max(start, index + 1 - visible));
+  return bounded({ ...region, top: moved(region.top, region.rows, row), left: moved(region.left, region.columns, column) }, grid);
 }

@@ -23,9 +23,23 @@ describe('strokes on a picture', () => {
   });
 
   it('put an ellipse into the box between its two points, whichever way it was drawn', () => {
-    const box = (points: [number, number][]) => markStrokes('ellipse', points.map(([x, y]) => ({ x, y })))[0]?.path;
-    expect(box([[0, 0], [20, 10]])).toBe('M0 5A10 5 0 1 1 20 5A10 5 0 1 1 0 5Z');
-    expect(box([[20, 10], [0, 0]])).toBe('M0 5A10 5 0 1 1 20 5A10 5 0 1 1 0 5Z');
+    const box = (points: [number, number][]) =>
+      markStrokes(
+        'ellipse',
+        points.map(([x, y]) => ({ x, y })),
+      )[0]?.path;
+    expect(
+      box([
+        [0, 0],
+        [20, 10],
+      ]),
+    ).toBe('M0 5A10 5 0 1 1 20 5A10 5 0 1 1 0 5Z');
+    expect(
+      box([
+        [20, 10],
+        [0, 0],
+      ]),
+    ).toBe('M0 5A10 5 0 1 1 20 5A10 5 0 1 1 0 5Z');
   });
 
   it('draw nothing for words: they stand beside their point', () => {

@@ -1,5 +1,5 @@
 /** Numbers of the bench: SI practice (a real minus sign), worked out by hand. */
-import { decimalsOf, fixed, parseNumber, significant } from '@/components/bench/number-text';
+import { decimalsOf, fixed, parseNumber, significant } from '@/components/ui/number-text';
 
 describe('numbers on the bench', () => {
   it('carry a real minus sign, and none before zero', () => {
@@ -12,7 +12,13 @@ describe('numbers on the bench', () => {
   });
 
   it('keep three digits of a measured value', () => {
-    expect([0.3514, 38.64, 1204.4, 0, -0.00123].map((value) => significant(value))).toEqual(['0.351', '38.6', '1204', '0', '\u22120.00123']);
+    expect([0.3514, 38.64, 1204.4, 0, -0.00123].map((value) => significant(value))).toEqual([
+      '0.351',
+      '38.6',
+      '1204',
+      '0',
+      '\u22120.00123',
+    ]);
   });
 
   it('are read with hyphen, minus sign or decimal comma, and refused otherwise', () => {

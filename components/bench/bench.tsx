@@ -1,0 +1,84 @@
+/** The bench of a case: fetches the case, its images, the catalogue and, where one is named, the trial whose recipe is opened. */
+import { useCase } from '@/components/api/cases';
+import { useCauses, useReconstructions } from '@/components/api/catalogue';
+import { useImage } from '@/components/api/images';
+import { useTrials } from '@/components/api/trials';
+import { caseNumber } from '@/components/case/words';
+import { EmptyState } from '@/components/ui/empty-state';
+import { LinkText } from '@/components/ui/link-text';
+import { LoadingWarp } from '@/components/ui/loading-warp';
+import { ProblemNotice } from '@/components/ui/problem-notice';
+import { Screen } from '@/components/ui/screen';
+import type { Method } from '@/server/contract/catalogue';
+import type { Recipe } from '@/server/contract/recipe';
+import { imagesOf } from './bench-images';
+import { BenchTable } from './bench-table';
+import { initialValues } from './recipe-order';
+
+interface BenchProps {
+  caseId: string;
+  trialId?: string | undefined;
+}
+
+const firstSeed = 1;
+
+/** Nothing done yet: no step, the first reconstruction of the catalogue. */
+function emptyRecipe([first]: readonly Method[]): Recipe {
+  return {
+    steps: [],
+    reconstruction: { method: first?.id ?? 'zero-filled', parameters: first ? initialValues(first.parameters) : {} },
+    seed: firstSeed,
+  };
+}
+
+export function Bench({ caseId, trialId }: BenchProps) {
+  const kase = useCase(caseId);
+  const trials = useTrials(caseId);
+  const trial = trials.data?.find(({ id }) => id === trialId);
+  const images = kase.data ? imagesOf(kase.data) : null;
+  const bad = useImage(images?.badId ?? null);
+  const source = useImage(trial?.imageId ?? images?.sourceId ?? null);
+  const causes = useCauses(bad.data?.id);
+  const methods = useReconstructions();
+  const waitsForTrial = trialId !== undefined && trials.isPending;
+  const failed = [kase, trials, bad, source, causes, methods].find(({ isError }) => isError);
+  const title = kase.data ? `Bench ${caseNumber(kase.data.number)}` : 'Bench';
+
+  if (failed?.error) {
+    return (
+      <Screen title={title}>
+        <ProblemNotice error={failed.error} onRetry={() => void failed.refetch()} />
+      </Screen>
+    );
+  }
+  if (kase.data && !images) {
+    return (
+      <Screen title={title}>
+        <EmptyState
+          text="This case has no image yet. The bench needs a bad one."
+          action={<LinkText label="add an image to the case" href={`/cases/${caseId}`} />}
+        />
+      </Screen>
+    );
+  }
+  if (!kase.data || !bad.data || !source.data || !causes.data || !methods.data || waitsForTrial) {
+    return (
+      <Screen title={title}>
+        <LoadingWarp what="fetching the case and its images" rows={2} picture={192} />
+      </Screen>
+    );
+  }
+  return (
+    <Screen title={title} still>
+      <BenchTable
+        key={`${bad.data.id} ${source.data.id} ${trialId ?? ''}`}
+        kase={kase.data}
+        bad={bad.data}
+        source={source.data}
+        causes={causes.data}
+        methods={methods.data}
+        recipe={trial?.recipe ?? emptyRecipe(methods.data)}
+      />
+    </Screen>
+  );
+}

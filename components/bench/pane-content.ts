@@ -1,0 +1,36 @@
+/** What a pane shows under a compare mode, and how that is called in its head. */
+import type { Domain } from '@/components/image/edge-scale';
+import type { PaneContent } from '@/components/image/layers';
+import type { BenchView } from './bench-view';
+
+type Asked = Pick<BenchView, 'compare' | 'divider' | 'kspaceOf'>;
+
+/**
+ * Side by side the two panes show one picture each. A divider at an end leaves one picture alone, and blink shows one at a time.
+ * k-space as acquired exists of the simulation only, so that it is never divided and never subtracted.
+ */
+export function contentOf(
+  domain: Domain,
+  { compare, divider, kspaceOf }: Asked,
+  side: 'bad' | 'simulated',
+  blinksToBad: boolean,
+): PaneContent {
+  if (domain === 'kspace' && kspaceOf === 'acquired' && (compare !== 'side-by-side' || side === 'simulated')) return 'simulated';
+  switch (compare) {
+    case 'side-by-side':
+      return side;
+    case 'blink':
+      return blinksToBad ? 'bad' : 'simulated';
+    case 'difference':
+      return 'difference';
+    case 'divider':
+      return divider <= 0 ? 'simulated' : divider >= 1 ? 'bad' : 'both';
+  }
+}
+
+/** The words at the right of a pane's head: what a reader must know before believing it. */
+export function cautionOf(domain: Domain, content: PaneContent, { kspaceOf }: Pick<Asked, 'kspaceOf'>): string {
+  if (domain === 'image') return content === 'difference' ? 'bad − simulated' : '';
+  if (content === 'difference') return 'bad − simulated, decades';
+  return kspaceOf === 'acquired' && content === 'simulated' ? 'as acquired' : 'of the image, not raw data';
+}

@@ -1,0 +1,89 @@
+/** The bench on a phone: one picture at full width, or two small ones; the sheet below, one thumb to work it. */
+import { useState } from 'react';
+import { ScrollView, useWindowDimensions, View } from 'react-native';
+import type { Domain } from '@/components/image/edge-scale';
+import { Tabs, type Tab } from '@/components/ui/tabs';
+import { useTheme } from '@/components/ui/theme-context';
+import { BenchHeader } from './bench-header';
+import { paneMargins, pictureSize, proportionOf, sheetHeight, type SheetStep } from './bench-measures';
+import { BenchNotices } from './bench-notices';
+import { BenchPane } from './bench-pane';
+import type { BenchView } from './bench-view';
+import { useBench } from './bench-context';
+import { BenchSheet } from './bench-sheet';
+import { PaneHead } from './pane-head';
+import { contentOf } from './pane-content';
+import { ReadoutTable } from './readout-table';
+import { useKeepAsTrial } from './use-keep-as-trial';
+import { WindowLine } from './window-line';
+
+const tabs: readonly Tab<BenchView['phonePanes']>[] = [
+  { value: 'image', label: 'image' },
+  { value: 'kspace', label: 'k-space' },
+  { value: 'both', label: 'both' },
+];
+const headHeight = 36;
+const smallPicture = 192;
+/** Header, head, edge below the picture, the line of tabs. */
+const around = 44 + headHeight + paneMargins.below + 44;
+
+function SmallPane({ domain, width }: { domain: Domain; width: number }) {
+  const { colours } = useTheme();
+  const { frame, view, blinksToBad } = useBench();
+  const size = pictureSize({ width, height: width }, proportionOf(frame));
+  const content = contentOf(domain, view, 'simulated', blinksToBad);
+  return (
+    <View style={{ flexDirection: 'row', backgroundColor: colours.mat, paddingTop: 4 }}>
+      <BenchPane domain={domain} side="simulated" {...size} withoutHead />
+      <View style={{ flex: 1, minWidth: 0, paddingRight: 12 }}>
+        <View style={{ paddingLeft: 12, gap: 4, alignItems: 'flex-start' }}>
+          <PaneHead domain={domain} content={content} />
+        </View>
+        <ReadoutTable domain={domain} narrow />
+      </View>
+    </View>
+  );
+}
+
+export function PhoneBench() {
+  const { colours } = useTheme();
+  const { frame, view, change } = useBench();
+  const screen = useWindowDimensions();
+  const [step, setStep] = useState<SheetStep>('closed');
+  const keep = useKeepAsTrial();
+  const sheet = sheetHeight(step, screen.height);
+  const room = {
+    width: screen.width - paneMargins.horizontal,
+    height: screen.height - around - sheetHeight(step === 'full' ? 'half' : step, screen.height),
+  };
+  const size = pictureSize(room, proportionOf(frame));
+  const { phonePanes } = view;
+  return (
+    <View style={{ flex: 1, minHeight: 0, overflow: 'hidden' }}>
+      <BenchHeader layout="phone" keep={keep} />
+      <View style={{ height: screen.height - 44 - Math.min(sheet, sheetHeight('half', screen.height)), overflow: 'hidden' }}>
+        <ScrollView style={{ flex: 1 }} contentContainerStyle={{ backgroundColor: colours.mat, flexGrow: 1 }}>
+          <BenchNotices keep={keep} />
+          {phonePanes === 'both' ? (
+            <>
+              <SmallPane domain="image" width={smallPicture} />
+              <SmallPane domain="kspace" width={smallPicture} />
+            </>
+          ) : (
+            <>
+              <BenchPane key={phonePanes} domain={phonePanes} side="simulated" {...size} headHeight={headHeight} />
+              <ReadoutTable domain={phonePanes} />
+            </>
+          )}
+        </ScrollView>
+        <View style={{ backgroundColor: colours.cloth }}>
+          {step === 'closed' && phonePanes !== 'both' ? <WindowLine domain={phonePanes} /> : null}
+          <View style={{ borderTopWidth: 1, borderTopColor: colours.rule }}>
+            <Tabs label="panes" tabs={tabs} value={phonePanes} onChange={(next) => change({ phonePanes: next })} even ruled={false} />
+          </View>
+        </View>
+      </View>
+      <BenchSheet step={step} onStep={setStep} />
+    </View>
+  );
+}

@@ -1,0 +1,68 @@
+/** Joins what the bench is given (case, images, catalogue, a recipe to start with) into what its parts share. */
+import { useCallback, useMemo, useReducer, useState } from 'react';
+import { ApiProblem } from '@/components/api/api-problem';
+import { usePixels, useSimulation } from '@/components/api/simulations';
+import { centredGrid } from '@/components/image/display-plane';
+import type { Case } from '@/server/contract/cases';
+import type { Cause, Method } from '@/server/contract/catalogue';
+import type { Image } from '@/server/contract/images';
+import type { Recipe } from '@/server/contract/recipe';
+import type { SimulationRequest } from '@/server/contract/simulations';
+import type { BenchState } from './bench-context';
+import { startView, type BenchView } from './bench-view';
+import { placeIssues } from './issue-places';
+import { recipeHistory, startHistory } from './recipe-history';
+import { useBlink } from './use-blink';
+import { useShown } from './use-shown';
+
+export interface OnTheBench {
+  readonly kase: Case;
+  readonly bad: Image;
+  readonly source: Image;
+  readonly causes: readonly Cause[];
+  readonly methods: readonly Method[];
+  readonly recipe: Recipe;
+}
+
+/** The simulation that the bench asks for; without a phase-encode axis there is none: the bench asks and does not guess. */
+function requestOf({ bad, source }: OnTheBench, recipe: Recipe, kspaceOf: BenchView['kspaceOf']): SimulationRequest | null {
+  const phaseEncode = bad.acquisition.phaseEncode.value;
+  if (phaseEncode === null) return null;
+  return {
+    imageId: source.id,
+    recipe,
+    outputs: ['image', kspaceOf === 'acquired' ? 'kspace' : 'kspaceOfImage'],
+    compareWith: { imageId: bad.id },
+    facts: { phaseEncode },
+  };
+}
+
+export function useBenchState(given: OnTheBench): BenchState {
+  const { bad, source } = given;
+  const frame = useMemo(() => centredGrid(bad.rows, bad.columns, bad.spacingMm ?? [1, 1]), [bad.rows, bad.columns, bad.spacingMm]);
+  const [view, setView] = useState(() => startView(frame, bad.range));
+  const change = useCallback((part: Partial<BenchView>) => setView((before) => ({ ...before, ...part })), []);
+  const [history, dispatch] = useReducer(recipeHistory, given.recipe, startHistory);
+  const request = useMemo(() => requestOf(given, history.present, view.kspaceOf), [given, history.present, view.kspaceOf]);
+  const simulation = useSimulation(request);
+  const badImage = usePixels(bad.id, 'image').data?.planes;
+  const badKspace = usePixels(bad.id, 'kspace').data?.planes;
+  const shown = useShown({ badImage, badKspace, simulation: simulation.shown }, view);
+  const issues = useMemo(() => placeIssues(simulation.error instanceof ApiProblem ? simulation.error.issues : []), [simulation.error]);
+  const blink = useBlink(view.compare === 'blink');
+  return {
+    ...given,
+    runsOn: source.id === bad.id ? 'bad' : 'comparison',
+    phaseEncode: bad.acquisition.phaseEncode.value,
+    frame,
+    view,
+    change,
+    history,
+    dispatch,
+    simulation,
+    issues,
+    badPlanes: { image: badImage, kspace: badKspace },
+    shown,
+    ...blink,
+  };
+}
