@@ -6,7 +6,8 @@
  * database of your own in it, and drop it afterwards. `npm test` starts that cluster; a run by hand that finds the variable unset
  * starts one in the system's temporary folder, and the last such run to end stops it.
  *
- * The browser project tests the production build at `process.env.PICKGLASS_URL`; without it, it starts the product by itself.
+ * The browser project tests the production build at PICKGLASS_URL, whose demo accounts are in PICKGLASS_DATA; without them it starts
+ * the product by itself. Run it with --runInBand: the machine's cores are the browser's.
  */
 const compiled = {
   '\\.[cm]?[jt]sx?$': [
@@ -48,6 +49,13 @@ module.exports = {
       moduleNameMapper: { '^@/(.*)$': '<rootDir>/$1' },
     },
     { ...onNode, displayName: 'architecture', testMatch: ['<rootDir>/tests/architecture.test.ts'] },
-    { ...onNode, displayName: 'browser', testMatch: ['<rootDir>/tests/e2e/**/*.test.ts'] },
+    {
+      ...onNode,
+      displayName: 'browser',
+      testMatch: ['<rootDir>/tests/e2e/**/*.test.ts'],
+      setupFilesAfterEnv: ['<rootDir>/tests/e2e/patience.ts'],
+      globalSetup: '<rootDir>/tests/e2e/start-product.mjs',
+      globalTeardown: '<rootDir>/tests/e2e/stop-product.mjs',
+    },
   ],
 };

@@ -48,7 +48,7 @@ async function start() {
 
   const server = await startServer(program, {
     dataFolder,
-    env: { DATABASE_URL: database.url, PICKGLASS_DATA: dataFolder, PORT: String(port), HOST: host },
+    env: { NODE_ENV: 'production', DATABASE_URL: database.url, PICKGLASS_DATA: dataFolder, PORT: String(port), HOST: host },
     onStep: (text, milliseconds) => console.log(`${''.padEnd(12)} ${text} (${(milliseconds / 1000).toFixed(1)} s)`),
   });
   undo.push(server.stop);
