@@ -11,10 +11,13 @@ function overlaps(a: Grid, b: Grid): boolean {
   return along(0, a.rows, b.rows) && along(1, a.columns, b.columns);
 }
 
+/** In samples: positions come from sums of decimal fractions, and an edge that falls on an edge must not flicker. */
+const slack = 1e-6;
+
 /** Neighbours of `position` (in samples) and the weight of the second; undefined outside the plane. Within half a sample of the
  *  edge the edge sample holds. */
 function neighbours(position: number, n: number): { low: number; high: number; weight: number } | undefined {
-  if (position < -0.5 || position > n - 0.5) return undefined;
+  if (position < -0.5 - slack || position > n - 0.5 + slack) return undefined;
   const inside = Math.min(n - 1, Math.max(0, position));
   const low = Math.floor(inside);
   return { low, high: Math.min(n - 1, low + 1), weight: inside - low };
