@@ -36,28 +36,36 @@ const layoutOf = (rows: number, columns: number, axis: Axis): Layout =>
 
 /** Sample at centre + j goes to row j of the lanes. */
 function gather(plane: Lanes, block: Lanes, { n, sampleStride, lineStride }: Layout, first: number, lanes: number): void {
-  const centre = Math.floor(n / 2);
+  const { re, im } = plane;
+  const { re: blockRe, im: blockIm } = block;
+  let sample = Math.floor(n / 2);
   for (let j = 0; j < n; j++) {
-    const from = ((j + centre) % n) * sampleStride + first * lineStride;
-    const to = j * lanes;
-    for (let q = 0; q < lanes; q++) {
-      block.re[to + q] = plane.re[from + q * lineStride] as number;
-      block.im[to + q] = plane.im[from + q * lineStride] as number;
+    let from = sample * sampleStride + first * lineStride;
+    const end = (j + 1) * lanes;
+    for (let to = j * lanes; to < end; to++) {
+      blockRe[to] = re[from] as number;
+      blockIm[to] = im[from] as number;
+      from += lineStride;
     }
+    sample = sample + 1 === n ? 0 : sample + 1;
   }
 }
 
 /** Row j of the lanes goes to sample centre + j, scaled by 1/√n. */
 function scatter(block: Lanes, plane: Lanes, { n, sampleStride, lineStride }: Layout, first: number, lanes: number): void {
-  const centre = Math.floor(n / 2);
+  const { re, im } = plane;
+  const { re: blockRe, im: blockIm } = block;
   const scale = 1 / Math.sqrt(n);
+  let sample = Math.floor(n / 2);
   for (let j = 0; j < n; j++) {
-    const to = ((j + centre) % n) * sampleStride + first * lineStride;
-    const from = j * lanes;
-    for (let q = 0; q < lanes; q++) {
-      plane.re[to + q * lineStride] = (block.re[from + q] as number) * scale;
-      plane.im[to + q * lineStride] = (block.im[from + q] as number) * scale;
+    let to = sample * sampleStride + first * lineStride;
+    const end = (j + 1) * lanes;
+    for (let from = j * lanes; from < end; from++) {
+      re[to] = (blockRe[from] as number) * scale;
+      im[to] = (blockIm[from] as number) * scale;
+      to += lineStride;
     }
+    sample = sample + 1 === n ? 0 : sample + 1;
   }
 }
 

@@ -71,8 +71,8 @@ describe('Structural similarity', () => {
     const { mssim } = packageSsim(rgba(scaled), rgba(b), { ssim: 'original', downsample: false, windowSize: 11 });
     expect(percentile(b.values, 99.9)).toBe(255);
     // Its grey is a weighted sum of R, G and B, rounded to 8 bits: equal here. Rounding to whole numbers moves the gain of what we are given
-    // by about 1e-4, and its luminance weights add up to 0.9999: together below 1e-3.
-    expect(Math.abs(ssim(scaled, b) - mssim)).toBeLessThan(1e-3);
+    // by about 1e-4, and its luminance weights add up to 0.9999: together below 2e-4.
+    expect(Math.abs(ssim(scaled, b) - mssim)).toBeLessThan(2e-4);
   });
 
   test('is 1 for an image and itself at another gain, and falls with noise', () => {
