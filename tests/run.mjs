@@ -50,8 +50,10 @@ async function runJest(projects, parameters, env, folder) {
   const call = [program, ...patterns, '--selectProjects', ...projects, ...reporting, ...parameters];
   const code = await new Promise((resolve, reject) => {
     // What --json prints besides the file goes nowhere; people read the reporter on the other stream.
-    const child = spawn(process.execPath, call, { cwd: root, env: { ...process.env, ...env }, stdio: ['ignore', 'ignore', 'inherit'] });
-    interrupted.signal.addEventListener('abort', () => child.kill('SIGTERM'));
+    const stdio = /** @type {import('node:child_process').StdioOptions} */ (['ignore', 'ignore', 'inherit']);
+    // A process group of its own: ended as one, with the browser and the product that its tests started.
+    const child = spawn(process.execPath, call, { cwd: root, env: { ...process.env, ...env }, stdio, detached: true });
+    interrupted.signal.addEventListener('abort', () => child.pid !== undefined && process.kill(-child.pid, 'SIGTERM'));
     child.once('error', reject);
     child.once('exit', resolve);
   });

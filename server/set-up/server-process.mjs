@@ -15,19 +15,20 @@ import { SetUpError } from './run-command.mjs';
 
 /**
  * @typedef {object} ServerProcess
- * @property {string} accountsFile Where the demo accounts are.
  * @property {string} logFile
+ * @property {Promise<string>} ready Resolves to the file of the demo accounts when the server serves; rejects with the end of its log
+ *   when it ends before.
  * @property {Promise<unknown>} ended Resolves when the process has ended.
  * @property {() => Promise<void>} stop
  */
 
 /**
- * Starts the server and resolves when it serves; rejects with the end of its log when it ends before.
+ * Starts the server.
  * @param {string} file
  * @param {{ dataFolder: string, env: Record<string, string>, onStep: (text: string, milliseconds: number) => void }} options
- * @returns {Promise<ServerProcess>}
+ * @returns {ServerProcess}
  */
-export async function startServer(file, { dataFolder, env, onStep }) {
+export function startServer(file, { dataFolder, env, onStep }) {
   const logFile = join(dataFolder, 'server.log');
   if (existsSync(logFile)) renameSync(logFile, join(dataFolder, 'server.previous.log'));
   const log = openSync(logFile, 'a', 0o600);
@@ -39,7 +40,8 @@ export async function startServer(file, { dataFolder, env, onStep }) {
     if (child.exitCode === null && child.signalCode === null) child.kill('SIGTERM');
     await ended;
   };
-  const accountsFile = await new Promise((resolve, reject) => {
+  /** @type {Promise<string>} */
+  const ready = new Promise((resolve, reject) => {
     child.on('message', (message) => {
       const report = /** @type {Report} */ (message);
       if (report.kind === 'step') onStep(report.text, report.milliseconds);
@@ -47,7 +49,7 @@ export async function startServer(file, { dataFolder, env, onStep }) {
     });
     ended.then(() => reject(new SetUpError(`The server ended while it started. ${logFile} says:\n${endOf(logFile)}`)), reject);
   });
-  return { accountsFile, logFile, ended, stop };
+  return { logFile, ready, ended, stop };
 }
 
 /** @param {string} logFile */
