@@ -49,8 +49,6 @@ const longestTail = 1 << 20;
 export function elementsAfter(bytes: Uint8Array, { transferSyntax }: Parsed, pixelData: Element): DataSet['elements'] {
   const end = pixelData.dataOffset + pixelData.length;
   const tail = bytes.subarray(end, end + longestTail);
-  // Some files end in megabytes of zeros, which would read as as many empty elements.
-  if (tail.every((byte) => byte === 0)) return {};
   try {
     return dicomParser.parseDicom(tail, { TransferSyntaxUID: transferSyntax }).elements;
   } catch (thrown) {

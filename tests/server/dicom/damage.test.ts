@@ -8,10 +8,13 @@ import { scanFactsSchema } from '../../../server/contract/facts';
 import { refusalCodes, warningSchema } from '../../../server/contract/images';
 import { encodeElements, joined, type ElementToWrite } from '../../../server/dicom/elements';
 import { readDicom } from '../../../server/dicom/read';
-import { madeFile, refused, side } from './made-image';
+import { accepted, madeFile, refused, side } from './made-image';
 import { realFile } from './real-files';
 
 const seed = 20261201;
+
+/** Thousands of files a test: seconds on an idle core, and other work may share it. A hang would still end here. */
+jest.setTimeout(60_000);
 
 /** An outcome is either a refusal of the closed list or an image that is consistent in itself. */
 function expectSound(bytes: Uint8Array): void {
@@ -111,6 +114,25 @@ describe('bytes out of all reason', () => {
     const level = Uint8Array.of(0x08, 0, 0x40, 0x11, 0x53, 0x51, 0, 0, 0xff, 0xff, 0xff, 0xff, 0xfe, 0xff, 0, 0xe0, 0xff, 0xff, 0xff, 0xff);
     const meta = madeFile({ without: ['7FE0,0010'] });
     expect(['truncated', 'unreadable']).toContain(refused(joined([meta, ...Array<Uint8Array>(50_000).fill(level)])).code);
+  });
+
+  test('a sequence of undefined length that is never closed', () => {
+    const open = Uint8Array.of(0x08, 0, 0x40, 0x11, 0x53, 0x51, 0, 0, 0xff, 0xff, 0xff, 0xff);
+    expect(refused(joined([madeFile({ without: ['7FE0,0010'] }), open])).code).toBe('truncated');
+  });
+
+  test('pixels packed as if compressed under an uncompressed transfer syntax', () => {
+    const packed = Uint8Array.of(0xe0, 0x7f, 0x10, 0, 0x4f, 0x42, 0, 0, 0xff, 0xff, 0xff, 0xff, 0xfe, 0xff, 0, 0xe0, 0, 0, 0, 0);
+    const read = refused(joined([madeFile({ without: ['7FE0,0010'] }), packed]));
+    expect(read).toMatchObject({ code: 'transfer-syntax', reason: expect.stringContaining('packed as if compressed') });
+  });
+
+  test('a value longer than any that a scanner writes is left out', () => {
+    const imageType = (n: number) =>
+      accepted(madeFile({ attributes: { imageType: Array<string>(n).fill('ORIGINAL') } })).facts.imageType.value;
+    // Nine bytes a value: 113 of them end below 1024 bytes, 114 above.
+    expect(imageType(113)).toContain('ORIGINAL');
+    expect(imageType(114)).toBeNull();
   });
 
   test('a length of four gigabytes less one', () => {
