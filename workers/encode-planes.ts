@@ -104,5 +104,9 @@ function extremes(values: Float64Array): [number, number] {
 function describe({ name, domain, plane }: NamedPlane): Omit<PlaneDescription, 'type'> {
   const unit = domain === 'image' ? 1000 : 1;
   const { rows, columns, spacing, origin }: Grid = plane;
-  return { name, rows, columns, spacing: [spacing[0] * unit, spacing[1] * unit], origin: [origin[0] * unit, origin[1] * unit] };
+  const pair = ([row, column]: readonly [number, number]): [number, number] => [written(row * unit), written(column * unit)];
+  return { name, rows, columns, spacing: pair(spacing), origin: pair(origin) };
 }
+
+/** Twelve digits: 2 mm is written as 2, not as 1.9999999999999996. */
+const written = (value: number): number => Number(value.toPrecision(12));

@@ -22,6 +22,9 @@ import { openDiskObjects } from '../../server/storage/disk-objects';
 import { cachedImageValues } from '../../server/storage/image-values';
 import { openWorkers, workersIn } from '../../workers/pool';
 
+// A thread that compiles its sources takes seconds to start where other work shares the cores.
+jest.setTimeout(60_000);
+
 export const project = join(__dirname, '..', '..');
 export const password = 'thread-counter-by-the-window';
 /** The least work factor there is: tests sign in often, and the factor is not what they look at. */
