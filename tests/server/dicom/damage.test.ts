@@ -3,7 +3,7 @@
  * is refused, and what is accepted is whole and fits the contract. All random choices are seeded.
  */
 import dicomParser from 'dicom-parser';
-import fc from 'fast-check';
+import { array, assert, integer, property, uint8Array } from 'fast-check';
 import { scanFactsSchema } from '../../../server/contract/facts';
 import { refusalCodes, warningSchema } from '../../../server/contract/images';
 import { encodeElements, joined, type ElementToWrite } from '../../../server/dicom/elements';
@@ -68,10 +68,10 @@ describe('a file that is cut', () => {
 
   test('a head slice, at 200 random places', () => {
     const whole = realFile('volume/brain_010.dcm');
-    const property = fc.property(fc.integer({ min: 1, max: whole.length - 1 }), (length) => {
+    const law = property(integer({ min: 1, max: whole.length - 1 }), (length) => {
       expect(codesOfCut).toContain(refused(whole.subarray(0, length)).code);
     });
-    fc.assert(property, { seed, numRuns: 200 });
+    assert(law, { seed, numRuns: 200 });
   });
 });
 
@@ -82,31 +82,31 @@ describe('bits that are flipped', () => {
     return copy;
   };
   const flips = (bytes: Uint8Array, firstByte: number) =>
-    fc.array(fc.integer({ min: 8 * firstByte, max: 8 * bytes.length - 1 }), { minLength: 1, maxLength: 12 });
+    array(integer({ min: 8 * firstByte, max: 8 * bytes.length - 1 }), { minLength: 1, maxLength: 12 });
 
   test.each(['explicit', 'implicit'] as const)('%s VR: anywhere behind the preamble', (vrEncoding) => {
-    const property = fc.property(flips(small[vrEncoding], 128), (places) => expectSound(flipped(small[vrEncoding], places)));
-    fc.assert(property, { seed, numRuns: 1500 });
+    const law = property(flips(small[vrEncoding], 128), (places) => expectSound(flipped(small[vrEncoding], places)));
+    assert(law, { seed, numRuns: 1500 });
   });
 
   test('a head slice: anywhere in its header', () => {
     const whole = realFile('volume/brain_010.dcm');
-    const property = fc.property(flips(whole.subarray(0, 1842), 128), (places) => expectSound(flipped(whole, places)));
-    fc.assert(property, { seed, numRuns: 150 });
+    const law = property(flips(whole.subarray(0, 1842), 128), (places) => expectSound(flipped(whole, places)));
+    assert(law, { seed, numRuns: 150 });
   });
 });
 
 describe('bytes out of all reason', () => {
   test('noise behind a DICOM prefix', () => {
     const prefix = joined([new Uint8Array(128), new TextEncoder().encode('DICM')]);
-    const property = fc.property(fc.uint8Array({ maxLength: 400 }), (noise) => expectSound(joined([prefix, noise])));
-    fc.assert(property, { seed, numRuns: 500 });
+    const law = property(uint8Array({ maxLength: 400 }), (noise) => expectSound(joined([prefix, noise])));
+    assert(law, { seed, numRuns: 500 });
   });
 
   test('noise in place of the data set', () => {
     const meta = small.explicit.slice(0, 350);
-    const property = fc.property(fc.uint8Array({ maxLength: 400 }), (noise) => expectSound(joined([meta, noise])));
-    fc.assert(property, { seed, numRuns: 500 });
+    const law = property(uint8Array({ maxLength: 400 }), (noise) => expectSound(joined([meta, noise])));
+    assert(law, { seed, numRuns: 500 });
   });
 
   test('fifty thousand sequences inside one another', () => {
