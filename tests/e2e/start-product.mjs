@@ -37,7 +37,7 @@ export default async function startProduct() {
 function addressFrom(output) {
   return new Promise((resolve) => {
     createInterface({ input: output }).on('line', (line) => {
-      if (!line.startsWith('demo account:')) console.log(line);
+      if (!line.startsWith('demo account:')) console.error(line);
       const ready = /^Pickglass ready: (http:\/\/127\.0\.0\.1:\d+)$/.exec(line);
       if (ready?.[1] !== undefined) resolve(ready[1]);
     });
