@@ -33,7 +33,7 @@ export const fatShiftPixels = (imagingFrequency: number, bandwidthPerPixel: numb
 export const readoutTime = (bandwidthPerPixel: number): number => 1 / bandwidthPerPixel;
 
 /** Where the first ghost of a motion falls, as a part of the phase field of view from −½ to ½: frac(TR·averages·f).
- *  Source: Wood & Henkelman, Med Phys 1985;12:143 (from memory). */
+ *  Source: Wood & Henkelman, Med Phys 1985;12:143. */
 export function ghostPosition(repetitionTime: number, averages: number, frequency: number): number {
   const cycles = repetitionTime * averages * frequency;
   return cycles - Math.round(cycles);

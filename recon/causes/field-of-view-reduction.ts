@@ -68,7 +68,7 @@ export const fieldOfViewReduction = defineCause({
       standing: 'confirmed',
     },
     { citation: 'Pusey E et al. Magnetic resonance imaging artifacts. RadioGraphics 6:891', year: 1986, standing: 'from memory' },
-    { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'from memory' },
+    { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'confirmed' },
   ],
   remedies: [
     {

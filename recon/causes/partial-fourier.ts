@@ -36,17 +36,20 @@ export const partialFourier = defineCause({
     {
       citation: 'Noll DC, Nishimura DG, Macovski A. Homodyne detection in magnetic resonance imaging. IEEE Trans Med Imaging 10:154',
       year: 1991,
-      standing: 'from memory',
+      doi: '10.1109/42.79473',
+      standing: 'confirmed',
     },
     {
-      citation: 'Haacke EM, Lindskog ED, Lin W. A fast, iterative, partial-Fourier technique. J Magn Reson 92:126',
+      citation:
+        'Haacke EM, Lindskog ED, Lin W. A fast, iterative, partial-Fourier technique capable of local phase recovery. J Magn Reson 92:126',
       year: 1991,
-      standing: 'from memory',
+      doi: '10.1016/0022-2364(91)90253-P',
+      standing: 'confirmed',
     },
     {
       citation: 'McGibney G et al. Quantitative evaluation of several partial Fourier reconstruction algorithms. Magn Reson Med 30:51',
       year: 1993,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
   ],
   remedies: [

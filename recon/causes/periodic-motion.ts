@@ -35,7 +35,7 @@ export const periodicMotion = defineCause({
       'The phase swings from line to line with the period of the motion; the magnitude stays. The k-space of the magnitude image shows faint bands across the phase encoding instead.',
   },
   sources: [
-    { citation: 'Wood ML, Henkelman RM. MR image artifacts from periodic motion. Med Phys 12:143', year: 1985, standing: 'from memory' },
+    { citation: 'Wood ML, Henkelman RM. MR image artifacts from periodic motion. Med Phys 12:143', year: 1985, standing: 'confirmed' },
     {
       citation: 'Wood ML, Henkelman RM. Suppression of respiratory motion artifacts in magnetic resonance imaging. Med Phys 13:794',
       year: 1986,

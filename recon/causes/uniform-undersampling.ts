@@ -31,11 +31,11 @@ export const uniformUndersampling = defineCause({
     image:
       'R overlapping copies of the object, one R-th of the field of view apart along the phase encoding, each one R-th as bright; calibration lines add a blurred true image to them.',
     kspace:
-      'Of every R lines only one is filled, apart from a full band in the middle where there are calibration lines. The k-space of the magnitude image does not show the gaps.',
+      'Of every R lines only one is filled, apart from a full band in the middle where there are calibration lines. The k-space of the magnitude image has the same gaps, unless calibration lines were taken.',
   },
   sources: [
     { citation: 'Pruessmann KP et al. SENSE: sensitivity encoding for fast MRI. Magn Reson Med 42:952', year: 1999, standing: 'confirmed' },
-    { citation: 'Deshmane A et al. Parallel MR imaging. J Magn Reson Imaging 36:55', year: 2012, standing: 'from memory' },
+    { citation: 'Deshmane A et al. Parallel MR imaging. J Magn Reson Imaging 36:55', year: 2012, standing: 'confirmed' },
   ],
   remedies: [
     { change: 'Lower the acceleration factor', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },

@@ -46,7 +46,7 @@ const product = (a: Float64Array, b: Float64Array): Float64Array => a.map((value
  * Structural similarity after the least-squares gain: the mean over all places of an 11 × 11 Gaussian window, σ 1.5, of
  *   (2μ_s μ_b + c1)(2σ_sb + c2) / ((μ_s² + μ_b² + c1)(σ_s² + σ_b² + c2)),  c1 = (0.01 L)², c2 = (0.03 L)²,
  * with L the 99.9th percentile of b. Throws where a side is shorter than the window.
- * Source: Wang, Bovik, Sheikh, Simoncelli, IEEE Trans Image Process 2004;13:600, eq. 13 (from memory).
+ * Source: Wang, Bovik, Sheikh, Simoncelli, IEEE Trans Image Process 2004;13:600, doi 10.1109/TIP.2003.819861 (eq. 13, from memory).
  */
 export function ssim(s: Plane, b: Plane): number {
   const { rows, columns } = b;

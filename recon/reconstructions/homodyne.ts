@@ -1,7 +1,7 @@
 /**
  * Homodyne detection of one-sided k-space: I = |Re{ F⁻¹[W·K] · exp(−iθ) }|. The ramp W(k) = 0, 1 + k/ks, 2 counts the far lines of
  * the taken side twice, with W(k) + W(−k) = 2; θ is the phase of the symmetric band |k| < ks, ks the reach of the short side.
- * Source: Noll, Nishimura, Macovski, IEEE Trans Med Imaging 1991;10:154 (from memory).
+ * Source: Noll, Nishimura, Macovski, IEEE Trans Med Imaging 1991;10:154, doi 10.1109/42.79473.
  *
  * Where both sides reach equally far nothing is to be made up, and the result is the zero-filled one: for all lines, and for lines
  * skipped evenly. With both skipped lines and a short side the copies stay and each is sharpened.
@@ -55,7 +55,8 @@ export const homodyne = defineReconstruction({
     {
       citation: 'Noll DC, Nishimura DG, Macovski A. Homodyne detection in magnetic resonance imaging. IEEE Trans Med Imaging 10:154',
       year: 1991,
-      standing: 'from memory',
+      doi: '10.1109/42.79473',
+      standing: 'confirmed',
     },
   ],
   reconstruct(kspace, _parameters, { acquisition }) {

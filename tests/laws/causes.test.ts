@@ -1,11 +1,10 @@
 /** Laws that every cause obeys. A cause that is added to the list is tried by them without another line. */
-import type { Cause, Encoded } from '../../recon/cause';
+import type { Cause, Context, Encoded } from '../../recon/cause';
 import { causes } from '../../recon/causes';
 import type { ComplexPlane } from '../../recon/grid';
 import { fullyTaken } from '../../recon/lines';
 import type { ParameterValues, Recipe } from '../../recon/recipe';
 import { checkRecipe } from '../../recon/recipe-check';
-import type { Context } from '../../recon/cause';
 import { largestDifference, noisePlane, transposed } from '../recon/planes';
 import { acquisitions, contextOf, corners, initialValues, refused, sizes } from './samples';
 

@@ -1,5 +1,5 @@
 /** The transform against its definition, against an independent package, and by the theorems that it must obey. */
-import fc from 'fast-check';
+import { assert, integer, property, tuple } from 'fast-check';
 import { fft } from 'fft-js';
 import { inverse, inverseAlong, transform, transformAlong } from '../../recon/fourier';
 import { centredGrid, complexZeros } from '../../recon/grid';
@@ -47,12 +47,12 @@ describe('The transform equals fft-js', () => {
 });
 
 describe('Theorems of the transform', () => {
-  const sizes = fc.tuple(fc.integer({ min: 1, max: 70 }), fc.integer({ min: 1, max: 70 }), fc.integer({ min: 0, max: 1e6 }));
+  const sizes = tuple(integer({ min: 1, max: 70 }), integer({ min: 1, max: 70 }), integer({ min: 0, max: 1e6 }));
   const seeded = { seed: 7, numRuns: 60 };
 
   test('The way back restores the plane, for any size', () => {
-    fc.assert(
-      fc.property(sizes, ([rows, columns, seed]) => {
+    assert(
+      property(sizes, ([rows, columns, seed]) => {
         const plane = noisePlane(rows, columns, seed);
         expect(largestDifference(inverse(transform(plane)), plane)).toBeLessThan(rounding);
       }),
@@ -61,8 +61,8 @@ describe('Theorems of the transform', () => {
   });
 
   test('Energy is the same in both domains (Parseval)', () => {
-    fc.assert(
-      fc.property(sizes, ([rows, columns, seed]) => {
+    assert(
+      property(sizes, ([rows, columns, seed]) => {
         const plane = noisePlane(rows, columns, seed);
         expect(energy(transform(plane)) / energy(plane)).toBeCloseTo(1, 12);
       }),

@@ -23,10 +23,24 @@ describe('Partial Fourier', () => {
     const taken = takenOf(n, fraction);
     expect(taken.filter(Boolean)).toHaveLength(fraction * n);
     const below = n / 2 - taken.indexOf(true);
-    // Noll et al. 1991 (from memory): both sides are complete within (2f−1)N/2.
+    // Noll et al. 1991: both sides are complete within (2f−1)N/2.
     expect((2 * below) / n).toBe(reference.symmetricBand[fraction]);
     expect(taken.indexOf(true) - n / 2).toBe((-(2 * fraction - 1) * n) / 2);
     expect(taken.slice(taken.indexOf(true))).not.toContain(false);
+  });
+
+  test('does not show in the k-space of the magnitude image: both sides of it hold the same', () => {
+    const recipe = {
+      steps: [{ cause: 'partial-fourier', parameters: { fraction: 0.625 } }],
+      reconstruction: { method: 'zero-filled', parameters: {} },
+      seed: 1,
+    };
+    const { kspace, kspaceOfImage } = simulate(noisePlane(6, 64), recipe, acquisition);
+    const column = (of: { re: Float64Array; im: Float64Array }, k: number): number =>
+      [0, 1, 2, 3, 4, 5].reduce((sum, row) => sum + (of.re[row * 64 + 32 + k] ?? NaN) ** 2 + (of.im[row * 64 + 32 + k] ?? NaN) ** 2, 0);
+    expect(column(kspace, -20)).toBe(0);
+    expect(column(kspace, 20)).toBeGreaterThan(1);
+    expect(column(kspaceOfImage(), -20)).toBeCloseTo(column(kspaceOfImage(), 20), 10);
   });
 
   test('takes the nearest whole number of an odd count of lines', () => {

@@ -98,6 +98,18 @@ describe('How bright ghosts are', () => {
 });
 
 describe('What k-space shows', () => {
+  test('That of the magnitude image has bands across the phase encoding: J0 + 2 Σ |J_j| cos(2π·ky·j·d/N) where ghosts stand clear', () => {
+    const object = box(64, [29, 35], [20, 44]);
+    const before = transform(object);
+    const after = simulate(object, recipeOf(motion(0.25, 0.25)), acquisition).kspaceOfImage();
+    for (const ky of [1, 2, 5, 6]) {
+      const i = (32 + ky) * 64 + 32;
+      const bands = [1, 2, 3].reduce((sum, j) => sum + 2 * jv(j, 0.25) * Math.cos((2 * Math.PI * ky * j) / 8), jv(0, 0.25));
+      // The fourth order, J_4(0.25) = 1e-5, is left out, twice.
+      expect(Math.abs((after.re[i] ?? NaN) / (before.re[i] ?? NaN) - bands)).toBeLessThan(3e-5);
+    }
+  });
+
   test('The phase of the lines swings, their magnitude stays', () => {
     const object = noisePlane(32, 8);
     const before = transform(object);

@@ -4,7 +4,8 @@ import { inverse, transform } from '../../../recon/fourier';
 import { linesOf, takenLines } from '../../../recon/lines';
 import { simulate } from '../../../recon/simulate';
 import { reference } from '../../reference/values';
-import { box, largestDifference, noisePlane } from '../planes';
+import { withObjectPhase } from '../../../recon/object-phase';
+import { box, energy, largestDifference, noisePlane } from '../planes';
 
 const acquisition: Acquisition = { phaseEncode: 'column' };
 const recipeOf = (accelerationFactor: number, calibrationLines = 0) => ({
@@ -46,6 +47,17 @@ describe('Skipped lines', () => {
       middle.im.fill(0, line * 8, (line + 1) * 8);
     });
     expect(largestDifference(inverse(kspace), inverse(middle))).toBeLessThan(1e-13);
+  });
+
+  test('are gaps in the k-space of the magnitude image too, unless calibration lines were taken', () => {
+    // The copies repeat after N/R, and so does their magnitude: its transform has every R-th line only, whatever the phase.
+    const object = withObjectPhase(noisePlane(64, 8), { range: 3, seed: 2 });
+    const lineEnergy = (calibrationLines: number) => {
+      const { re, im } = simulate(object, recipeOf(4, calibrationLines), acquisition).kspaceOfImage();
+      return energy({ ...object, re: re.slice(8 * 33, 8 * 34), im: im.slice(8 * 33, 8 * 34) });
+    };
+    expect(lineEnergy(0)).toBeLessThan(1e-24);
+    expect(lineEnergy(16)).toBeGreaterThan(1e-3);
   });
 
   test('are zero in k-space', () => {

@@ -1,4 +1,4 @@
-/** Zero-filled and homodyne reconstruction of partial Fourier: Noll, Nishimura, Macovski 1991 (from memory), errors from numpy. */
+/** Zero-filled and homodyne reconstruction of partial Fourier: Noll, Nishimura, Macovski 1991, errors from numpy. */
 import type { Acquisition } from '../../../recon/acquisition';
 import type { Plane } from '../../../recon/grid';
 import { magnitude } from '../../../recon/grid';
