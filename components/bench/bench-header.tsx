@@ -153,7 +153,9 @@ export function BenchHeader({ layout, keep }: BenchHeaderProps) {
     <View style={[line, { height: 48, paddingLeft: space(6), gap: space(4) }]}>
       <Title layout={layout} />
       <View style={{ width: 1, height: 16, backgroundColor: colours.rule }} />
-      <StateBadge state={kase.state} />
+      <View>
+        <StateBadge state={kase.state} />
+      </View>
       <View style={{ marginLeft: 'auto', flexDirection: 'row', alignItems: 'center' }}>
         <StepBack direction="undo" disabled={!canUndo} onPress={undo} />
         <StepBack direction="redo" disabled={!canRedo} onPress={redo} />

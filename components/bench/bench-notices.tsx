@@ -6,12 +6,18 @@ import { space } from '@/components/ui/theme';
 import { useBench } from './bench-context';
 import type { Keep } from './use-keep-as-trial';
 
-export function BenchNotices({ keep }: { keep: Keep }) {
+interface BenchNoticesProps {
+  keep: Keep;
+  /** A kept trial is told here; elsewhere the line of numbers tells it. */
+  withKept?: boolean;
+}
+
+export function BenchNotices({ keep, withKept = false }: BenchNoticesProps) {
   const { kase, simulation, issues } = useBench();
   const { error, isBehind, retry } = simulation;
   const atControls = issues.atControl.size > 0;
   const messages = error === null ? [] : issues.elsewhere.length > 0 ? issues.elsewhere : atControls ? [] : [error.message];
-  if (messages.length === 0 && !keep.error && !keep.kept && !(isBehind && error)) return null;
+  if (messages.length === 0 && !keep.error && !(withKept && keep.kept) && !(isBehind && error)) return null;
   return (
     <View style={{ gap: space(1), padding: space(2) }}>
       {messages.map((message) => (
@@ -19,7 +25,7 @@ export function BenchNotices({ keep }: { keep: Keep }) {
       ))}
       {isBehind && error ? <Notice kind="stale" text="this pane shows an older recipe" /> : null}
       {keep.error ? <Notice kind="failed" text={`not kept: ${keep.error.message}`} /> : null}
-      {keep.kept ? (
+      {withKept && keep.kept ? (
         <Notice
           kind="done"
           text={`kept as trial ${keep.kept.number}`}

@@ -37,8 +37,8 @@ export interface BenchView {
   readonly tab: EyeTab;
 }
 
-/** log10 of the magnitude over its maximum: from white at 1 to black at about the noise of a 16-bit magnitude image. */
-const logRange = [-4.6, -0.6] as const;
+/** log10 of the magnitude over its maximum: wide enough that the noise of a usual image is dark grey and the centre is not white all over. */
+const logRange = [-4, -0.3] as const;
 
 export function startView(frame: PlaneGrid, range: readonly [number, number]): BenchView {
   const imageWindow = windowOfRange(range[0], range[1]);

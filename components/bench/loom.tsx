@@ -59,7 +59,7 @@ export function Loom() {
         <View style={{ height: 22, justifyContent: 'center' }}>
           <KnotSquare look="not-yet" />
         </View>
-        <View style={{ marginTop: -8 }}>
+        <View style={{ marginTop: -14 }}>
           <AddStep />
         </View>
       </View>

@@ -31,6 +31,6 @@ export function contentOf(
 /** The words at the right of a pane's head: what a reader must know before believing it. */
 export function cautionOf(domain: Domain, content: PaneContent, { kspaceOf }: Pick<Asked, 'kspaceOf'>): string {
   if (domain === 'image') return content === 'difference' ? 'bad − simulated' : '';
-  if (content === 'difference') return 'bad − simulated, decades';
+  if (content === 'difference') return 'in decades';
   return kspaceOf === 'acquired' && content === 'simulated' ? 'as acquired' : 'of the image, not raw data';
 }

@@ -23,9 +23,15 @@ export function PaneHead({ domain, content }: PaneHeadProps) {
   return (
     <>
       {domain === 'kspace' ? <KspaceMenu content={content} /> : null}
-      {domain === 'image' && (content === 'bad' || content === 'both') ? <Badge glyph="bad" word="bad image" tone="madder" /> : null}
+      {domain === 'image' && (content === 'bad' || content === 'both') ? (
+        <View>
+          <Badge glyph="bad" word="bad image" tone="madder" />
+        </View>
+      ) : null}
       {domain === 'image' && (content === 'simulated' || content === 'both') ? (
-        <Badge glyph="simulated" word="simulated" tone="orchil" />
+        <View>
+          <Badge glyph="simulated" word="simulated" tone="orchil" />
+        </View>
       ) : null}
       {content === 'difference' ? <ColourBar kind="difference" low={`−${significant(span)}`} high={significant(span)} /> : null}
       {domain === 'kspace' && view.kspaceLook === 'phase' && content !== 'difference' ? <ColourBar kind="phase" low="−π" high="π" /> : null}

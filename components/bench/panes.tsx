@@ -30,8 +30,12 @@ export function Panes({ size, gutter }: PanesProps) {
         paddingRight: gutter,
       }}
     >
-      <BenchPane key={`first ${first}`} domain={first} side="bad" {...size} readout={<ReadoutLine items={readouts[first]} />} />
-      <BenchPane key={`second ${second}`} domain={second} side="simulated" {...size} readout={<ReadoutLine items={readouts[second]} />} />
+      <View style={{ flex: 1, alignItems: 'center' }}>
+        <BenchPane key={`first ${first}`} domain={first} side="bad" {...size} readout={<ReadoutLine items={readouts[first]} />} />
+      </View>
+      <View style={{ flex: 1, alignItems: 'center' }}>
+        <BenchPane key={`second ${second}`} domain={second} side="simulated" {...size} readout={<ReadoutLine items={readouts[second]} />} />
+      </View>
     </View>
   );
 }

@@ -5,7 +5,7 @@ import type { Domain } from '@/components/image/edge-scale';
 import { Tabs, type Tab } from '@/components/ui/tabs';
 import { useTheme } from '@/components/ui/theme-context';
 import { BenchHeader } from './bench-header';
-import { paneMargins, pictureSize, proportionOf, sheetHeight, type SheetStep } from './bench-measures';
+import { closedSheet, paneMargins, pictureSize, proportionOf, sheetHeight, type SheetStep } from './bench-measures';
 import { BenchNotices } from './bench-notices';
 import { BenchPane } from './bench-pane';
 import type { BenchView } from './bench-view';
@@ -24,8 +24,11 @@ const tabs: readonly Tab<BenchView['phonePanes']>[] = [
 ];
 const headHeight = 36;
 const smallPicture = 192;
+const tabsHeight = 44;
+/** Glass and numbers below the picture, window and level; only while the sheet is closed. */
+const readoutHeight = 94 + 44;
 /** Header, head, edge below the picture, the line of tabs. */
-const around = 44 + headHeight + paneMargins.below + 44;
+const around = 44 + headHeight + paneMargins.below + tabsHeight;
 
 function SmallPane({ domain, width }: { domain: Domain; width: number }) {
   const { colours } = useTheme();
@@ -54,7 +57,7 @@ export function PhoneBench() {
   const sheet = sheetHeight(step, screen.height);
   const room = {
     width: screen.width - paneMargins.horizontal,
-    height: screen.height - around - sheetHeight(step === 'full' ? 'half' : step, screen.height),
+    height: screen.height - around - (step === 'closed' ? closedSheet + readoutHeight : sheetHeight('half', screen.height)),
   };
   const size = pictureSize(room, proportionOf(frame));
   const { phonePanes } = view;
@@ -63,7 +66,7 @@ export function PhoneBench() {
       <BenchHeader layout="phone" keep={keep} />
       <View style={{ height: screen.height - 44 - Math.min(sheet, sheetHeight('half', screen.height)), overflow: 'hidden' }}>
         <ScrollView style={{ flex: 1 }} contentContainerStyle={{ backgroundColor: colours.mat, flexGrow: 1 }}>
-          <BenchNotices keep={keep} />
+          <BenchNotices keep={keep} withKept />
           {phonePanes === 'both' ? (
             <>
               <SmallPane domain="image" width={smallPicture} />
@@ -71,7 +74,9 @@ export function PhoneBench() {
             </>
           ) : (
             <>
-              <BenchPane key={phonePanes} domain={phonePanes} side="simulated" {...size} headHeight={headHeight} />
+              <View style={{ alignItems: 'center' }}>
+                <BenchPane key={phonePanes} domain={phonePanes} side="simulated" {...size} headHeight={headHeight} />
+              </View>
               <ReadoutTable domain={phonePanes} />
             </>
           )}

@@ -2,7 +2,7 @@
 import type { Simulation } from '@/components/api/simulations';
 import { kspacePosition, positionMm, type Cursor, type PhaseEncode } from '@/components/image/cursor';
 import { valueNear, type DisplayPlane, type PlaneGrid } from '@/components/image/display-plane';
-import { kspaceGrid, onKspaceGrid } from '@/components/image/kspace-grid';
+import { kspaceGrid } from '@/components/image/kspace-grid';
 import { fixed, significant } from '@/components/ui/number-text';
 
 export interface ReadoutItem {
@@ -51,10 +51,7 @@ export function kspaceReadout(
 ): ReadoutItem[] {
   const { line, sample, kPhaseEncode, kReadout } = kspacePosition(cursor, frame, phaseEncode);
   const { x, y } = positionMm(cursor, kspaceGrid(frame));
-  const at = (planes: ReadonlyMap<string, DisplayPlane> | undefined, key: string): number | null => {
-    const plane = planes?.get(key);
-    return read(plane && onKspaceGrid(plane), y, x);
-  };
+  const at = (planes: ReadonlyMap<string, DisplayPlane> | undefined, key: string): number | null => read(planes?.get(key), y, x);
   const isTaken = (log: number | null): boolean => log !== null && log > -8;
   const ofBad = name === 'kspace' ? null : at(bad, 'kspace.log');
   const log = at(simulation?.planes, `${name}.log`);

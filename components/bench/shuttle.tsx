@@ -2,10 +2,11 @@
  * The shuttle: left end the bad picture, right end the simulated one; the shuttle itself is the divider. A press on an end shows that
  * picture alone; held down, it shows it for as long as it is held. Arrows move the shuttle.
  */
-import { useEffect, useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
+import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
 import { View } from 'react-native';
-import { Badge } from '@/components/ui/badge';
+import { Glyph } from '@/components/ui/glyph';
 import { Press } from '@/components/ui/press';
+import { Text } from '@/components/ui/text';
 import { touchTarget } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 
@@ -88,9 +89,9 @@ interface EndProps {
 }
 
 function End({ picture, to, value, onChange }: EndProps) {
+  const { colours } = useTheme();
+  const tone = picture === 'bad' ? 'madder' : 'orchil';
   const [held, setHeld] = useState<{ from: number; since: number } | null>(null);
-  const release = useRef<() => void>(() => undefined);
-  useEffect(() => () => release.current(), []);
   return (
     <Press
       aria-label={`the ${picture} picture alone; hold to see it for as long as you hold`}
@@ -105,7 +106,12 @@ function End({ picture, to, value, onChange }: EndProps) {
       }}
       style={() => ({ minWidth: touchTarget, minHeight: touchTarget, justifyContent: 'center' })}
     >
-      <Badge glyph={picture} word={picture} tone={picture === 'bad' ? 'madder' : 'orchil'} small />
+      <View style={{ flexDirection: to === 1 ? 'row' : 'row-reverse', alignItems: 'center', gap: 6 }}>
+        <Glyph name={picture} colour={colours[tone]} />
+        <Text variant="small" tone={tone}>
+          {picture}
+        </Text>
+      </View>
     </Press>
   );
 }

@@ -33,7 +33,7 @@ export function StepControls({ index, columns }: StepControlsProps) {
       <View
         style={{ flexDirection: columns === 3 ? 'row' : 'column', columnGap: space(6), alignItems: columns === 3 ? 'center' : 'stretch' }}
       >
-        <Text variant="small" tone="inkFaint" numberOfLines={columns === 3 ? 1 : 4} style={{ flexShrink: 1, flexGrow: 1 }}>
+        <Text variant="small" tone="inkFaint" numberOfLines={4} style={{ flexShrink: 1, flexGrow: 1 }}>
           {cause.looks.image}
         </Text>
         <View style={{ flexDirection: 'row', gap: space(6) }}>

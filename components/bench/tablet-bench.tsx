@@ -28,7 +28,7 @@ export function TabletBench() {
       <ScrollView style={{ flex: 1 }}>
         <Panes size={size} gutter={space(1)} />
         <CompareBar shuttleLength={screen.width > 900 ? 220 : 150} />
-        <NumbersLine />
+        <NumbersLine keep={keep} />
         <BenchNotices keep={keep} />
         <View style={{ flexDirection: 'row' }}>
           <View

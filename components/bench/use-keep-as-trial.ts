@@ -7,6 +7,7 @@ export interface Keep {
   readonly run: () => void;
   readonly busy: boolean;
   readonly disabled: boolean;
+  /** The trial, as long as its recipe lies on the bench. */
   readonly kept: Trial | undefined;
   readonly error: Error | null;
 }
@@ -20,7 +21,7 @@ export function useKeepAsTrial(): Keep {
       keep.mutate({ imageId: source.id, compareWith: { imageId: bad.id }, recipe, ...(phaseEncode ? { facts: { phaseEncode } } : {}) }),
     busy: keep.isPending,
     disabled: phaseEncode === null || recipe.steps.length === 0,
-    kept: keep.data,
+    kept: keep.variables?.recipe === recipe ? keep.data : undefined,
     error: keep.error,
   };
 }

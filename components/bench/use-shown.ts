@@ -5,7 +5,6 @@ import { cyclicTable, divergingTable, greyTable } from '@/components/image/colou
 import { differencePlane } from '@/components/image/difference';
 import type { DisplayPlane } from '@/components/image/display-plane';
 import type { Domain } from '@/components/image/edge-scale';
-import { onKspaceGrid } from '@/components/image/kspace-grid';
 import type { Shown, ShownOf } from '@/components/image/layers';
 import { windowUnderGain, type Window } from '@/components/image/window-level';
 import type { BenchView } from './bench-view';
@@ -19,7 +18,7 @@ interface KspacePair {
 function kspaceOf(planes: Planes | undefined, name: string): KspacePair | null {
   const log = planes?.get(`${name}.log`);
   const phase = planes?.get(`${name}.phase`);
-  return log && phase ? { log: onKspaceGrid(log), phase: onKspaceGrid(phase) } : null;
+  return log && phase ? { log, phase } : null;
 }
 
 const asGrey = (plane: DisplayPlane, window: Window): Shown => ({ plane, table: greyTable(window, plane.low, plane.high) });

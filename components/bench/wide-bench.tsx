@@ -17,8 +17,8 @@ import { useKeepAsTrial } from './use-keep-as-trial';
 const eyeWidth = 412;
 const railWidth = 88;
 /** Header, head and readout of a pane, edge below it, compare bar, numbers; and a recipe with its sliders. */
-const fixedHeight = 48 + 32 + 24 + paneMargins.below + 48 + 44;
-const recipeHeight = 268;
+const fixedHeight = 48 + 32 + 40 + paneMargins.below + 48 + 44;
+const recipeHeight = 252;
 
 export function WideBench() {
   const { colours } = useTheme();
@@ -26,7 +26,7 @@ export function WideBench() {
   const screen = useWindowDimensions();
   const [handWidth, setHandWidth] = useState(screen.width - railWidth - eyeWidth);
   const keep = useKeepAsTrial();
-  const room = { width: (handWidth - space(7)) / 2 - paneMargins.horizontal, height: screen.height - fixedHeight - recipeHeight };
+  const room = { width: (handWidth - space(5)) / 2 - paneMargins.horizontal, height: screen.height - fixedHeight - recipeHeight };
   const size = pictureSize(room, proportionOf(frame));
   return (
     <View style={{ flex: 1, minHeight: 0 }}>
@@ -35,7 +35,7 @@ export function WideBench() {
         <ScrollView style={{ flex: 1, minWidth: 0 }} onLayout={({ nativeEvent }) => setHandWidth(nativeEvent.layout.width)}>
           <Panes size={size} gutter={space(4)} />
           <CompareBar shuttleLength={258} />
-          <NumbersLine />
+          <NumbersLine keep={keep} />
           <BenchNotices keep={keep} />
           <View style={{ paddingHorizontal: space(6), paddingBottom: space(3) }}>
             <RecipePanel look="loom" />

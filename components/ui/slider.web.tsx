@@ -6,7 +6,7 @@ import { useState } from 'react';
 import { View } from 'react-native';
 import { Glyph } from './glyph';
 import { NumberInput } from './number-input';
-import { decimalsOf, fixed } from './number-text';
+import { decimalsOf, fixed, withMinus } from './number-text';
 import type { SliderProps } from './slider';
 import { SliderThread, thumbSide } from './slider-thread';
 import { Text } from './text';
@@ -20,6 +20,9 @@ const rangeRules = `
 .range::-webkit-slider-thumb { -webkit-appearance: none; width: ${thumbSide}px; height: ${touchTarget}px; }
 .range::-moz-range-thumb { width: ${thumbSide}px; height: ${touchTarget}px; border: 0; }
 `;
+
+/** An end of the range without trailing zeros: it is read at a glance, beside the exact value. */
+const shortest = (value: number): string => withMinus(String(Number(value.toFixed(4))));
 
 const fractionOf = (value: number, min: number, max: number): number =>
   max > min ? Math.min(1, Math.max(0, (value - min) / (max - min))) : 0;
@@ -40,11 +43,11 @@ export function Slider(props: SliderProps) {
     <View>
       <View style={{ height: 52, paddingTop: 4 }} onLayout={({ nativeEvent }) => setLength(Math.round(nativeEvent.layout.width))}>
         <View style={{ flexDirection: 'row', alignItems: 'baseline', gap: space(2), zIndex: 1, pointerEvents: 'box-none' }}>
-          <Text variant="mono" numberOfLines={1} style={{ pointerEvents: 'none', flexShrink: 1 }} aria-hidden>
+          <Text variant="mono" numberOfLines={1} style={{ pointerEvents: 'none', flexShrink: 0, maxWidth: '60%' }} aria-hidden>
             {label}
           </Text>
-          <Text variant="small" tone="inkFaint" style={{ pointerEvents: 'none', flexGrow: 1 }} numberOfLines={1} aria-hidden>
-            {`${fixed(min, decimals)} – ${fixed(max, decimals)}`}
+          <Text variant="small" tone="inkFaint" style={{ pointerEvents: 'none', flex: 1, minWidth: 0 }} numberOfLines={1} aria-hidden>
+            {`${shortest(min)} – ${shortest(max)}`}
           </Text>
           <NumberInput
             label={`${label}, ${unit}`}
