@@ -74,7 +74,7 @@ const deepGrey: readonly Ellipse[] = [
   ...pair(tissue.grey - tissue.white, [2.6, 20], [40.5, -2], 5), // insula
   ...pair(tissue.fluid - tissue.white, [1.1, 15], [44.2, -2], 5),
   ...pair(-0.24, [8.4, 3.4], [50, 9.5], 14), // Sylvian fissure
-  ...pair(tissue.fluid - tissue.grey, [8, 0.9], [53.4, 10.4], 14),
+  ...pair(0.7 * (tissue.fluid - tissue.grey), [7.4, 0.8], [53.4, 10.4], 14),
 ];
 
 /** One sulcus at `turn` about the white matter: a bent bay of cortex into it, with a slit of fluid from the surface. */
@@ -82,7 +82,7 @@ function sulcus(turn: number, random: Random): Ellipse[] {
   const edge = { x: white.a * Math.cos(turn), y: white.y + white.b * Math.sin(turn) };
   const normal = Math.atan2(white.a * Math.sin(turn), white.b * Math.cos(turn)) + 0.5 * (random.uniform() - 0.5);
   const bend = 0.5 * (random.uniform() - 0.5);
-  const depth = 8 + 9 * random.uniform();
+  const depth = 6 + 12 * random.uniform();
   const width = 2.1 + 0.8 * random.uniform();
   const inward = (distance: number): [number, number] => [edge.x - distance * Math.cos(normal), edge.y - distance * Math.sin(normal)];
   const degrees = (normal * 180) / Math.PI;
@@ -91,13 +91,13 @@ function sulcus(turn: number, random: Random): Ellipse[] {
   return [
     ellipse(tissue.grey - tissue.white, [depth / 2, width], inward(depth / 2 - 0.8), degrees),
     ellipse(tissue.grey - tissue.white, [3.2, 0.8 * width], tip, degrees + (bend * 360) / Math.PI),
-    ellipse(tissue.fluid - tissue.grey, [depth / 2 + 1.6, 0.5], inward(depth / 2 - 3.4), degrees),
+    ellipse(0.8 * (tissue.fluid - tissue.grey), [depth / 2 + 1.4, 0.55], inward(depth / 2 - 3.4), degrees),
   ];
 }
 
 /** Sulci all around, left and right not alike; the Sylvian fissure and the fold in the middle are left free. */
 function sulci(random: Random): Ellipse[] {
-  const steps = 40;
+  const steps = 44;
   return Array.from({ length: steps }, (_, i) => (360 * (i + 0.3 * (random.uniform() - 0.5))) / steps)
     .filter((degrees) => Math.abs(((degrees + 90) % 180) - 90) > 5 && Math.abs((degrees % 180) - 90) > 8)
     .flatMap((degrees) => sulcus((degrees * Math.PI) / 180, random));
@@ -114,7 +114,7 @@ const texture = (random: Random): Ellipse[] =>
 
 /** Three groups of four bars, 1.8, 1.3 and 0.9 mm wide, as far apart as they are wide. */
 const comb: readonly Ellipse[] = [0.9, 0.65, 0.45].flatMap((half, group) =>
-  Array.from({ length: 4 }, (_, bar) => ellipse(-0.3, [half, 3.4], [20 + 4 * half * bar, -53 + 8.5 * group])),
+  Array.from({ length: 4 }, (_, bar) => ellipse(-0.3, [half, 3.4], [18 + 4 * half * bar, -47 + 8 * group])),
 );
 
 const random = randomOf(5, 'head');
