@@ -25,7 +25,7 @@ export function Door({ then }: { then?: string | undefined }) {
         }}
       >
         <Mark size={72} colour={colours.ink} />
-        <Text variant="display" level={1} style={{ paddingTop: space(5) }}>
+        <Text variant="display" level={1} style={{ paddingTop: 26 }}>
           Pickglass
         </Text>
         <Text tone="inkSoft">{'Find the fault, prove it,\nwrite down what fixed it.'}</Text>

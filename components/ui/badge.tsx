@@ -21,8 +21,8 @@ export function Badge({ glyph, word, tone = 'ink', small = false, strong = false
   return (
     <View
       style={[
-        { flexDirection: 'row', alignItems: 'center', alignSelf: 'flex-start', gap: small ? 6 : 8, minHeight: 20 },
-        stitched ? stitchedLine(colours.ruleStrong) : null,
+        { flexDirection: 'row', alignItems: 'center', gap: small ? 6 : 8, minHeight: 20 },
+        stitched ? [{ alignSelf: 'flex-start' as const }, stitchedLine(colours.ruleStrong)] : null,
       ]}
     >
       <Glyph name={glyph} colour={colours[tone]} />

@@ -19,7 +19,7 @@ interface DialogProps {
 export function Dialog({ title, text, onClose, children, actions }: DialogProps) {
   const { colours } = useTheme();
   const laid = webStyle({
-    backgroundImage: `repeating-linear-gradient(0deg, ${colours.ruleStrong} 0 1px, transparent 1px 4px)`,
+    backgroundImage: `repeating-linear-gradient(0deg, ${colours.rule} 0 1px, transparent 1px 4px)`,
   });
   return (
     <Modal transparent visible animationType="none" onRequestClose={onClose}>

@@ -4,11 +4,10 @@
  */
 import { Link, type Href } from 'expo-router';
 import { useState, type KeyboardEvent, type ReactNode } from 'react';
-import { Pressable, type PressableProps, type StyleProp, type ViewStyle } from 'react-native';
+import { Pressable, StyleSheet, type PressableProps, type StyleProp, type ViewStyle } from 'react-native';
 
 export interface PressState {
   readonly hovered: boolean;
-  readonly pressed: boolean;
 }
 
 export interface PressProps extends Omit<PressableProps, 'style' | 'children' | 'onPress'> {
@@ -23,6 +22,7 @@ export interface PressProps extends Omit<PressableProps, 'style' | 'children' | 
 
 export function Press({ onPress, href, pressOnSpace = false, onKeyDown, style, children, ...rest }: PressProps) {
   const [hovered, setHovered] = useState(false);
+  const state: PressState = { hovered: hovered && !rest.disabled };
   const keys = {
     onKeyDown: (event: KeyboardEvent) => {
       onKeyDown?.(event);
@@ -39,9 +39,9 @@ export function Press({ onPress, href, pressOnSpace = false, onKeyDown, style, c
       {...(onPress ? { onPress: () => onPress() } : {})}
       onHoverIn={() => setHovered(true)}
       onHoverOut={() => setHovered(false)}
-      style={({ pressed }) => style({ hovered: hovered && !rest.disabled, pressed })}
+      style={StyleSheet.flatten(style(state))}
     >
-      {typeof children === 'function' ? ({ pressed }) => children({ hovered: hovered && !rest.disabled, pressed }) : children}
+      {typeof children === 'function' ? children(state) : children}
     </Pressable>
   );
   if (!href) return body;

@@ -7,20 +7,24 @@ export interface CaseColumn {
   readonly width?: number;
   readonly order?: CaseOrder;
   readonly right?: boolean;
+  /** Shown only where the window is at least so wide: the title must not be squeezed. */
+  readonly from?: number;
 }
 
 export const caseColumns = [
-  { id: 'number', head: 'no.', width: 44, order: 'number' },
+  { id: 'number', head: 'no.', width: 36, order: 'number' },
   { id: 'picture', head: '', width: 46 },
   { id: 'title', head: 'what was seen', order: 'title' },
-  { id: 'state', head: 'state', width: 180, order: 'state' },
-  { id: 'scanner', head: 'scanner', width: 108 },
-  { id: 'coil', head: 'coil', width: 92 },
-  { id: 'seen', head: 'kind', width: 112 },
-  { id: 'direction', head: 'runs along', width: 116 },
-  { id: 'assignee', head: 'with', width: 132 },
-  { id: 'age', head: 'age', width: 72, order: 'age', right: true },
+  { id: 'state', head: 'state', width: 172, order: 'state' },
+  { id: 'scanner', head: 'scanner', width: 96 },
+  { id: 'coil', head: 'coil', width: 76, from: 1360 },
+  { id: 'seen', head: 'kind', width: 104 },
+  { id: 'direction', head: 'runs along', width: 76, from: 1360 },
+  { id: 'assignee', head: 'with', width: 152 },
+  { id: 'age', head: 'age', width: 60, order: 'age', right: true },
 ] as const satisfies readonly CaseColumn[];
+
+export const columnsFor = (width: number) => caseColumns.filter((column: CaseColumn) => column.from === undefined || width >= column.from);
 
 export type ColumnId = (typeof caseColumns)[number]['id'];
 export const columnStyle = (column: CaseColumn) =>

@@ -26,7 +26,7 @@ export function CaseRow({ summary, now }: CaseRowProps) {
       aria-label={`${caseNumber(number)} ${title}, ${stateWords[state]}, ${facts}`}
       style={({ hovered }) => ({
         flexDirection: 'row',
-        gap: space(3),
+        gap: 9,
         paddingTop: 11,
         paddingBottom: space(3),
         paddingLeft: gutter.phone - 3,

@@ -1,12 +1,12 @@
 /** The heads of the columns; pressing one orders by it. */
-import { View } from 'react-native';
+import { useWindowDimensions, View } from 'react-native';
 import { Glyph } from '@/components/ui/glyph';
 import { Press } from '@/components/ui/press';
 import { insideBar } from '@/components/ui/stitches';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import { caseColumns, columnStyle, type CaseColumn } from './case-columns';
+import { columnsFor, columnStyle, type CaseColumn } from './case-columns';
 import { orderedBy, type CaseFilters } from './filters';
 
 interface CaseTableHeadProps {
@@ -16,6 +16,7 @@ interface CaseTableHeadProps {
 
 export function CaseTableHead({ filters, onChange }: CaseTableHeadProps) {
   const { colours } = useTheme();
+  const columns = columnsFor(useWindowDimensions().width);
   const headOf = (column: CaseColumn) => {
     const on = column.order !== undefined && column.order === filters.order;
     const words = (
@@ -52,7 +53,7 @@ export function CaseTableHead({ filters, onChange }: CaseTableHeadProps) {
         borderBottomColor: colours.ruleStrong,
       }}
     >
-      {caseColumns.map((column: CaseColumn) => (
+      {columns.map((column: CaseColumn) => (
         <View
           key={column.id}
           role="columnheader"

@@ -1,6 +1,6 @@
 /** A row of the table: a link lies over all of it, the chosen one is held by a weld bar. */
 import type { ReactNode } from 'react';
-import { View } from 'react-native';
+import { useWindowDimensions, View } from 'react-native';
 import { thumbnailOf } from '@/components/api/images';
 import { Picture } from '@/components/ui/picture';
 import { Press } from '@/components/ui/press';
@@ -10,8 +10,8 @@ import { useTheme } from '@/components/ui/theme-context';
 import type { CaseSummary } from '@/server/contract/cases';
 import { ageOf } from '../age';
 import { StateBadge } from '../state-badge';
-import { caseNumber, directionWords, roleWords, sightingWords } from '../words';
-import { caseColumns, columnStyle, type ColumnId } from './case-columns';
+import { caseNumber, roleWords, sightingWords } from '../words';
+import { columnsFor, columnStyle, type ColumnId } from './case-columns';
 
 interface CaseTableRowProps {
   summary: CaseSummary;
@@ -25,6 +25,14 @@ const words = (text: string, faint = false): ReactNode => (
   </Text>
 );
 
+const shortDirection: Record<CaseSummary['direction'], string> = {
+  'phase-encode': 'phase',
+  'frequency-encode': 'readout',
+  both: 'both',
+  none: 'none',
+  unknown: '',
+};
+
 const cellsOf = (summary: CaseSummary, now: number): Record<ColumnId, ReactNode> => ({
   number: <Text variant="label">{caseNumber(summary.number)}</Text>,
   picture: <Picture source={summary.pictureImageId ? thumbnailOf(summary.pictureImageId) : null} alt="" size={40} />,
@@ -37,13 +45,14 @@ const cellsOf = (summary: CaseSummary, now: number): Record<ColumnId, ReactNode>
   scanner: words(summary.scanner?.name ?? 'not said', summary.scanner === null),
   coil: words(summary.coil?.name ?? '', true),
   seen: words(summary.seen.map((sighting) => sightingWords[sighting]).join(', ')),
-  direction: words(summary.direction === 'unknown' ? '' : directionWords[summary.direction], true),
+  direction: words(shortDirection[summary.direction], true),
   assignee: summary.assignee ? words(summary.assignee.name || roleWords[summary.assignee.role]) : words('nobody yet', true),
   age: words(ageOf(summary.openedAt, now)),
 });
 
 export function CaseTableRow({ summary, chosen, now }: CaseTableRowProps) {
   const { colours } = useTheme();
+  const columns = columnsFor(useWindowDimensions().width);
   const cells = cellsOf(summary, now);
   return (
     <View role="row" aria-selected={chosen} style={{ height: 54 }}>
@@ -72,7 +81,7 @@ export function CaseTableRow({ summary, chosen, now }: CaseTableRowProps) {
           borderBottomColor: colours.rule,
         }}
       >
-        {caseColumns.map((column) => (
+        {columns.map((column) => (
           <View key={column.id} role="cell" style={columnStyle(column)}>
             {cells[column.id]}
           </View>

@@ -65,7 +65,7 @@ export function CasesScreen({ params, onParams }: CasesScreenProps) {
             )
           }
         >
-          {wide ? search : null}
+          {wide ? <View style={{ flex: 1, marginLeft: space(6) }}>{search}</View> : null}
         </PageHead>
       }
     >

@@ -6,11 +6,12 @@ interface FileButtonProps {
   label: string;
   kind?: ButtonKind;
   grow?: boolean;
+  tall?: boolean;
   busy?: boolean | number;
   onFiles: (files: File[]) => void;
 }
 
-export function FileButton({ label, kind = 'quiet', grow = false, busy = false, onFiles }: FileButtonProps) {
+export function FileButton({ label, kind = 'quiet', grow = false, tall = false, busy = false, onFiles }: FileButtonProps) {
   const input = useRef<HTMLInputElement>(null);
   return (
     <>
@@ -27,7 +28,7 @@ export function FileButton({ label, kind = 'quiet', grow = false, busy = false, 
           if (files.length > 0) onFiles(files);
         }}
       />
-      <Button label={label} kind={kind} grow={grow} busy={busy} onPress={() => input.current?.click()} />
+      <Button label={label} kind={kind} grow={grow} tall={tall} busy={busy} onPress={() => input.current?.click()} />
     </>
   );
 }

@@ -14,7 +14,10 @@ import { Notice } from '@/components/ui/notice';
 import { Screen } from '@/components/ui/screen';
 import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
+import { useTheme } from '@/components/ui/theme-context';
+import { useLayout } from '@/components/ui/use-layout';
 import type { Image } from '@/server/contract/images';
+import { DraftAside } from './draft-aside';
 import { emptyDraft, newCaseFrom, type Draft } from './draft';
 import { ImageStep } from './image-step';
 import { SeeStep } from './see-step';
@@ -50,6 +53,7 @@ export function NewCaseScreen({ memberId, scannerId }: NewCaseScreenProps) {
   const router = useRouter();
   const form = useDraft(memberId, { scannerId });
   const { draft } = form;
+  const { colours } = useTheme();
   const [step, setStep] = useState<Step>('images');
   const scanners = useScanners();
   const firstImage = useImage(draft.images[0] ?? null);
@@ -84,9 +88,9 @@ export function NewCaseScreen({ memberId, scannerId }: NewCaseScreenProps) {
   };
   const next = steps[steps.indexOf(step) + 1];
   const count = draft.images.length;
-  const onward =
-    step === 'images' ? (count === 0 ? 'go on without an image' : `go on with ${count} ${count === 1 ? 'image' : 'images'}`) : 'go on';
+  const onward = step === 'images' ? (count === 0 ? 'no image yet' : `go on with ${count} ${count === 1 ? 'image' : 'images'}`) : 'go on';
   const busy = create.isPending;
+  const wide = useLayout() === 'wide';
   return (
     <Screen
       title="New case"
@@ -104,41 +108,44 @@ export function NewCaseScreen({ memberId, scannerId }: NewCaseScreenProps) {
               </Text>
             }
           />
-          <StepTabs step={step} onChange={setStep} />
+          <StepTabs step={step} onChange={setStep} even={!wide} />
         </>
       }
       actions={
         <ActionBar>
           {next ? <Button label="save as it is" busy={busy} disabled={intake.progress !== null} onPress={save} /> : null}
           {next ? (
-            <Button label={onward} kind="first" grow onPress={() => setStep(next)} />
+            <Button label={onward} kind="first" grow={!wide} onPress={() => setStep(next)} />
           ) : (
-            <Button label="file the case" kind="first" grow busy={busy} onPress={save} />
+            <Button label="file the case" kind="first" grow={!wide} busy={busy} onPress={save} />
           )}
         </ActionBar>
       }
     >
-      <View style={{ width: '100%', maxWidth: 720 }}>
-        {form.restored && form.keptAt !== null && step === 'images' ? (
-          <View style={{ padding: gutter.phone }}>
-            <Notice kind="waiting" text="An unfinished draft is back." action={<LinkText label="start anew" onPress={form.forget} />} />
-          </View>
-        ) : null}
-        {create.error ? (
-          <View style={{ padding: gutter.phone }}>
-            <Notice kind="failed" text={create.error.message} />
-          </View>
-        ) : null}
-        {step === 'images' ? (
-          <ImageStep
-            form={form}
-            intake={intake}
-            suggestion={suggestion}
-            scannerFromHeader={named !== undefined && named.id === draft.scannerId}
-          />
-        ) : null}
-        {step === 'see' ? <SeeStep form={form} /> : null}
-        {step === 'tried' ? <TriedStep form={form} suggestion={suggestion} /> : null}
+      <View style={wide ? { flexGrow: 1, flexDirection: 'row' } : null}>
+        <View style={wide ? { width: 720, borderRightWidth: 1, borderRightColor: colours.rule } : null}>
+          {form.restored && form.keptAt !== null && step === 'images' ? (
+            <View style={{ padding: gutter.phone }}>
+              <Notice kind="waiting" text="An unfinished draft is back." action={<LinkText label="start anew" onPress={form.forget} />} />
+            </View>
+          ) : null}
+          {create.error ? (
+            <View style={{ padding: gutter.phone }}>
+              <Notice kind="failed" text={create.error.message} />
+            </View>
+          ) : null}
+          {step === 'images' ? (
+            <ImageStep
+              form={form}
+              intake={intake}
+              suggestion={suggestion}
+              scannerFromHeader={named !== undefined && named.id === draft.scannerId}
+            />
+          ) : null}
+          {step === 'see' ? <SeeStep form={form} /> : null}
+          {step === 'tried' ? <TriedStep form={form} suggestion={suggestion} /> : null}
+        </View>
+        {wide ? <DraftAside draft={draft} suggestion={suggestion} scanner={scanner} /> : null}
       </View>
     </Screen>
   );

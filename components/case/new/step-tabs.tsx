@@ -6,6 +6,12 @@ export type Step = (typeof steps)[number];
 
 const words: Record<Step, string> = { images: '1 images', see: '2 what you see', tried: '3 what was tried' };
 
-export function StepTabs({ step, onChange }: { step: Step; onChange: (step: Step) => void }) {
-  return <Tabs label="steps" even value={step} onChange={onChange} tabs={steps.map((value) => ({ value, label: words[value] }))} />;
+interface StepTabsProps {
+  step: Step;
+  onChange: (step: Step) => void;
+  even: boolean;
+}
+
+export function StepTabs({ step, onChange, even }: StepTabsProps) {
+  return <Tabs label="steps" even={even} value={step} onChange={onChange} tabs={steps.map((value) => ({ value, label: words[value] }))} />;
 }

@@ -32,7 +32,7 @@ export function AddImage({ caseId }: { caseId: string }) {
             onChange={(id) => setRole(imageRoles.find((other) => other === id) ?? 'comparison')}
           />
         </View>
-        <FileButton label="choose a file" busy={intake.progress?.done ?? false} onFiles={intake.take} />
+        <FileButton label="choose a file" tall busy={intake.progress?.done ?? false} onFiles={intake.take} />
       </View>
       {intake.progress ? <ProgressThread {...intake.progress} /> : null}
       {failure ? <Notice kind="failed" text={failure.message} /> : null}

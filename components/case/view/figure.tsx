@@ -30,7 +30,7 @@ export function Figure({ source, alt, size, lines, phaseEncode, edge = 'phase en
   const side = upright ? size - ladderThickness : size;
   return (
     <View role="figure" aria-label={alt} style={{ width: size + (simulated ? 18 : 0) }}>
-      <View style={{ flexDirection: 'row', height: size + (upright ? 0 : ladderThickness) }}>
+      <View style={{ flexDirection: 'row', height: upright ? side : size + ladderThickness }}>
         {upright ? <Ladder length={side} lines={lines} upright word={edge} /> : null}
         <View>
           <View style={{ flexDirection: 'row' }}>

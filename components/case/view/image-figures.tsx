@@ -1,11 +1,11 @@
 /** An image of a case and, beside it, its k-space: the transform of a magnitude image, which is not raw data. */
 import { View } from 'react-native';
 import { thumbnailOf, useImage } from '@/components/api/images';
-import { LoadingWarp } from '@/components/ui/loading-warp';
 import { ProblemNotice } from '@/components/ui/problem-notice';
 import { space } from '@/components/ui/theme';
 import type { Case } from '@/server/contract/cases';
 import { imageRoleWords } from '../words';
+import { EmptyFrame } from './empty-frame';
 import { Figure } from './figure';
 
 interface ImageFiguresProps {
@@ -19,7 +19,7 @@ const kspaceRole = { word: 'its k-space', glyph: 'image', tone: 'matInk' } as co
 export function ImageFigures({ image: { imageId, role }, size, withKspace }: ImageFiguresProps) {
   const { data: image, error, refetch } = useImage(imageId);
   if (error) return <ProblemNotice error={error} onRetry={() => void refetch()} />;
-  if (!image) return <LoadingWarp what="fetching the image" rows={1} />;
+  if (!image) return <EmptyFrame size={size} />;
   const { seriesNumber, instanceNumber, phaseEncode } = image.acquisition;
   const place = [
     seriesNumber.value === null ? '' : `series ${seriesNumber.value}`,

@@ -13,7 +13,7 @@ interface SectionProps {
 export function Section({ title, aside, children }: SectionProps) {
   return (
     <View role="region" aria-label={title}>
-      <View style={{ flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', minHeight: 44, paddingTop: space(3) }}>
+      <View style={{ flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', minHeight: 56, paddingTop: space(3) }}>
         <Text variant="heading" level={2}>
           {title}
         </Text>

@@ -5,7 +5,7 @@ import { LoadingWarp } from '@/components/ui/loading-warp';
 import { ProblemNotice } from '@/components/ui/problem-notice';
 import type { CaseEvent } from '@/server/contract/case-parts';
 import { dayOf } from '../age';
-import { roleWords, stateWords } from '../words';
+import { stateWords } from '../words';
 import { Section } from './section';
 import { Trail } from './trail';
 
@@ -65,7 +65,7 @@ export function TimelineSection({ caseId, openedAt }: TimelineSectionProps) {
           knots={data.map((event) => ({
             id: event.id,
             glyph: event.kind === 'state-changed' && event.to ? event.to : glyphs[event.kind],
-            when: `${dayOf(event.at, openedAt)} · ${event.actor.name}, ${roleWords[event.actor.role]}`,
+            when: `${dayOf(event.at, openedAt)} · ${event.actor.name}`,
             text: sentenceOf(event),
           }))}
         />

@@ -82,10 +82,12 @@ export function TrialRow({ caseId, trial, words, wide }: TrialRowProps) {
           {trial.number} {words}
         </Text>
         <Badge glyph="simulated" word="simulated" tone="orchil" small />
-        <Text variant="small">
-          NRMSE {threeFigures(nrmse)} SSIM {threeFigures(ssim)}
-        </Text>
-        <View style={{ marginVertical: -10 }}>{open}</View>
+        <View style={{ flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between' }}>
+          <Text variant="small">
+            NRMSE {threeFigures(nrmse)} SSIM {threeFigures(ssim)}
+          </Text>
+          <View style={{ marginVertical: -14 }}>{open}</View>
+        </View>
       </View>
     </View>
   );
