@@ -4,12 +4,14 @@
  */
 const crossover = 12;
 
-/** Σ (−1)^m (x/2)^(2m+1) / (m! (m+1)!). The largest term is about exp(x)/(2πx), so that rounding costs 1e-12 at the crossover. */
+/** Σ (−1)^m (x/2)^(2m+1) / (m! (m+1)!). The largest term is about exp(x)/(2πx), so that rounding costs 1e-12 at the crossover; after
+ *  8 + 2x terms the next is below 1e-18. */
 function series(x: number): number {
   const half = x / 2;
   let term = half;
   let sum = half;
-  for (let m = 1; Math.abs(term) > 1e-17 * Math.abs(sum) || m < 8; m++) {
+  const nTerms = 8 + 2 * x;
+  for (let m = 1; m < nTerms; m++) {
     term *= -(half * half) / (m * (m + 1));
     sum += term;
   }
@@ -22,8 +24,8 @@ function asymptotic(x: number): number {
   let p = 1;
   let q = 0;
   for (let k = 1; ; k++) {
-    const next = (term * (4 - (2 * k - 1) ** 2)) / (8 * k * x);
-    if (Math.abs(next) >= Math.abs(term) || Math.abs(next) < 1e-17) break;
+    const next = (term * (4 - (2 * k - 1) * (2 * k - 1))) / (8 * k * x);
+    if (next * next >= term * term || next * next < 1e-34) break;
     term = next;
     const sign = k % 4 < 2 ? 1 : -1;
     if (k % 2 === 0) p += sign * term;
