@@ -43,15 +43,10 @@ const graceMs = 500;
 const longestQueue = 256;
 
 export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
-  const pool = new Piscina({
-    filename: files.simulate,
-    execArgv: files.execArgv,
-    minThreads: threads,
-    maxThreads: threads,
-    maxQueue: longestQueue,
-    // The environment of the server holds its secrets; a worker needs none of it.
-    env: {},
-  });
+  // The environment of the server holds its secrets; a worker needs none of it.
+  const shared = { execArgv: files.execArgv, env: {} };
+  const pool = new Piscina({ ...shared, filename: files.simulate, minThreads: threads, maxThreads: threads, maxQueue: longestQueue });
+  const reader = openReader(new Piscina({ ...shared, filename: files.readDicom, minThreads: 1, maxThreads: 1 }));
   const run = async <Result>(job: SimulateJob | TrialJob | PixelsJob | ThumbnailJob, gone?: AbortSignal): Promise<Result> => {
     gone?.throwIfAborted();
     const stop = gone && afterGrace(gone);
@@ -66,14 +61,36 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
     trial: run<TrialResult>,
     pixels: run<Planes>,
     thumbnail: run<ThumbnailResult>,
-    async readDicom(bytes, limitMs) {
-      const signal = AbortSignal.timeout(limitMs);
-      try {
-        return (await pool.run(bytes, { filename: files.readDicom, signal })) as Read;
-      } catch (error) {
-        if (signal.aborted) return undefined;
-        throw error;
-      }
+    readDicom: reader.read,
+    threads: () => pool.threads.length + reader.threads(),
+    async close() {
+      await Promise.all([pool.destroy(), reader.close()]);
+    },
+  };
+}
+
+/** A thread of its own for files, so that a long upload holds up no slider. It gets one file at a time: the limit is for reading one,
+ *  and not for waiting behind others. */
+function openReader(pool: Piscina) {
+  let last: Promise<unknown> = Promise.resolve();
+  const readNow = async (bytes: Uint8Array, limitMs: number): Promise<Read | undefined> => {
+    const signal = AbortSignal.timeout(limitMs);
+    try {
+      return (await pool.run(bytes, { signal })) as Read;
+    } catch (error) {
+      if (signal.aborted) return undefined;
+      throw error;
+    }
+  };
+  return {
+    read(bytes: Uint8Array, limitMs: number): Promise<Read | undefined> {
+      const reading = last.then(() => readNow(bytes, limitMs));
+      // What becomes of one file is told to its own caller; the next one only waits for its end.
+      last = reading.then(
+        () => undefined,
+        () => undefined,
+      );
+      return reading;
     },
     threads: () => pool.threads.length,
     close: () => pool.destroy(),

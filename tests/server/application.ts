@@ -56,11 +56,20 @@ export interface Application {
   close(): Promise<void>;
 }
 
-/** `variables` override the environment, `through` sends the database's connections elsewhere. */
+/** Stands for the departments where a test wants an empty database. */
+const nobody: Seeded = {
+  departmentId: '',
+  members: { technologist: '', 'lead-technologist': '', physicist: '', administrator: '' },
+  scannerId: '',
+  coilId: '',
+};
+
+/** `variables` override the environment, `through` sends the database's connections elsewhere, unless `seeded` nobody is in it. */
 export async function openApplication({
   variables = {},
   through = (url) => url,
-}: { variables?: Record<string, string>; through?: (url: string) => string } = {}): Promise<Application> {
+  seeded = true,
+}: { variables?: Record<string, string>; through?: (url: string) => string; seeded?: boolean } = {}): Promise<Application> {
   const database = await createDatabase();
   await migrateDatabase(database.url, join(project, 'drizzle'));
   const dataFolder = await mkdtemp(join(tmpdir(), 'pickglass-test-'));
@@ -86,8 +95,8 @@ export async function openApplication({
   const objectPaths = async () => (await readdir(objectFolder, { recursive: true, withFileTypes: true })).filter((entry) => entry.isFile());
   return {
     ...{ app, deps, databaseUrl: database.url },
-    own: await seed(deps, 'own'),
-    other: await seed(deps, 'other'),
+    own: seeded ? await seed(deps, 'own') : nobody,
+    other: seeded ? await seed(deps, 'other') : nobody,
     async as(role, department = 'own') {
       const agent = request.agent(app);
       await agent

@@ -53,7 +53,7 @@ async function openDoor() {
 
 it('says that server, database and workers are up', async () => {
   const answer = await request(application.app).get('/api/health').expect(200);
-  expect(answer.body).toEqual({ status: 'ok', version: '0.0.0-test', database: 'ok', workers: 1 });
+  expect(answer.body).toEqual({ status: 'ok', version: '0.0.0-test', database: 'ok', workers: 2 });
 });
 
 it('says that the database is away, on health and on everything that needs it, and recovers by itself', async () => {
