@@ -2,12 +2,12 @@
  * `npm run dev`: client and server with reload on one origin. Metro serves the client and passes /api on to the server, which tsx
  * restarts when one of its sources changes. The database is the one of `npm start`. Ctrl-C stops all three.
  */
-import { mkdirSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { freePort } from '../db/cluster.mjs';
 import { copyCanvasKit, expoEnvironment, expoProgram } from './set-up/client.mjs';
 import { startCompanion } from './set-up/companion.mjs';
+import { makeDataFolder } from './set-up/data-folder.mjs';
 import { openProductDatabase } from './set-up/database.mjs';
 import { live } from './set-up/lifetime.mjs';
 import { ensurePackages } from './set-up/packages.mjs';
@@ -21,7 +21,7 @@ const dataFolder = resolve(process.env.PICKGLASS_DATA || join(root, '.pickglass'
 async function develop({ signal, atEnd, fail }) {
   const { port, note } = await choosePort(process.env.PORT, '127.0.0.1');
   if (note !== undefined) console.log(note);
-  mkdirSync(dataFolder, { recursive: true, mode: process.getuid?.() === 0 ? 0o711 : 0o700 });
+  makeDataFolder(dataFolder);
   await step('packages', () => ensurePackages(root, signal));
   await copyCanvasKit(root, signal);
   const database = await step('database', () => openProductDatabase(dataFolder));

@@ -1,8 +1,9 @@
 /** `npm start`: makes a bare checkout run, on plain Node.js without a package. Each step says what it did and how long it took. */
-import { existsSync, mkdirSync, readFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { buildClient } from './set-up/client.mjs';
+import { makeDataFolder } from './set-up/data-folder.mjs';
 import { openProductDatabase } from './set-up/database.mjs';
 import { live } from './set-up/lifetime.mjs';
 import { ensurePackages } from './set-up/packages.mjs';
@@ -20,8 +21,7 @@ async function start({ signal, atEnd, fail }) {
   const host = process.env.HOST || '127.0.0.1';
   const { port, note } = await choosePort(process.env.PORT, host);
   if (note !== undefined) console.log(note);
-  // Open to pass through, because PostgreSQL runs as another user when we are root; what lies in it is closed.
-  mkdirSync(dataFolder, { recursive: true, mode: process.getuid?.() === 0 ? 0o711 : 0o700 });
+  makeDataFolder(dataFolder);
 
   await step('packages', () => ensurePackages(root, signal));
   const program = await step('server', () => buildServer(root));

@@ -5,11 +5,11 @@
  * `npm test -- recon browser` runs those projects only; any other word is a pattern for paths of test files. The last line counts.
  */
 import { spawn } from 'node:child_process';
-import { chmodSync, existsSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { existsSync, readFileSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { openCluster } from '../db/cluster.mjs';
+import { temporaryDataFolder } from '../server/set-up/data-folder.mjs';
 import { findProgram, installDebianPackage } from '../server/set-up/debian.mjs';
 import { ensurePackages } from '../server/set-up/packages.mjs';
 import { findOrInstallPostgres } from '../server/set-up/postgres.mjs';
@@ -96,9 +96,7 @@ async function runEverything(folder) {
 }
 
 async function main() {
-  const folder = mkdtempSync(join(tmpdir(), 'pickglass-test-'));
-  // PostgreSQL runs as another user when we are root, and passes through.
-  chmodSync(folder, 0o711);
+  const folder = temporaryDataFolder('test');
   try {
     const counts = await runEverything(folder);
     const sum = (/** @type {keyof Counts} */ name) => counts.reduce((total, one) => total + one[name], 0);

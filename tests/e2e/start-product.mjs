@@ -3,20 +3,17 @@
  * PICKGLASS_URL names one that runs; then PICKGLASS_DATA names its data folder.
  */
 import { spawn } from 'node:child_process';
-import { chmodSync, mkdtempSync } from 'node:fs';
-import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { createInterface } from 'node:readline';
 import { fileURLToPath } from 'node:url';
+import { temporaryDataFolder } from '../../server/set-up/data-folder.mjs';
 import { keepProduct } from './kept-product.mjs';
 
 const script = join(dirname(fileURLToPath(import.meta.url)), '..', '..', 'server', 'start.mjs');
 
 export default async function startProduct() {
   if (process.env.PICKGLASS_URL !== undefined) return;
-  const data = mkdtempSync(join(tmpdir(), 'pickglass-browser-'));
-  // PostgreSQL runs as another user when we are root, and passes through.
-  chmodSync(data, 0o711);
+  const data = temporaryDataFolder('browser');
   // Empty is as good as unset: whatever the caller's shell says, the product gets a database of its own.
   const env = { ...process.env, PORT: '0', PICKGLASS_DATA: data, DATABASE_URL: '' };
   const child = spawn(process.execPath, [script], { env, stdio: ['ignore', 'pipe', 'inherit'] });

@@ -1,0 +1,16 @@
+/** `npm run bench`: measures every figure and prints a table; with `-- --json` the last line is one JSON object for programs. */
+import { jsonOf, tableOf } from './figure';
+import { previewFigures } from './preview';
+import { requestFigures } from './request';
+import { transformFigures } from './transform';
+
+async function run(): Promise<void> {
+  const figures = [...(await transformFigures()), ...(await previewFigures()), ...(await requestFigures())];
+  console.log(tableOf(figures));
+  if (process.argv.includes('--json')) console.log(jsonOf(figures, new Date()));
+}
+
+run().catch((error: unknown) => {
+  console.error(error);
+  process.exitCode = 1;
+});
