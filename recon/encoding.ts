@@ -29,7 +29,7 @@ export const sliceThickness = (pulseBandwidth: number, gradient: number): number
 export const fatShiftPixels = (imagingFrequency: number, bandwidthPerPixel: number): number =>
   (fatShift * imagingFrequency) / bandwidthPerPixel;
 
-/** Time to read one line: n samples of a bandwidth of n pixels take 1/BW per pixel. */
+/** Seconds to read one line: to tell frequencies of one bandwidth per pixel apart takes the time 1/BW, whatever the matrix. */
 export const readoutTime = (bandwidthPerPixel: number): number => 1 / bandwidthPerPixel;
 
 /** Where the first ghost of a motion falls, as a part of the phase field of view from −½ to ½: frac(TR·averages·f).
