@@ -4,6 +4,7 @@ import compression from 'compression';
 import express, { type Express, type RequestHandler } from 'express';
 import helmet from 'helmet';
 import { AppError } from './errors';
+import { preferCompressed, withoutCompression } from './precompressed';
 
 /** Headers on every answer. CanvasKit is WebAssembly, which needs `wasm-unsafe-eval`; nothing is loaded from another origin. */
 export const protect = (secure: boolean): RequestHandler =>
@@ -55,10 +56,10 @@ export function serveClient(app: Express, folder: string): void {
   const files = express.static(folder, {
     index: false,
     setHeaders: (response, path) => {
-      response.setHeader('Cache-Control', hashed.test(path) ? `public, max-age=${year}, immutable` : 'no-cache');
+      response.setHeader('Cache-Control', hashed.test(withoutCompression(path)) ? `public, max-age=${year}, immutable` : 'no-cache');
     },
   });
-  app.use(files);
+  app.use(preferCompressed(folder), files);
   app.get('/{*splat}', (request, response, next) => {
     if (request.path.startsWith('/api/')) {
       next();
