@@ -1,6 +1,6 @@
 /** The catalogue as plain objects, in the shape that goes over the wire: what forms, swatches and recipes are built from. */
 import type { Acquisition } from './acquisition';
-import type { Cause, Reconstruction, Remedy, Source } from './cause';
+import type { Cause, Driver, Reconstruction, Remedy, Sighting, Source } from './cause';
 import { initialOf } from './initial';
 import type { Parameter, Parameters } from './parameter';
 
@@ -28,6 +28,10 @@ export interface DescribedReconstruction {
 
 export interface DescribedCause extends DescribedReconstruction {
   stage: Cause['stage'];
+  seen: Sighting[];
+  runsAlong: Cause['runsAlong'];
+  formula: string;
+  drivers: Driver[];
   needsObjectPhase: boolean;
   remedies: Remedy[];
 }
@@ -51,6 +55,10 @@ export const describeCause = (cause: Cause, acquisition?: Acquisition): Describe
   id: cause.id,
   title: cause.title,
   stage: cause.stage,
+  seen: [...cause.seen],
+  runsAlong: cause.runsAlong,
+  formula: cause.formula,
+  drivers: cause.drivers.map((driver) => ({ ...driver })),
   parameters: describeParameters(cause.parameters, acquisition),
   looks: { ...cause.looks },
   needsObjectPhase: cause.needsObjectPhase === true,

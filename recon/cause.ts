@@ -1,6 +1,6 @@
 /**
- * A cause of a bad image: one file each in `causes/`, one `defineCause` each. The stage fixes what `apply` works on and when it
- * acts: causes combine in the order of the signal chain, never in the order of clicks.
+ * A cause of a bad image: one file each in `causes/`, one `defineCause` each. `domain` fixes what `apply` works on; the order of
+ * the list in `causes/index.ts` is that of the signal chain and fixes when it acts, never the order of clicks.
  */
 import type { Acquisition } from './acquisition';
 import type { ComplexPlane } from './grid';
@@ -43,7 +43,23 @@ interface Described<P extends Parameters> {
   readonly sources: readonly Source[];
 }
 
+/** What a user sees; the words of a report. */
+export type Sighting = 'ghosts' | 'fold-in' | 'lines' | 'shading' | 'distortion' | 'blur' | 'noise' | 'signal-loss' | 'other';
+
+/** A scan fact that drives the cause, and how. */
+export interface Driver {
+  readonly fact: string;
+  readonly does: string;
+}
+
 interface CauseBase<P extends Parameters> extends Described<P> {
+  /** Where in the signal chain the cause belongs, as a user reads it. */
+  readonly stage: 'object' | 'encoding' | 'receive';
+  readonly seen: readonly Sighting[];
+  readonly runsAlong: 'phase-encode' | 'readout' | 'both' | 'none';
+  /** The model, in TeX. */
+  readonly formula: string;
+  readonly drivers: readonly Driver[];
   readonly remedies: readonly Remedy[];
   /** The bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
   readonly needsObjectPhase?: boolean;
@@ -53,19 +69,19 @@ interface CauseBase<P extends Parameters> extends Described<P> {
   readonly identity?: ValuesOf<P>;
 }
 
-/** Acts on the object before encoding, [row, column] complex image. */
-export interface ObjectCause<P extends Parameters = Parameters> extends CauseBase<P> {
-  readonly stage: 'object';
+/** Acts on the complex image before it is encoded, [row, column]. */
+export interface ImageCause<P extends Parameters = Parameters> extends CauseBase<P> {
+  readonly domain: 'image';
   apply(object: ComplexPlane, parameters: ValuesOf<P>, context: Context): ComplexPlane;
 }
 
-/** Acts on k-space while or after it is sampled. */
-export interface SamplingCause<P extends Parameters = Parameters> extends CauseBase<P> {
-  readonly stage: 'encoding' | 'receive';
+/** Acts on k-space, line by line or as a whole, while or after it is sampled: also what moves between lines. */
+export interface KspaceCause<P extends Parameters = Parameters> extends CauseBase<P> {
+  readonly domain: 'kspace';
   apply(kspace: Encoded, parameters: ValuesOf<P>, context: Context): Encoded;
 }
 
-export type Cause<P extends Parameters = Parameters> = ObjectCause<P> | SamplingCause<P>;
+export type Cause<P extends Parameters = Parameters> = ImageCause<P> | KspaceCause<P>;
 
 /** Reconstruction: k-space as acquired to a complex image. */
 export interface Reconstruction<P extends Parameters = Parameters> extends Described<P> {

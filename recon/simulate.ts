@@ -1,5 +1,5 @@
 /**
- * The forward model: object phase → object causes → Fourier → encoding causes → receive causes → reconstruction → magnitude.
+ * The forward model: object phase → causes that act on the image → Fourier → causes that act on k-space → reconstruction → magnitude.
  * Steps may stand in any order in a recipe; they act in the order of the list of causes, which is that of the signal chain. Two steps
  * of one cause act in the order of the recipe.
  */
@@ -84,11 +84,11 @@ export function simulate(object: ComplexPlane | PreparedObject, recipe: Recipe, 
   const actions = actionsOf(complete, acquisition);
   let changed = prepared.object;
   for (const { cause, parameters, context } of actions) {
-    if (cause.stage === 'object') changed = cause.apply(changed, parameters, context);
+    if (cause.domain === 'image') changed = cause.apply(changed, parameters, context);
   }
   let kspace = fullyTaken(changed === prepared.object ? prepared.kspace() : transform(changed));
   for (const { cause, parameters, context } of actions) {
-    if (cause.stage !== 'object') kspace = cause.apply(kspace, parameters, context);
+    if (cause.domain === 'kspace') kspace = cause.apply(kspace, parameters, context);
   }
   const context = { acquisition, random: randomOf(complete.seed, method.id) };
   const image = magnitude(method.reconstruct(kspace, complete.reconstruction.parameters, context));

@@ -1,8 +1,6 @@
-/** The order in which the steps of a recipe act: the signal chain, whatever the order of the clicks. */
-import type { Cause, CatalogueParameter, Stage } from '@/server/contract/catalogue';
+/** The order in which the steps of a recipe act: that of the catalogue, which is the signal chain, whatever the order of the clicks. */
+import type { Cause, CatalogueParameter } from '@/server/contract/catalogue';
 import type { Recipe, RecipeStep } from '@/server/contract/recipe';
-
-const chain: readonly Stage[] = ['object', 'encoding', 'receive', 'reconstruction'];
 
 export interface PlacedStep {
   /** Index within the recipe as it is stored. */
@@ -11,13 +9,13 @@ export interface PlacedStep {
   readonly cause: Cause;
 }
 
-/** The steps in physical order; steps of one stage keep the order in which they were added. Unknown causes are left out. */
+/** The steps in physical order; steps of one cause keep the order in which they were added. Unknown causes are left out. */
 export function inPhysicalOrder(recipe: Recipe, causes: readonly Cause[]): PlacedStep[] {
   const placed = recipe.steps.flatMap((step, index) => {
     const cause = causes.find(({ id }) => id === step.cause);
     return cause ? [{ index, step, cause }] : [];
   });
-  return placed.sort((a, b) => chain.indexOf(a.cause.stage) - chain.indexOf(b.cause.stage) || a.index - b.index);
+  return placed.sort((a, b) => causes.indexOf(a.cause) - causes.indexOf(b.cause) || a.index - b.index);
 }
 
 /** Every parameter at its initial value: the header's where the server filled it from there. */

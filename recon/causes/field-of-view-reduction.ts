@@ -38,6 +38,15 @@ export const fieldOfViewReduction = defineCause({
   id: 'field-of-view-reduction',
   title: 'Wrap-around',
   stage: 'encoding',
+  domain: 'kspace',
+  seen: ['fold-in'],
+  runsAlong: 'phase-encode',
+  formula: String.raw`I'(y) = \sum_m I(y + m\, r N),\quad |y| < r N / 2`,
+  drivers: [
+    { fact: 'Percent phase field of view', does: 'is the fraction r of the full field of view' },
+    { fact: 'Phase-encode axis', does: 'sets the side from which anatomy folds in' },
+    { fact: 'Phase oversampling', does: 'moves the fold outside the picture' },
+  ],
   needsObjectPhase: true,
   changesMatrix: true,
   parameters: {

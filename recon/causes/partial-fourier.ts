@@ -11,6 +11,14 @@ export const partialFourier = defineCause({
   id: 'partial-fourier',
   title: 'Partial Fourier',
   stage: 'encoding',
+  domain: 'kspace',
+  seen: ['blur', 'lines', 'signal-loss'],
+  runsAlong: 'phase-encode',
+  formula: String.raw`K'(k_y) = \begin{cases} K(k_y) & k_y \ge -(2f - 1)\,N/2 \\ 0 & \text{else} \end{cases}`,
+  drivers: [
+    { fact: 'Partial Fourier fraction', does: 'is f; the band 2f − 1 about the centre is complete on both sides' },
+    { fact: 'TE and sequence', does: 'set how fast the phase of the object varies, and so how much the reconstruction loses' },
+  ],
   needsObjectPhase: true,
   parameters: {
     fraction: quantity({

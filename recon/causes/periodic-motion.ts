@@ -21,7 +21,16 @@ export const lineInterval = ({ repetitionTime, averages }: Acquisition): number 
 export const periodicMotion = defineCause({
   id: 'periodic-motion',
   title: 'Periodic motion',
-  stage: 'encoding',
+  stage: 'object',
+  domain: 'kspace',
+  seen: ['ghosts'],
+  runsAlong: 'phase-encode',
+  formula: String.raw`K'(k_x, n) = K(k_x, n)\, e^{\,i a \sin(2\pi f T n + \varphi)},\quad T = T_R \, N_{\mathrm{avg}}`,
+  drivers: [
+    { fact: 'TR × averages', does: 'sets how far apart the copies lie: frac(TR × averages × frequency) of the phase field of view' },
+    { fact: 'Phase-encode axis', does: 'sets the direction in which the copies run' },
+    { fact: 'Acceleration', does: 'divides the distance of the copies by R' },
+  ],
   parameters: {
     frequency: quantity({ label: 'Frequency', unit: 'Hz', min: 0.05, max: 3, step: 0.005, initial: 0.25 }),
     phaseSwing: quantity({ label: 'Phase swing', unit: 'rad', min: 0, max: 2, step: 0.01, initial: 0.6 }),

@@ -10,6 +10,14 @@ export const uniformUndersampling = defineCause({
   id: 'uniform-undersampling',
   title: 'Skipped lines',
   stage: 'encoding',
+  domain: 'kspace',
+  seen: ['fold-in', 'ghosts'],
+  runsAlong: 'phase-encode',
+  formula: String.raw`I'(y) = \frac{1}{R} \sum_{j=0}^{R-1} I\left(y - \frac{jN}{R}\right)`,
+  drivers: [
+    { fact: 'Acceleration', does: 'is R: one line in R is taken, and copies lie one R-th of the field of view apart' },
+    { fact: 'Phase-encode axis', does: 'sets the direction in which the copies run' },
+  ],
   needsObjectPhase: true,
   parameters: {
     accelerationFactor: quantity({

@@ -36,7 +36,10 @@ export const keepTrial = route({
   body: z.object({
     imageId: identifier,
     frame: z.number().int().min(0).default(0),
-    compareWith: z.object({ imageId: identifier, frame: z.number().int().min(0).default(0) }).nullable().default(null),
+    compareWith: z
+      .object({ imageId: identifier, frame: z.number().int().min(0).default(0) })
+      .nullable()
+      .default(null),
     recipe: recipeSchema,
     facts: z.object({ phaseEncode: phaseEncodeSchema.optional() }).optional(),
     note: z.string().trim().max(400).default(''),
@@ -69,7 +72,10 @@ export const markSchema = z.object({
   frame: z.number().int(),
   domain: z.enum(['image', 'kspace']),
   kind: z.enum(markKinds),
-  points: z.array(z.tuple([z.number(), z.number()])).min(1).max(200),
+  points: z
+    .array(z.tuple([z.number(), z.number()]))
+    .min(1)
+    .max(200),
   text: z.string(),
   author,
   createdAt: timestamp,
@@ -88,7 +94,10 @@ export const addMark = route({
     frame: z.number().int().min(0).default(0),
     domain: z.enum(['image', 'kspace']).default('image'),
     kind: z.enum(markKinds),
-    points: z.array(z.tuple([z.number().min(-8192).max(8192), z.number().min(-8192).max(8192)])).min(1).max(200),
+    points: z
+      .array(z.tuple([z.number().min(-8192).max(8192), z.number().min(-8192).max(8192)]))
+      .min(1)
+      .max(200),
     text: z.string().trim().max(400).default(''),
   }),
   output: markSchema,

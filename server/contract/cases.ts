@@ -1,12 +1,12 @@
 /** Cases: file, list and find, read, change. */
 import { z } from 'zod';
 import { everyMember, identifier, roleSchema, route, timestamp } from './route';
+import { sightings, sightingSchema } from './sighting';
 
 export const caseStates = ['reported', 'under-investigation', 'awaiting-sign-off', 'closed'] as const;
 export const caseStateSchema = z.enum(caseStates);
 export type CaseState = z.infer<typeof caseStateSchema>;
 
-export const sightings = ['ghosts', 'fold-in', 'lines', 'shading', 'distortion', 'blur', 'noise', 'signal-loss', 'other'] as const;
 export const directions = ['phase-encode', 'frequency-encode', 'both', 'none', 'unknown'] as const;
 export const frequencies = ['once', 'on-and-off', 'every-scan', 'unknown'] as const;
 export const imageCosts = ['usable', 'repeated', 'abandoned', 'unknown'] as const;
@@ -24,7 +24,7 @@ export const caseSummarySchema = z.object({
   state: caseStateSchema,
   scanner: z.object({ id: identifier, name: z.string() }).nullable(),
   coil: z.object({ id: identifier, name: z.string() }).nullable(),
-  seen: z.array(z.enum(sightings)),
+  seen: z.array(sightingSchema),
   direction: z.enum(directions),
   assignee: person.nullable(),
   /** Image whose picture stands for the case. */
@@ -74,7 +74,7 @@ const caseFields = {
   title: z.string().trim().min(1, 'a case needs a title').max(160),
   scannerId: identifier.nullable(),
   coilId: identifier.nullable(),
-  seen: z.array(z.enum(sightings)).max(sightings.length),
+  seen: z.array(sightingSchema).max(sightings.length),
   direction: z.enum(directions),
   howOften: z.enum(frequencies),
   cost: z.enum(imageCosts),
@@ -93,9 +93,16 @@ export const createCase = route({
   summary: 'File a case',
   access: everyMember,
   status: 201,
-  body: z.object(caseFields).partial().required({ title: true }).extend({
-    images: z.array(z.object({ imageId: identifier, role: z.enum(imageRoles) })).max(64).default([]),
-  }),
+  body: z
+    .object(caseFields)
+    .partial()
+    .required({ title: true })
+    .extend({
+      images: z
+        .array(z.object({ imageId: identifier, role: z.enum(imageRoles) }))
+        .max(64)
+        .default([]),
+    }),
   output: caseSchema,
 });
 export type NewCase = z.input<typeof createCase.body>;
@@ -110,7 +117,7 @@ export const listCases = route({
     q: z.string().trim().max(200).optional(),
     state: z.enum(['open', ...caseStates]).optional(),
     scannerId: identifier.optional(),
-    seen: z.enum(sightings).optional(),
+    seen: sightingSchema.optional(),
     order: z.enum(caseOrders).default('age'),
     descending: z.enum(['true', 'false']).default('false'),
     offset: z.coerce.number().int().min(0).default(0),

@@ -1,6 +1,7 @@
 /** The catalogue: what forms, swatches and the recipe are built from. Causes, reconstructions and corrections alike. */
 import { z } from 'zod';
 import { everyMember, identifier, route } from './route';
+import { sightingSchema } from './sighting';
 
 export const parameterSchema = z.union([
   z.object({
@@ -45,6 +46,13 @@ export const causeSchema = z.object({
   id: z.string(),
   title: z.string(),
   stage: stageSchema,
+  /** What is seen, in the words of a report. */
+  seen: z.array(sightingSchema),
+  runsAlong: z.enum(['phase-encode', 'readout', 'both', 'none']),
+  /** The model, in TeX. */
+  formula: z.string(),
+  /** Scan facts that drive it, and how. */
+  drivers: z.array(z.object({ fact: z.string(), does: z.string() })),
   parameters: z.array(parameterSchema),
   looks: z.object({ image: z.string(), kspace: z.string() }),
   /** Whether the bench starts this cause with a synthetic object phase: without one the model looks better than it is. */

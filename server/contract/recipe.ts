@@ -19,7 +19,15 @@ export const recipeSchema = z.object({
   steps: z.array(stepSchema).max(24),
   reconstruction: z.object({ method: z.string().max(60), parameters: parameterValues.default({}) }),
   /** Smooth synthetic phase of the object: total range in radians. Left out: none. */
-  objectPhase: z.object({ range: z.number().min(0).max(2 * Math.PI), seed: seedSchema }).optional(),
+  objectPhase: z
+    .object({
+      range: z
+        .number()
+        .min(0)
+        .max(2 * Math.PI),
+      seed: seedSchema,
+    })
+    .optional(),
   seed: seedSchema,
 });
 export type Recipe = z.infer<typeof recipeSchema>;

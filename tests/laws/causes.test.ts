@@ -16,7 +16,7 @@ const recipeOf = (cause: Cause, parameters: ParameterValues): Recipe => ({
 
 /** Object causes get the plane, the others the same numbers as k-space of which all is taken. */
 function act(cause: Cause, input: Encoded, parameters: ParameterValues, context: Context): ComplexPlane & { taken?: Uint8Array } {
-  return cause.stage === 'object' ? cause.apply(input, parameters, context) : cause.apply(input, parameters, context);
+  return cause.domain === 'image' ? cause.apply(input, parameters, context) : cause.apply(input, parameters, context);
 }
 
 /** Every size, acquisition and corner of the parameters. */
@@ -88,7 +88,7 @@ describe.each(causes.map((cause) => [cause.id, cause] as const))('%s', (_id, cau
       const result = act(cause, input, parameters, context());
       expect(result.re).toHaveLength(result.rows * result.columns);
       expect(result.im).toHaveLength(result.rows * result.columns);
-      if (cause.stage !== 'object') expect(result.taken).toHaveLength(result.rows * result.columns);
+      if (cause.domain === 'kspace') expect(result.taken).toHaveLength(result.rows * result.columns);
       if (cause.changesMatrix !== true) expect([result.rows, result.columns]).toEqual([input.rows, input.columns]);
     });
   });

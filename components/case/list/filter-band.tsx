@@ -6,7 +6,7 @@ import { Text } from '@/components/ui/text';
 import { gutter, space, touchTarget } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { useLayout } from '@/components/ui/use-layout';
-import { sightings } from '@/server/contract/cases';
+import { sightings } from '@/server/contract/sighting';
 import { sightingWords } from '../words';
 import type { CaseFilters } from './filters';
 

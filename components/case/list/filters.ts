@@ -2,7 +2,8 @@
  * What the list of cases shows, as it stands in the address: words, state, scanner, what was seen, the order, how many. An address
  * that was typed wrong falls back to what it can still say.
  */
-import { caseOrders, caseStates, sightings } from '@/server/contract/cases';
+import { caseOrders, caseStates } from '@/server/contract/cases';
+import { sightings } from '@/server/contract/sighting';
 import type { CaseQuery } from '@/components/api/cases';
 
 export const pageSize = 50;

@@ -3,7 +3,8 @@
  * typed and the ids of images that are already at the server: never a file, and never a file's name, which may be a patient's.
  */
 import { z } from 'zod';
-import { directions, frequencies, imageCosts, sightings, type NewCase } from '@/server/contract/cases';
+import { directions, frequencies, imageCosts, type NewCase } from '@/server/contract/cases';
+import { sightings } from '@/server/contract/sighting';
 
 const draftSchema = z.object({
   images: z.array(z.uuid()).max(64),

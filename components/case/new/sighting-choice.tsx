@@ -4,7 +4,8 @@ import { Press } from '@/components/ui/press';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import { sightings, type Case } from '@/server/contract/cases';
+import { type Case } from '@/server/contract/cases';
+import { sightings } from '@/server/contract/sighting';
 import { sightingWords } from '../words';
 import { SightingPicture } from './sighting-picture';
 

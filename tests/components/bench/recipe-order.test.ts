@@ -1,4 +1,4 @@
-/** The order of steps: the signal chain (object, encoding, receive, reconstruction). */
+/** The order of steps: that of the catalogue, which is the signal chain. */
 import { initialValues, inPhysicalOrder } from '@/components/bench/recipe-order';
 import type { Cause } from '@/server/contract/catalogue';
 
@@ -6,13 +6,17 @@ const cause = (id: string, stage: Cause['stage']): Cause => ({
   id,
   title: id,
   stage,
+  seen: [],
+  runsAlong: 'none',
+  formula: '',
+  drivers: [],
   parameters: [],
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
   remedies: [],
   sources: [],
 });
-const causes = [cause('motion', 'encoding'), cause('wrap', 'encoding'), cause('phase', 'object')];
+const causes = [cause('phase', 'object'), cause('wrap', 'encoding'), cause('motion', 'encoding')];
 const recipe = (...ids: string[]) => ({
   steps: ids.map((id) => ({ cause: id, parameters: {} })),
   reconstruction: { method: 'zero-filled', parameters: {} },

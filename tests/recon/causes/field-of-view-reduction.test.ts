@@ -14,7 +14,7 @@ const acquisition: Acquisition = { phaseEncode: 'column' };
 const context = { acquisition, random: randomOf(1, 'test') };
 
 const wrapped = (object: ComplexPlane, fraction: number, offCentre = 0): ComplexPlane => {
-  if (fieldOfViewReduction.stage === 'object') throw Error('acts on k-space');
+  if (fieldOfViewReduction.domain === 'image') throw Error('acts on k-space');
   return inverse(fieldOfViewReduction.apply(fullyTaken(transform(object)), { fraction, offCentre }, context));
 };
 
@@ -52,7 +52,7 @@ describe('Wrap-around', () => {
   });
 
   test('to half the field of view takes every second line of k-space', () => {
-    if (fieldOfViewReduction.stage === 'object') throw Error('acts on k-space');
+    if (fieldOfViewReduction.domain === 'image') throw Error('acts on k-space');
     const kspace = transform(noisePlane(32, 6));
     const half = fieldOfViewReduction.apply(fullyTaken(kspace), { fraction: 0.5, offCentre: 0 }, context);
     for (let k = -8; k < 8; k++) {
@@ -89,7 +89,7 @@ describe('Wrap-around', () => {
   });
 
   test('leaves no line out: k-space does not show it', () => {
-    if (fieldOfViewReduction.stage === 'object') throw Error('acts on k-space');
+    if (fieldOfViewReduction.domain === 'image') throw Error('acts on k-space');
     const { taken } = fieldOfViewReduction.apply(fullyTaken(noisePlane(20, 4)), { fraction: 0.6, offCentre: 0 }, context);
     expect(taken).toEqual(new Uint8Array(48).fill(1));
   });
