@@ -35,6 +35,13 @@ function Line({ name, children }: { name: string; children: ReactNode }) {
   );
 }
 
+const runsAlongWords: Record<Cause['runsAlong'], string> = {
+  'phase-encode': 'the phase encoding',
+  readout: 'the readout',
+  both: 'both directions',
+  none: 'neither direction',
+};
+
 const rangeOf = (parameter: Cause['parameters'][number]): string =>
   'options' in parameter
     ? parameter.options.map(({ label }) => label).join(', ')
@@ -54,6 +61,7 @@ function CauseBody({ cause }: { cause: Cause }) {
       <Section title="Looks like">
         <Line name="image">{cause.looks.image}</Line>
         <Line name="k-space">{cause.looks.kspace}</Line>
+        <Line name="runs along">{runsAlongWords[cause.runsAlong]}</Line>
       </Section>
       {atHand.length > 0 ? (
         <Section title="What can be changed now">
@@ -66,6 +74,15 @@ function CauseBody({ cause }: { cause: Cause }) {
         </Section>
       ) : null}
       <Deference />
+      {cause.drivers.length > 0 ? (
+        <Section title="Driven by">
+          {cause.drivers.map(({ fact, does }) => (
+            <Line key={fact} name={fact.toLowerCase()}>
+              {does}
+            </Line>
+          ))}
+        </Section>
+      ) : null}
       <Section title="Parameters of the model">
         {cause.parameters.map((parameter) => (
           <Line key={parameter.id} name={parameter.label.toLowerCase()}>

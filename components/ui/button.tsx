@@ -4,6 +4,7 @@
  */
 import { View, type StyleProp, type ViewStyle } from 'react-native';
 import type { Href } from 'expo-router';
+import { useId } from 'react';
 import { Glyph } from './glyph';
 import type { GlyphName } from './glyph-paths';
 import { Press } from './press';
@@ -21,7 +22,7 @@ interface ButtonProps {
   onPress?: () => void;
   href?: Href;
   disabled?: boolean;
-  /** Why it is disabled, or what it does beyond its word: spoken, and shown by the browser on hover. */
+  /** Why it is disabled, or what it does beyond its word: spoken after its name. */
   hint?: string;
   /** Work under way: true, or the part of it that is done, 0 to 1. */
   busy?: boolean | number;
@@ -41,6 +42,7 @@ function frame(kind: ButtonKind, disabled: boolean, colours: Colours): ViewStyle
 
 export function Button({ label, kind = 'quiet', glyph, onPress, href, disabled = false, hint, busy = false, ...size }: ButtonProps) {
   const { colours } = useTheme();
+  const id = useId();
   const working = busy !== false;
   const still = disabled || working;
   const tone = inkOf(kind, disabled);
@@ -53,7 +55,7 @@ export function Button({ label, kind = 'quiet', glyph, onPress, href, disabled =
       aria-label={label}
       aria-disabled={still}
       aria-busy={working}
-      {...(hint ? { accessibilityHint: hint, 'aria-description': hint } : {})}
+      {...(hint ? { 'aria-describedby': id } : {})}
       style={({ hovered }) => [
         {
           minHeight: size.tall ? 48 : touchTarget,
@@ -71,6 +73,11 @@ export function Button({ label, kind = 'quiet', glyph, onPress, href, disabled =
         size.style,
       ]}
     >
+      {hint ? (
+        <span id={id} hidden>
+          {hint}
+        </span>
+      ) : null}
       {glyph ? <Glyph name={glyph} colour={colours[tone]} /> : null}
       <Text variant={size.small ? 'label' : 'control'} tone={tone} numberOfLines={1}>
         {label}

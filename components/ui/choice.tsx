@@ -67,6 +67,7 @@ export function Choice<Value extends string>(props: ChoiceProps<Value>) {
       <View ref={group} role={props.many ? 'group' : 'radiogroup'} aria-labelledby={id} style={{ flexDirection: 'row', flexWrap: 'wrap' }}>
         {options.map((option, index) => {
           const on = chosen(option.value);
+          const alone = columns > 1 && index === options.length - 1 && options.length % columns === 1;
           return (
             <Press
               key={option.value}
@@ -78,7 +79,7 @@ export function Choice<Value extends string>(props: ChoiceProps<Value>) {
               onPress={() => press(option.value)}
               onKeyDown={(event) => move(event, index)}
               style={({ hovered }) => [
-                { width, minHeight: touchTarget, flexDirection: 'row', alignItems: 'center', gap: space(2) },
+                { width: alone ? '100%' : width, minHeight: touchTarget, flexDirection: 'row', alignItems: 'center', gap: space(2) },
                 { borderBottomWidth: 1, borderBottomColor: colours.rule },
                 hovered ? insideBar('bottom', 2, colours.indigo) : null,
               ]}

@@ -1,4 +1,4 @@
-/** A file that was not taken: why, in words, what helps, and the two ways on. Nothing of it was kept. */
+/** A file that was not taken: why and what helps, in the server's words, and the two ways on. Nothing of it was kept. */
 import { View } from 'react-native';
 import { Badge } from '@/components/ui/badge';
 import { Button } from '@/components/ui/button';
@@ -7,7 +7,7 @@ import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import type { Refusal } from '@/server/contract/images';
 import { FileButton } from './file-button';
-import { refusalWords } from './refusal-words';
+import { refusalTitles } from './refusal-words';
 
 interface RefusalCardProps {
   refusal: Refusal;
@@ -17,7 +17,6 @@ interface RefusalCardProps {
 
 export function RefusalCard({ refusal, onChooseAnother, onLeaveOut }: RefusalCardProps) {
   const { colours } = useTheme();
-  const { title, helps } = refusalWords[refusal.code];
   return (
     <View
       role="alert"
@@ -40,14 +39,10 @@ export function RefusalCard({ refusal, onChooseAnother, onLeaveOut }: RefusalCar
         </Text>
       </View>
       <Text variant="heading" level={2} style={{ fontSize: 17, lineHeight: 24, paddingTop: space(2), paddingBottom: 6 }}>
-        {title}
+        {refusalTitles[refusal.code]}
       </Text>
       <Text variant="detail" tone="inkSoft">
         {refusal.reason} Nothing of this file was kept.
-      </Text>
-      <Text variant="detail" style={{ paddingTop: 10 }}>
-        <Text variant="detailStrong">What helps: </Text>
-        {helps}
       </Text>
       <View style={{ flexDirection: 'row', gap: space(2), paddingTop: space(3) }}>
         <FileButton label="choose another" grow onFiles={onChooseAnother} />

@@ -4,6 +4,7 @@ import { View } from 'react-native';
 import { useCase } from '@/components/api/cases';
 import { useCauses } from '@/components/api/catalogue';
 import { Deference } from '@/components/cause/deference';
+import { fittingCauses } from '@/components/cause/fitting-causes';
 import { RemedyList } from '@/components/cause/remedy-list';
 import { ActionBar } from '@/components/ui/action-bar';
 import { BarHead } from '@/components/ui/bar-head';
@@ -56,11 +57,11 @@ function BigNumber({ filed }: { filed: Case }) {
   );
 }
 
-function ChangeNow() {
+function ChangeNow({ seen }: { seen: Case['seen'] }) {
   const causes = useCauses();
   if (causes.error) return <ProblemNotice error={causes.error} onRetry={() => void causes.refetch()} />;
   if (!causes.data) return <LoadingWarp what="fetching the catalogue" rows={3} />;
-  const atHand = causes.data
+  const atHand = fittingCauses(causes.data, seen)
     .map((cause) => ({ ...cause, remedies: cause.remedies.filter((remedy) => remedy.who === 'technologist') }))
     .filter((cause) => cause.remedies.length > 0);
   return (
@@ -69,7 +70,7 @@ function ChangeNow() {
         What I can change now
       </Text>
       <Text variant="detail" tone="inkSoft" style={{ paddingTop: space(1) }}>
-        Nothing is fitted yet. If the image looks like one of these, this is what a technologist may change.
+        Nothing is fitted yet. These causes can look like what was seen; this is what a technologist may change.
       </Text>
       {atHand.map((cause) => (
         <View key={cause.id} style={{ paddingTop: space(5) }}>
@@ -107,9 +108,7 @@ export function SavedScreen({ caseId }: { caseId: string }) {
       ) : (
         <LoadingWarp what="fetching the case" rows={1} />
       )}
-      <View style={{ width: '100%', maxWidth: 720 }}>
-        <ChangeNow />
-      </View>
+      <View style={{ width: '100%', maxWidth: 720 }}>{filed ? <ChangeNow seen={filed.seen} /> : null}</View>
     </Screen>
   );
 }

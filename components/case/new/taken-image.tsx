@@ -3,7 +3,6 @@ import { View } from 'react-native';
 import { thumbnailOf, useImage } from '@/components/api/images';
 import { Badge } from '@/components/ui/badge';
 import { LinkText } from '@/components/ui/link-text';
-import { Notice } from '@/components/ui/notice';
 import { Picture } from '@/components/ui/picture';
 import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
@@ -11,6 +10,7 @@ import { useTheme } from '@/components/ui/theme-context';
 import type { Image } from '@/server/contract/images';
 import { PhaseEncodeQuestion } from './phase-encode-question';
 import { RemovedTable } from './removed-table';
+import { WarningList } from './warning-list';
 
 interface TakenImageProps {
   imageId: string;
@@ -54,11 +54,7 @@ export function TakenImage({ imageId, withRemoved, onRemove }: TakenImageProps) 
           Names, numbers and dates are taken out: {count} {count === 1 ? 'attribute' : 'attributes'} removed.
         </Text>
       ) : null}
-      {image?.warnings.map((warning) => (
-        <View key={warning.code} style={{ paddingTop: space(2) }}>
-          <Notice kind="stale" text={warning.text} />
-        </View>
-      ))}
+      {image && image.warnings.length > 0 ? <WarningList warnings={image.warnings} /> : null}
       {image && image.acquisition.phaseEncode.value === null ? <PhaseEncodeQuestion image={image} /> : null}
       {image && withRemoved ? <RemovedTable deidentification={image.deidentification} /> : null}
     </View>
