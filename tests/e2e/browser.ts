@@ -1,5 +1,5 @@
 /**
- * A real browser on the production build: Debian's Chromium, a fresh profile each time, no GPU. A page remembers everything that
+ * A real browser on the production build: Debian's Chromium, a fresh profile each time, no GPU but a software driver for WebGL. A page remembers everything that
  * went wrong on it, and a test that opened one asks at its end that nothing did.
  */
 import { existsSync, mkdirSync, readFileSync } from 'node:fs';
@@ -29,6 +29,8 @@ const flags = [
   '--disable-component-update',
   '--disable-sync',
 ];
+/** Chromium's own software driver: WebGL on any machine. */
+const withWebgl = ['--use-angle=swiftshader', '--enable-unsafe-swiftshader'];
 /** What a machine does whose driver is not trusted: no WebGL context at all. */
 const withoutWebgl = ['--disable-webgl', '--disable-3d-apis'];
 
@@ -45,7 +47,7 @@ export function productUrl(): string {
 export function openBrowser({ webgl = true }: { webgl?: boolean } = {}): Promise<Browser> {
   const executablePath = programs.find(existsSync);
   if (executablePath === undefined) throw new Error('Chromium is missing. As root: apt-get install -y --no-install-recommends chromium');
-  return chromium.launch({ executablePath, args: webgl ? flags : [...flags, ...withoutWebgl] });
+  return chromium.launch({ executablePath, args: [...flags, ...(webgl ? withWebgl : withoutWebgl)] });
 }
 
 export interface Visit {
