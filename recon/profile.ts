@@ -59,3 +59,26 @@ export function profileSpectrum({ distance, values }: Profile): ProfileSpectrum 
   const amplitude = Float64Array.from(fft(signal).slice(0, half), ([re, im]) => Math.sqrt(re * re + im * im) / n);
   return { frequency: Float64Array.from({ length: half }, (_, i) => i / (padded * spacing)), amplitude };
 }
+
+/** A repeat along a profile. */
+export interface Repeat {
+  /** Cycles per metre. */
+  readonly frequency: number;
+  readonly amplitude: number;
+}
+
+/** Fewer cycles along the line than this are the shape of the object, not a repeat. */
+const fewestCycles = 2;
+
+/** What repeats most strongly: the highest local maximum of the spectrum at two cycles along the line or more. Anatomy has one too (on
+ *  head slices 4 to 15 times the mean of the spectrum), so it means most along a line through air or even tissue. */
+export function strongestRepeat({ distance }: Profile, { frequency, amplitude }: ProfileSpectrum): Repeat | undefined {
+  const length = distance[distance.length - 1] ?? 0;
+  let best: Repeat | undefined;
+  for (let i = 1; i < amplitude.length - 1; i++) {
+    const [before, here, after] = [amplitude[i - 1] as number, amplitude[i] as number, amplitude[i + 1] as number];
+    const isPeak = here > 0 && here >= before && here >= after && (frequency[i] as number) * length >= fewestCycles;
+    if (isPeak && (best === undefined || here > best.amplitude)) best = { frequency: frequency[i] as number, amplitude: here };
+  }
+  return best;
+}

@@ -1,15 +1,8 @@
-/** Statistics of a plane or of a rectangular region of one, over ndarray views: a region is a slice of the plane, not a copy. */
+/** Statistics of a plane or of a region of one, a rectangle or an ellipse, over ndarray views. */
 import ndarray from 'ndarray';
 import { assign, inf, norm2squared, subs, sum, sup } from 'ndarray-ops';
 import type { Plane } from './grid';
-
-/** Rows and columns from the first to before the last. */
-export interface Region {
-  readonly firstRow: number;
-  readonly lastRow: number;
-  readonly firstColumn: number;
-  readonly lastColumn: number;
-}
+import type { Place } from './profile';
 
 export interface Statistics {
   readonly n: number;
@@ -32,25 +25,48 @@ export function percentile(values: ArrayLike<number>, p: number): number {
   return below + (above - below) * (rank - Math.floor(rank));
 }
 
-function requireWithin(plane: Plane, { firstRow, lastRow, firstColumn, lastColumn }: Region): void {
-  const isWithin = firstRow >= 0 && firstRow < lastRow && lastRow <= plane.rows;
-  if (isWithin && firstColumn >= 0 && firstColumn < lastColumn && lastColumn <= plane.columns) return;
-  throw RangeError(
-    `region must be a rectangle within ${plane.rows}×${plane.columns}, got rows ${firstRow}–${lastRow}, columns ${firstColumn}–${lastColumn}`,
-  );
+/** The smallest and largest index whose pixel centre lies from `a` to `b`, within a side of `length`. */
+function indicesBetween(a: number, b: number, length: number): [first: number, last: number] {
+  return [Math.max(0, Math.ceil(Math.min(a, b))), Math.min(length - 1, Math.floor(Math.max(a, b)))];
 }
 
-/** Statistics of `plane`, or of `region` of it. */
-export function statistics(plane: Plane, region?: Region): Statistics {
-  const within = region ?? { firstRow: 0, lastRow: plane.rows, firstColumn: 0, lastColumn: plane.columns };
-  requireWithin(plane, within);
-  const { firstRow, lastRow, firstColumn, lastColumn } = within;
-  const view = ndarray(plane.values, [plane.rows, plane.columns]).hi(lastRow, lastColumn).lo(firstRow, firstColumn);
-  const n = view.size;
-  const values = new Float64Array(n);
+/** Values of the pixels whose centres lie in the rectangle with the corners `from` and `to`. */
+export function valuesInRectangle(plane: Plane, from: Place, to: Place): Float64Array {
+  const [top, bottom] = indicesBetween(from.row, to.row, plane.rows);
+  const [left, right] = indicesBetween(from.column, to.column, plane.columns);
+  if (bottom < top || right < left) return new Float64Array(0);
+  const view = ndarray(plane.values, [plane.rows, plane.columns])
+    .hi(bottom + 1, right + 1)
+    .lo(top, left);
+  const values = new Float64Array(view.size);
   assign(ndarray(values, view.shape), view);
+  return values;
+}
+
+/** Values of the pixels whose centres lie in the ellipse that fills that rectangle. */
+export function valuesInEllipse(plane: Plane, from: Place, to: Place): Float64Array {
+  const [top, bottom] = indicesBetween(from.row, to.row, plane.rows);
+  const [left, right] = indicesBetween(from.column, to.column, plane.columns);
+  const centre = { row: (from.row + to.row) / 2, column: (from.column + to.column) / 2 };
+  const half = { row: Math.abs(to.row - from.row) / 2, column: Math.abs(to.column - from.column) / 2 };
+  const values: number[] = [];
+  for (let row = top; row <= bottom; row++) {
+    for (let column = left; column <= right; column++) {
+      const y = half.row > 0 ? (row - centre.row) / half.row : 0;
+      const x = half.column > 0 ? (column - centre.column) / half.column : 0;
+      if (x * x + y * y <= 1) values.push(plane.values[row * plane.columns + column] as number);
+    }
+  }
+  return Float64Array.from(values);
+}
+
+/** Statistics of the values of a plane or of a region of one. Throws where there is none. */
+export function statistics(values: Float64Array): Statistics {
+  const n = values.length;
+  if (n === 0) throw RangeError('statistics need at least one pixel, got none');
+  const view = ndarray(values);
   const mean = sum(view) / n;
-  const centred = ndarray(new Float64Array(n), view.shape);
+  const centred = ndarray(new Float64Array(n));
   subs(centred, view, mean);
   return {
     n,

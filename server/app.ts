@@ -10,6 +10,7 @@ import { serveCases } from './routes/cases';
 import { serveCatalogue } from './routes/catalogue';
 import { serveHealth } from './routes/health';
 import { serveImages } from './routes/images';
+import { serveMeasurements } from './routes/measurements';
 import { serveRegistry } from './routes/registry';
 import { serveSession } from './routes/session';
 import { serveSimulations } from './routes/simulations';
@@ -36,7 +37,17 @@ export function createApp(deps: Dependencies, { clientFolder }: { clientFolder?:
   server.use('/api', express.json({ limit: jsonLimit }));
 
   const app: App = { express: server, deps, served: new Set() };
-  const resources = [serveSession, serveHealth, serveImages, serveCatalogue, serveSimulations, serveRegistry, serveCases, serveCaseParts];
+  const resources = [
+    serveSession,
+    serveHealth,
+    serveImages,
+    serveMeasurements,
+    serveCatalogue,
+    serveSimulations,
+    serveRegistry,
+    serveCases,
+    serveCaseParts,
+  ];
   for (const serveResource of resources) serveResource(app);
   refuseUnserved(app);
 

@@ -94,3 +94,36 @@ export interface ThumbnailJob {
 export interface ThumbnailResult {
   readonly bytes: Uint8Array;
 }
+
+/** A place in an image in pixels, [row, column]. */
+export interface PixelPlace {
+  readonly row: number;
+  readonly column: number;
+}
+
+/** Numbers along a line, or of a region between two corners. */
+export interface MeasureJob {
+  readonly kind: 'measure';
+  readonly source: ImageSource;
+  readonly shape: 'line' | 'rectangle' | 'ellipse';
+  readonly from: PixelPlace;
+  readonly to: PixelPlace;
+}
+/** Undefined where no pixel lies in the region. */
+export interface MeasureResult {
+  readonly profile?: {
+    readonly distanceMm: number[];
+    readonly values: number[];
+    readonly frequency: number[];
+    readonly amplitude: number[];
+    readonly strongest: { readonly frequency: number; readonly periodMm: number; readonly amplitude: number } | null;
+  };
+  readonly statistics?: {
+    readonly pixels: number;
+    readonly mean: number;
+    readonly standardDeviation: number;
+    readonly min: number;
+    readonly max: number;
+    readonly median: number;
+  };
+}

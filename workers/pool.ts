@@ -9,7 +9,18 @@
 import { join } from 'node:path';
 import { Piscina } from 'piscina';
 import type { Read } from '../server/dicom/read';
-import type { PixelsJob, Planes, SimulateJob, SimulateResult, ThumbnailJob, ThumbnailResult, TrialJob, TrialResult } from './job';
+import type {
+  MeasureJob,
+  MeasureResult,
+  PixelsJob,
+  Planes,
+  SimulateJob,
+  SimulateResult,
+  ThumbnailJob,
+  ThumbnailResult,
+  TrialJob,
+  TrialResult,
+} from './job';
 
 export interface WorkerFiles {
   readonly simulate: string;
@@ -30,6 +41,7 @@ export interface WorkerPool {
   trial(job: TrialJob, gone?: AbortSignal): Promise<TrialResult>;
   pixels(job: PixelsJob, gone?: AbortSignal): Promise<Planes>;
   thumbnail(job: ThumbnailJob, gone?: AbortSignal): Promise<ThumbnailResult>;
+  measure(job: MeasureJob, gone?: AbortSignal): Promise<MeasureResult>;
   /** Reads one file; `undefined` when it took longer than `limitMs`, whose thread is then stopped. */
   readDicom(bytes: Uint8Array, limitMs: number): Promise<Read | undefined>;
   /** Threads that are up. */
@@ -47,7 +59,7 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
   const shared = { execArgv: files.execArgv, env: {} };
   const pool = new Piscina({ ...shared, filename: files.simulate, minThreads: threads, maxThreads: threads, maxQueue: longestQueue });
   const reader = openReader(new Piscina({ ...shared, filename: files.readDicom, minThreads: 1, maxThreads: 1 }));
-  const run = async <Result>(job: SimulateJob | TrialJob | PixelsJob | ThumbnailJob, gone?: AbortSignal): Promise<Result> => {
+  const run = async <Result>(job: SimulateJob | TrialJob | PixelsJob | ThumbnailJob | MeasureJob, gone?: AbortSignal): Promise<Result> => {
     gone?.throwIfAborted();
     const stop = gone && afterGrace(gone);
     try {
@@ -61,6 +73,7 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
     trial: run<TrialResult>,
     pixels: run<Planes>,
     thumbnail: run<ThumbnailResult>,
+    measure: run<MeasureResult>,
     readDicom: reader.read,
     threads: () => pool.threads.length + reader.threads(),
     async close() {

@@ -8,8 +8,11 @@ import type { Recipe } from '../recon/recipe';
 import { compareNumbers, type Reference } from './compare-numbers';
 import { encodePlanes, logMagnitude, type NamedPlane } from './encode-planes';
 import { handBack } from './hand-back';
+import { measure } from './measure';
 import type {
   ImageSource,
+  MeasureJob,
+  MeasureResult,
   PixelsJob,
   PlaneName,
   Planes,
@@ -22,7 +25,7 @@ import type {
 } from './job';
 import { smallPicture } from './small-picture';
 
-type Job = SimulateJob | TrialJob | PixelsJob | ThumbnailJob;
+type Job = SimulateJob | TrialJob | PixelsJob | ThumbnailJob | MeasureJob;
 
 /** Log magnitudes drawn black and white in a small picture of k-space: four decades. */
 const kspaceWindow = [-4, 0] as const;
@@ -30,7 +33,7 @@ const kspaceWindow = [-4, 0] as const;
 const preparedLimit = 4;
 const prepared = new Map<string, PreparedObject>();
 
-export default function runJob(job: Job): SimulateResult | TrialResult | Planes | ThumbnailResult {
+export default function runJob(job: Job): SimulateResult | TrialResult | Planes | ThumbnailResult | MeasureResult {
   switch (job.kind) {
     case 'simulate':
       return runSimulation(job);
@@ -40,6 +43,8 @@ export default function runJob(job: Job): SimulateResult | TrialResult | Planes 
       return readPixels(job);
     case 'thumbnail':
       return drawThumbnail(job);
+    case 'measure':
+      return measure(planeOf(job.source), job);
   }
 }
 

@@ -4,6 +4,7 @@ import * as cases from './cases';
 import * as catalogue from './catalogue';
 import * as health from './health';
 import * as images from './images';
+import * as measurements from './measurements';
 import * as registry from './registry';
 import type { Route } from './route';
 import * as session from './session';
@@ -11,6 +12,6 @@ import * as simulations from './simulations';
 
 const isRoute = (value: unknown): value is Route => typeof value === 'object' && value !== null && 'method' in value && 'access' in value;
 
-export const routes: readonly Route[] = [session, health, images, catalogue, simulations, registry, cases, caseParts].flatMap((resource) =>
+export const routes: readonly Route[] = [session, health, images, measurements, catalogue, simulations, registry, cases, caseParts].flatMap((resource) =>
   Object.values(resource).filter(isRoute),
 );

@@ -1,5 +1,5 @@
 import { centredGrid } from '../../recon/grid';
-import { lineProfile, profileSpectrum } from '../../recon/profile';
+import { lineProfile, profileSpectrum, strongestRepeat } from '../../recon/profile';
 
 /** Stripes of `cycles` per metre across the columns, 1 mm pixels. */
 const stripes = (cycles: number) => ({
@@ -45,5 +45,25 @@ describe('The spectrum of a profile', () => {
     const peak = amplitude.indexOf(Math.max(...amplitude));
     // 41 samples of 1 mm resolve 1/41 mm = 24 cycles per metre.
     expect(Math.abs((frequency[peak] ?? NaN) - 125)).toBeLessThan(24 / 2);
+  });
+});
+
+describe('The strongest repeat along a profile', () => {
+  const across = (plane: ReturnType<typeof stripes>) => {
+    const profile = lineProfile(plane, { row: 0, column: 0 }, { row: 0, column: 63 });
+    return strongestRepeat(profile, profileSpectrum(profile));
+  };
+
+  test('is the frequency of the stripes', () => {
+    const repeat = across(stripes(125));
+    expect(repeat?.frequency).toBeCloseTo(125, 9);
+    expect(repeat?.amplitude).toBeCloseTo(2, 12);
+  });
+
+  test('is none on an even plane, and fewer than two cycles are the shape of the object', () => {
+    expect(across({ ...stripes(0), values: new Float64Array(640).fill(7) })).toBeUndefined();
+    // One cycle over the line: its side lobes in the padded spectrum are none, since 64 samples are a power of two.
+    const slow = across(stripes(1000 / 64));
+    expect(slow?.amplitude ?? 0).toBeLessThan(1e-9);
   });
 });

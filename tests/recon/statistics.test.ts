@@ -1,29 +1,36 @@
 import { centredGrid } from '../../recon/grid';
-import { percentile, statistics } from '../../recon/statistics';
+import { percentile, statistics, valuesInEllipse, valuesInRectangle } from '../../recon/statistics';
 
 const plane = { ...centredGrid(3, 4, [1, 1]), values: Float64Array.from([1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12]) };
 
 describe('Statistics', () => {
-  test('of a plane', () => {
+  test('of the values of a plane', () => {
     // 1 … n: mean (n+1)/2, variance of the sample n(n+1)/12.
-    expect(statistics(plane)).toEqual({ n: 12, mean: 6.5, standardDeviation: Math.sqrt(13), min: 1, max: 12, median: 6.5 });
+    expect(statistics(plane.values)).toEqual({ n: 12, mean: 6.5, standardDeviation: Math.sqrt(13), min: 1, max: 12, median: 6.5 });
   });
 
-  test('of a region count its rows and columns alone', () => {
-    const region = { firstRow: 1, lastRow: 3, firstColumn: 1, lastColumn: 3 };
-    const { standardDeviation, ...rest } = statistics(plane, region);
-    expect(rest).toEqual({ n: 4, mean: 8.5, min: 6, max: 11, median: 8.5 });
-    // 6, 7, 10, 11 about 8.5: (2.5² + 1.5²)·2/3.
-    expect(standardDeviation).toBeCloseTo(Math.sqrt(17 / 3), 12);
+  test('of a single value have no spread, and of none there are none', () => {
+    expect(statistics(Float64Array.of(5)).standardDeviation).toBe(0);
+    expect(() => statistics(new Float64Array(0))).toThrow('statistics need at least one pixel, got none');
+  });
+});
+
+describe('A region', () => {
+  test('counts the pixels whose centres lie in the rectangle, whichever corner comes first', () => {
+    expect([...valuesInRectangle(plane, { row: 2.2, column: 0.6 }, { row: 0.9, column: 2 })]).toEqual([6, 7, 10, 11]);
   });
 
-  test('of a single value have no spread', () => {
-    expect(statistics(plane, { firstRow: 0, lastRow: 1, firstColumn: 0, lastColumn: 1 }).standardDeviation).toBe(0);
+  test('ends at the edge of the plane, and may be empty', () => {
+    expect([...valuesInRectangle(plane, { row: -5, column: 3 }, { row: 0, column: 9 })]).toEqual([4]);
+    expect(valuesInRectangle(plane, { row: 0.2, column: 0.2 }, { row: 0.8, column: 0.8 })).toHaveLength(0);
   });
 
-  test('refuse a region that is empty or reaches outside', () => {
-    expect(() => statistics(plane, { firstRow: 1, lastRow: 1, firstColumn: 0, lastColumn: 2 })).toThrow(RangeError);
-    expect(() => statistics(plane, { firstRow: 0, lastRow: 4, firstColumn: 0, lastColumn: 2 })).toThrow(/within 3×4, got rows 0–4/);
+  test('as an ellipse leaves the corners of its rectangle out, and holds π/4 of its pixels', () => {
+    const wide = { ...centredGrid(101, 201, [1, 1]), values: new Float64Array(101 * 201).fill(3) };
+    const within = valuesInEllipse(wide, { row: 0, column: 0 }, { row: 100, column: 200 });
+    // The border of the ellipse is about 480 pixels long; half a pixel of it is 1.6 % of the area.
+    expect(within.length / ((Math.PI / 4) * 100 * 200)).toBeCloseTo(1, 1);
+    expect([...valuesInEllipse(plane, { row: 0, column: 0 }, { row: 2, column: 2 })]).toEqual([2, 5, 6, 7, 10]);
   });
 });
 

@@ -15,8 +15,13 @@ beforeAll(async () => {
 afterAll(() => application.close());
 
 const nameOf = ({ method, path }: Route): string => `${method.toUpperCase()} ${path}`;
+/** What a route needs in its query, beyond its path. */
+const queries: Record<string, string> = {
+  '/api/images/:imageId/profile': '?fromRow=1&fromColumn=1&toRow=9&toColumn=9',
+  '/api/images/:imageId/statistics': '?fromRow=1&fromColumn=1&toRow=9&toColumn=9',
+};
 const addressOf = ({ path }: Route, of: Record<string, string>): string =>
-  path.replace(/:(\w+)/g, (_, name: string) => of[name] ?? randomUUID());
+  path.replace(/:(\w+)/g, (_, name: string) => of[name] ?? randomUUID()) + (queries[path] ?? '');
 const forMembers = routes.filter(({ access }) => access !== 'anyone');
 const forAnyone = routes.filter(({ access }) => access === 'anyone');
 

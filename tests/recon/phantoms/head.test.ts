@@ -1,17 +1,17 @@
 import { inverse } from '../../../recon/fourier';
 import { headGrid, headImage, headKspace } from '../../../recon/phantoms/head';
-import { statistics } from '../../../recon/statistics';
+import { statistics, valuesInRectangle } from '../../../recon/statistics';
 
 describe('The head phantom', () => {
   const grid = headGrid(48);
   const image = headImage(grid);
 
   test('stands in empty air, with fat the brightest tissue', () => {
-    const { min, max } = statistics(image);
+    const { min, max } = statistics(image.values);
     expect(min).toBe(0);
     expect(max).toBeGreaterThan(0.9);
     expect(max).toBeLessThan(1.05);
-    expect(statistics(image, { firstRow: 0, lastRow: 4, firstColumn: 0, lastColumn: 48 }).max).toBe(0);
+    expect(statistics(valuesInRectangle(image, { row: 0, column: 0 }, { row: 3, column: 47 })).max).toBe(0);
   });
 
   test('is the same in k-space: the inverse transform of its closed form shows the same picture', () => {
