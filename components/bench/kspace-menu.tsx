@@ -21,14 +21,15 @@ const choices: Record<string, Choice & { label: string; aside: string }> = {
 };
 const rows: MenuRow[] = Object.entries(choices).map(([id, { label, aside }]) => ({ id, label, aside }));
 
-export function KspaceMenu({ content }: { content: PaneContent }) {
+export function KspaceMenu({ content, compact }: { content: PaneContent; compact: boolean }) {
   const { colours } = useTheme();
   const { view, change } = useBench();
   const trigger = useRef<View>(null);
   const [anchor, setAnchor] = useState<Anchor | null>(null);
   const chosen = `${view.kspaceOf} ${view.kspaceLook}`;
   const close = (): void => setAnchor(null);
-  const words = content === 'difference' ? 'k-space, log size' : `k-space, ${choices[chosen]?.label ?? ''}`;
+  const look = content === 'difference' || view.kspaceLook === 'log' ? (compact ? 'log' : 'log size') : 'phase';
+  const words = `k-space, ${look}`;
   return (
     <View ref={trigger}>
       <Press

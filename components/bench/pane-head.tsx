@@ -13,16 +13,18 @@ import { significant } from '@/components/ui/number-text';
 interface PaneHeadProps {
   domain: Domain;
   content: PaneContent;
+  /** Below one another beside a small picture. */
+  compact?: boolean;
 }
 
-export function PaneHead({ domain, content }: PaneHeadProps) {
+export function PaneHead({ domain, content, compact = false }: PaneHeadProps) {
   const { view, kase } = useBench();
   const caution = cautionOf(domain, content, view);
   const span = domain === 'image' ? view.differenceSpan : view.logDifferenceSpan;
   const nBad = kase.images.filter(({ role }) => role === 'bad').length;
   return (
     <>
-      {domain === 'kspace' ? <KspaceMenu content={content} /> : null}
+      {domain === 'kspace' ? <KspaceMenu content={content} compact={compact} /> : null}
       {domain === 'image' && (content === 'bad' || content === 'both') ? (
         <View>
           <Badge glyph="bad" word="bad image" tone="madder" />
@@ -35,8 +37,8 @@ export function PaneHead({ domain, content }: PaneHeadProps) {
       ) : null}
       {content === 'difference' ? <ColourBar kind="difference" low={`−${significant(span)}`} high={significant(span)} /> : null}
       {domain === 'kspace' && view.kspaceLook === 'phase' && content !== 'difference' ? <ColourBar kind="phase" low="−π" high="π" /> : null}
-      <View style={{ flexGrow: 1 }} />
-      <Text variant="small" tone="matInkSoft" numberOfLines={1} style={{ flexShrink: 1 }}>
+      {compact ? null : <View style={{ flexGrow: 1 }} />}
+      <Text variant="small" tone="matInkSoft" numberOfLines={compact ? 2 : 1} style={{ flexShrink: 1 }}>
         {caution || (nBad > 1 ? `1 of ${nBad} bad images` : '')}
       </Text>
     </>

@@ -12,6 +12,7 @@ import type { BenchView } from './bench-view';
 import { useBench } from './bench-context';
 import { BenchSheet } from './bench-sheet';
 import { PaneHead } from './pane-head';
+import { ProfileStrip } from './profile-strip';
 import { contentOf } from './pane-content';
 import { ReadoutTable } from './readout-table';
 import { useKeepAsTrial } from './use-keep-as-trial';
@@ -40,7 +41,7 @@ function SmallPane({ domain, width }: { domain: Domain; width: number }) {
       <BenchPane domain={domain} side="simulated" {...size} withoutHead />
       <View style={{ flex: 1, minWidth: 0, paddingRight: 12 }}>
         <View style={{ paddingLeft: 12, gap: 4, alignItems: 'flex-start' }}>
-          <PaneHead domain={domain} content={content} />
+          <PaneHead domain={domain} content={content} compact />
         </View>
         <ReadoutTable domain={domain} narrow />
       </View>
@@ -61,6 +62,10 @@ export function PhoneBench() {
   };
   const size = pictureSize(room, proportionOf(frame));
   const { phonePanes } = view;
+  const small = Math.min(
+    smallPicture,
+    (screen.height - 44 - tabsHeight - Math.min(sheet, sheetHeight('half', screen.height))) / 2 - paneMargins.below - 4,
+  );
   return (
     <View style={{ flex: 1, minHeight: 0, overflow: 'hidden' }}>
       <BenchHeader layout="phone" keep={keep} />
@@ -69,8 +74,8 @@ export function PhoneBench() {
           <BenchNotices keep={keep} withKept />
           {phonePanes === 'both' ? (
             <>
-              <SmallPane domain="image" width={smallPicture} />
-              <SmallPane domain="kspace" width={smallPicture} />
+              <SmallPane domain="image" width={small} />
+              <SmallPane domain="kspace" width={small} />
             </>
           ) : (
             <>
@@ -78,6 +83,11 @@ export function PhoneBench() {
                 <BenchPane key={phonePanes} domain={phonePanes} side="simulated" {...size} headHeight={headHeight} />
               </View>
               <ReadoutTable domain={phonePanes} />
+              {step === 'closed' ? (
+                <View style={{ flexGrow: 1, paddingHorizontal: 16, paddingTop: 6, backgroundColor: colours.cloth }}>
+                  <ProfileStrip domain={phonePanes} />
+                </View>
+              ) : null}
             </>
           )}
         </ScrollView>

@@ -42,7 +42,7 @@ export function ReadoutTable({ domain, narrow = false }: ReadoutTableProps) {
   if (narrow) {
     return (
       <View role="status" style={{ flex: 1, paddingLeft: space(3) }}>
-        <Lines items={items} unitWidth={28} />
+        <Lines items={items.map((item) => (item.label === 'simulated' ? { ...item, label: 'sim' } : item))} unitWidth={28} />
       </View>
     );
   }
@@ -54,8 +54,8 @@ export function ReadoutTable({ domain, narrow = false }: ReadoutTableProps) {
         flexDirection: 'row',
         gap: space(4),
         paddingHorizontal: space(4),
-        paddingTop: space(1),
-        height: 94,
+        paddingTop: space(2),
+        minHeight: 94,
         backgroundColor: colours.mat,
       }}
     >

@@ -11,6 +11,7 @@ import { CompareBar } from './compare-bar';
 import { Eye } from './eye';
 import { NumbersLine } from './numbers-line';
 import { Panes } from './panes';
+import { ProfileStrip } from './profile-strip';
 import { RecipePanel } from './recipe-panel';
 import { useKeepAsTrial } from './use-keep-as-trial';
 
@@ -22,7 +23,7 @@ const recipeHeight = 252;
 
 export function WideBench() {
   const { colours } = useTheme();
-  const { frame } = useBench();
+  const { frame, view } = useBench();
   const screen = useWindowDimensions();
   const [handWidth, setHandWidth] = useState(screen.width - railWidth - eyeWidth);
   const keep = useKeepAsTrial();
@@ -39,6 +40,9 @@ export function WideBench() {
           <BenchNotices keep={keep} />
           <View style={{ paddingHorizontal: space(6), paddingBottom: space(3) }}>
             <RecipePanel look="loom" />
+            <View style={{ marginTop: space(3), paddingTop: space(2), borderTopWidth: 1, borderTopColor: colours.rule }}>
+              <ProfileStrip domain={view.compare === 'side-by-side' ? view.domain : 'image'} />
+            </View>
           </View>
         </ScrollView>
         <View style={{ width: eyeWidth, borderLeftWidth: 1, borderLeftColor: colours.rule }}>

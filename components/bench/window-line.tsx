@@ -38,7 +38,7 @@ export function WindowLine({ domain, bare = false }: WindowLineProps) {
       <NumberInput
         quiet
         label="window"
-        width={60}
+        width={52}
         value={window.width}
         decimals={decimals}
         min={10 ** -decimals}
@@ -51,7 +51,7 @@ export function WindowLine({ domain, bare = false }: WindowLineProps) {
       <NumberInput
         quiet
         label="level"
-        width={60}
+        width={52}
         value={window.level}
         decimals={decimals}
         min={-1e6}
