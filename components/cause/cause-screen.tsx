@@ -25,7 +25,7 @@ function Line({ name, children }: { name: string; children: ReactNode }) {
     <View
       style={{ flexDirection: 'row', alignItems: 'baseline', paddingVertical: 6, borderBottomWidth: 1, borderBottomColor: colours.rule }}
     >
-      <Text variant="small" tone="inkFaint" style={{ width: 128, paddingRight: space(3) }}>
+      <Text variant="small" tone="inkFaint" style={{ width: 100, paddingRight: space(3) }}>
         {name}
       </Text>
       <Text variant="detail" style={{ flex: 1 }}>

@@ -102,7 +102,7 @@ function Stages({ causes, seen }: { causes: readonly Cause[]; seen: SeenFilter }
             {rest.length > 0 ? (
               <View style={[{ paddingTop: space(1), paddingBottom: 10 }, stitchedLine(colours.ruleStrong)]}>
                 <Text variant="detail" tone="inkFaint">
-                  {rest.map(({ title }) => title.toLowerCase()).join(', ')}
+                  {rest.map(({ title }) => title).join(', ')}
                 </Text>
               </View>
             ) : null}

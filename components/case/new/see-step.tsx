@@ -2,14 +2,16 @@
 import { View } from 'react-native';
 import { Choice } from '@/components/ui/choice';
 import { gutter, space } from '@/components/ui/theme';
+import { useLayout } from '@/components/ui/use-layout';
 import { costWords, directionWords, frequencyWords, optionsOf } from '../words';
 import { SightingChoice } from './sighting-choice';
 import type { DraftForm } from './use-draft';
 
 export function SeeStep({ form: { draft, change } }: { form: DraftForm }) {
+  const wide = useLayout() === 'wide';
   return (
     <View style={{ padding: gutter.phone, gap: space(4) }}>
-      <SightingChoice value={draft.seen} onChange={(seen) => change('seen', seen)} />
+      <SightingChoice columns={wide ? 5 : 3} value={draft.seen} onChange={(seen) => change('seen', seen)} />
       <Choice
         label="Which way does it run?"
         columns={2}

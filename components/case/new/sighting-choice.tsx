@@ -14,9 +14,10 @@ type Seen = Case['seen'];
 interface SightingChoiceProps {
   value: Seen;
   onChange: (seen: Seen) => void;
+  columns?: number;
 }
 
-export function SightingChoice({ value, onChange }: SightingChoiceProps) {
+export function SightingChoice({ value, onChange, columns = 3 }: SightingChoiceProps) {
   const { colours } = useTheme();
   const toggle = (sighting: Seen[number]): void =>
     onChange(value.includes(sighting) ? value.filter((other) => other !== sighting) : [...value, sighting]);
@@ -45,7 +46,7 @@ export function SightingChoice({ value, onChange }: SightingChoiceProps) {
               aria-label={sightingWords[sighting]}
               pressOnSpace
               onPress={() => toggle(sighting)}
-              style={() => ({ width: '33.33%', maxWidth: 148, paddingHorizontal: space(1) })}
+              style={() => ({ width: `${100 / columns}%`, paddingHorizontal: space(1) })}
             >
               {({ hovered }) => (
                 <>

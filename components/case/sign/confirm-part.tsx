@@ -11,11 +11,13 @@ import type { SignOffForm } from './use-sign-off';
 
 interface ConfirmPartProps {
   form: SignOffForm;
+  /** Name and role of who signs. */
+  signer: string;
   /** The signing button, where it stands beside the field. */
   button?: React.ReactNode;
 }
 
-export function ConfirmPart({ form, button }: ConfirmPartProps) {
+export function ConfirmPart({ form, signer, button }: ConfirmPartProps) {
   const atNumber = form.error instanceof ApiProblem ? form.error.issueAt('caseNumber') : undefined;
   const wrong = form.fault !== null && !/more digit/.test(form.fault) ? form.fault : undefined;
   return (
@@ -38,7 +40,7 @@ export function ConfirmPart({ form, button }: ConfirmPartProps) {
       </Section>
       <Section title="Confirm">
         <Text variant="detail" tone="inkSoft" style={{ paddingBottom: space(3) }}>
-          Signing is yours alone. Type the case number, so that nobody signs by a slip.
+          You sign as {signer}: it is yours alone. Type the case number, so that nobody signs by a slip.
         </Text>
         <View style={{ flexDirection: 'row', gap: space(3), alignItems: 'flex-start' }}>
           <View style={button ? { width: 152 } : { flex: 1 }}>

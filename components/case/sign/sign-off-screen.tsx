@@ -65,7 +65,11 @@ function SignOff({ found, trials, causeTitle, member }: SignOffProps) {
           <ScrollView style={{ flex: 1.2 }} contentContainerStyle={{ paddingBottom: space(8) }}>
             <EvidenceMat found={found} trial={nearestTrial(trials)} />
             <View style={{ paddingHorizontal: gutter.wide }}>
-              <ConfirmPart form={form} button={button(`sign off as ${member.name}, ${roleWords[member.role]}`)} />
+              <ConfirmPart
+                form={form}
+                signer={`${member.name}, ${roleWords[member.role]}`}
+                button={button(`sign off as ${member.name}, ${roleWords[member.role]}`)}
+              />
             </View>
           </ScrollView>
         </View>
@@ -91,7 +95,7 @@ function SignOff({ found, trials, causeTitle, member }: SignOffProps) {
       actions={
         <ActionBar>
           <Button label="not yet" small href={back} />
-          {button(`sign off as ${member.name}`)}
+          {button('sign off')}
         </ActionBar>
       }
     >
@@ -103,7 +107,7 @@ function SignOff({ found, trials, causeTitle, member }: SignOffProps) {
           {[causeTitle ?? 'cause not found', found.finding ? confidenceWords[found.finding.confidence] : ''].filter(Boolean).join(' · ')}
         </Text>
         {attest}
-        <ConfirmPart form={form} />
+        <ConfirmPart form={form} signer={`${member.name}, ${roleWords[member.role]}`} />
       </View>
     </Screen>
   );
