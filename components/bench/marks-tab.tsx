@@ -13,6 +13,7 @@ import { space, touchTarget } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { EyeHeading } from './eye-heading';
 import { useBench } from './bench-context';
+import { MarkMeasure } from './mark-measure';
 import { useLetteredMarks, type LetteredMark } from './use-marking';
 
 type Tool = Exclude<MarkKind, 'polyline' | 'profile'> | 'none';
@@ -69,6 +70,7 @@ function MarkRow({ entry, onRemove }: { entry: LetteredMark; onRemove: () => voi
             {detailOf(mark, bad.spacingMm)}
           </Text>
         </View>
+        <MarkMeasure mark={mark} />
         <Text variant="small" tone="inkFaint">
           {mark.author.name}
         </Text>

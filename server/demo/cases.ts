@@ -140,7 +140,7 @@ export async function fileFoldInCase(deps: Dependencies, as: As, place: Place): 
     howOften: 'once',
     cost: 'usable',
     bodyRegion: 'Head',
-    protocol: 'T2 axial, turbo spin echo',
+    protocol: 'T2 axial, fast spin echo',
     description: 'A bright curved band over one side of the head, as if something from the other side had come in.',
     tried: '',
     seenOn: null,
