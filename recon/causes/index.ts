@@ -3,6 +3,7 @@ import type { Cause } from '../cause';
 import { fieldOfViewReduction } from './field-of-view-reduction';
 import { partialFourier } from './partial-fourier';
 import { periodicMotion } from './periodic-motion';
+import { rigidMotion } from './rigid-motion';
 import { uniformUndersampling } from './uniform-undersampling';
 
-export const causes: readonly Cause[] = [fieldOfViewReduction, uniformUndersampling, partialFourier, periodicMotion];
+export const causes: readonly Cause[] = [fieldOfViewReduction, rigidMotion, uniformUndersampling, partialFourier, periodicMotion];

@@ -1,0 +1,100 @@
+/**
+ * k-space between its samples: the transform of the image at any place, K(u, v) = 1/√(NM) Σ I(x, y) exp(−i2π(ux/N + vy/M)), by
+ * Kaiser–Bessel interpolation of a transform twice as fine. Kernel 6 samples wide, β after Beatty, Nishimura & Pauly, IEEE Trans Med
+ * Imaging 2005;24:799, eq. 5 (from memory): the error is below 1e-5 of the largest sample.
+ */
+import { inverse, transform } from './fourier';
+import type { ComplexPlane } from './grid';
+import { complexZeros } from './grid';
+
+const width = 6;
+const oversampling = 2;
+const beta = Math.PI * Math.sqrt((width / oversampling) ** 2 * (oversampling - 0.5) ** 2 - 0.8);
+
+/** Modified Bessel function I0 by its power series (DLMF 10.25.2); all terms are positive, so that nothing cancels. */
+function besselI0(x: number): number {
+  const quarter = (x * x) / 4;
+  let term = 1;
+  let sum = 1;
+  for (let m = 1; term > 1e-17 * sum; m++) {
+    term *= quarter / (m * m);
+    sum += term;
+  }
+  return sum;
+}
+
+const tableSteps = 2048;
+
+/** The kernel from 0 to half its width, `tableSteps` a sample; linear between them it is within 1e-6. The last entry is past the end. */
+const kernelTable = Float64Array.from({ length: (tableSteps * width) / 2 + 2 }, (_, i) => {
+  const z = (2 * i) / (tableSteps * width);
+  return z > 1 ? 0 : besselI0(beta * Math.sqrt(1 - z * z));
+});
+
+function kernel(distance: number): number {
+  const position = Math.abs(distance) * tableSteps;
+  const below = Math.floor(position);
+  if (below >= kernelTable.length - 1) return 0;
+  const low = kernelTable[below] as number;
+  return low + ((kernelTable[below + 1] as number) - low) * (position - below);
+}
+
+/** Transform of the kernel at `n` places of an image: what the interpolation would otherwise shade it with. */
+const shading = (n: number): Float64Array =>
+  Float64Array.from({ length: n }, (_, index) => {
+    const place = (Math.PI * width * (index - Math.floor(n / 2))) / (oversampling * n);
+    const root = Math.sqrt(beta * beta - place * place);
+    return (width * Math.sinh(root)) / root;
+  });
+
+/** The fine transform of an image, ready to be asked between its samples. */
+export interface FineKspace extends ComplexPlane {
+  /** Samples of the k-space that it was made from. */
+  readonly coarseRows: number;
+  readonly coarseColumns: number;
+}
+
+export function fineKspace(kspace: ComplexPlane): FineKspace {
+  const image = inverse(kspace);
+  const { rows, columns } = image;
+  const padded = complexZeros({ ...image, rows: oversampling * rows, columns: oversampling * columns });
+  const offset = [rows - Math.floor(rows / 2), columns - Math.floor(columns / 2)] as const;
+  const [alongRows, alongColumns] = [shading(rows), shading(columns)];
+  for (let row = 0; row < rows; row++) {
+    for (let column = 0; column < columns; column++) {
+      const from = row * columns + column;
+      const to = (row + offset[0]) * padded.columns + column + offset[1];
+      const weight = oversampling / ((alongRows[row] as number) * (alongColumns[column] as number));
+      padded.re[to] = (image.re[from] as number) * weight;
+      padded.im[to] = (image.im[from] as number) * weight;
+    }
+  }
+  return { ...transform(padded), coarseRows: rows, coarseColumns: columns };
+}
+
+const wrapped = (index: number, n: number): number => ((index % n) + n) % n;
+
+/** K at row frequency u and column frequency v, in samples from the centre of k-space, into `value` as [re, im]. Zero beyond the band of
+ *  the image, |u| > N/2 or |v| > M/2: nothing is known there. */
+export function sampleAt(fine: FineKspace, u: number, v: number, value: Float64Array): void {
+  value[0] = 0;
+  value[1] = 0;
+  if (Math.abs(u) > fine.coarseRows / 2 || Math.abs(v) > fine.coarseColumns / 2) return;
+  const [row, column] = [oversampling * u, oversampling * v];
+  const [firstRow, firstColumn] = [Math.ceil(row - width / 2), Math.ceil(column - width / 2)];
+  const [centreRow, centreColumn] = [Math.floor(fine.rows / 2), Math.floor(fine.columns / 2)];
+  for (let r = firstRow; r < firstRow + width; r++) {
+    const weight = kernel(row - r);
+    const start = wrapped(r + centreRow, fine.rows) * fine.columns;
+    let re = 0;
+    let im = 0;
+    for (let c = firstColumn; c < firstColumn + width; c++) {
+      const across = kernel(column - c);
+      const i = start + wrapped(c + centreColumn, fine.columns);
+      re += across * (fine.re[i] as number);
+      im += across * (fine.im[i] as number);
+    }
+    value[0] += weight * re;
+    value[1] += weight * im;
+  }
+}
