@@ -12,6 +12,8 @@ export interface Acquisition {
   readonly repetitionTime?: number;
   /** Seconds. */
   readonly echoTime?: number;
+  /** Radians. */
+  readonly flipAngle?: number;
   readonly echoTrainLength?: number;
   readonly averages?: number;
   /** Hertz. */

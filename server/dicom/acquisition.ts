@@ -3,7 +3,7 @@
  * out, so that a model falls back to its own initial value and says so; what a member set counts like the header.
  */
 import type { Acquisition } from '../../recon/acquisition';
-import { fromMegahertz, fromMillimetres, fromMilliseconds, fromPercent } from '../../recon/units';
+import { fromDegrees, fromMegahertz, fromMillimetres, fromMilliseconds, fromPercent } from '../../recon/units';
 import type { ScanFacts } from '../contract/facts';
 
 /** An acquisition whose phase encoding axis nobody has told yet. It can be looked at, not simulated. */
@@ -23,6 +23,7 @@ export function acquisitionOf(facts: ScanFacts): Acquisition | AcquisitionWithou
   const scanned = {
     repetitionTime: converted(facts.repetitionTimeMs, fromMilliseconds),
     echoTime: converted(facts.echoTimeMs, fromMilliseconds),
+    flipAngle: converted(facts.flipAngleDegrees, fromDegrees),
     echoTrainLength: known(facts.echoTrainLength),
     averages: known(facts.averages),
     imagingFrequency: converted(facts.imagingFrequencyMHz, fromMegahertz),

@@ -7,6 +7,7 @@ const facts = readMade({
   acquisitionMatrix: [256, 0, 0, 192],
   repetitionTime: 2300,
   echoTime: 22,
+  flipAngle: 90,
   echoTrainLength: 8,
   averages: 2,
   imagingFrequency: 63.86,
@@ -19,12 +20,13 @@ const facts = readMade({
   sliceThickness: 5,
 }).facts;
 
-test('milliseconds, megahertz, millimetres and per cent become SI', () => {
+test('milliseconds, degrees, megahertz, millimetres and per cent become SI', () => {
   const { imagingFrequency, ...others } = acquisitionOf(facts);
   expect(others).toEqual({
     phaseEncode: 'column',
     repetitionTime: 2.3,
     echoTime: 0.022,
+    flipAngle: Math.PI / 2,
     echoTrainLength: 8,
     averages: 2,
     fieldStrength: 1.5,
