@@ -1,4 +1,7 @@
-/** Everything the parts of the bench share: the case, the two images, the recipe and what it gives, and what is on the table. */
+/**
+ * Everything the parts of the bench share. What lies on the bench (case, images, catalogue) is a context of its own, because it stays
+ * while a slider moves: parts that need no more are not drawn again.
+ */
 import { createContext, useContext, type Dispatch } from 'react';
 import type { Planes, RunningSimulation } from '@/components/api/simulations';
 import type { PlaneGrid } from '@/components/image/display-plane';
@@ -12,7 +15,7 @@ import type { BenchView } from './bench-view';
 import type { IssuePlaces } from './issue-places';
 import type { RecipeAction, RecipeHistory } from './recipe-history';
 
-export interface BenchState {
+export interface CaseOnBench {
   readonly kase: Case;
   readonly bad: Image;
   /** What the recipe acts on: the comparison image, or the bad image itself where there is none. */
@@ -22,6 +25,9 @@ export interface BenchState {
   readonly methods: readonly Method[];
   readonly phaseEncode: PhaseEncode | null;
   readonly frame: PlaneGrid;
+}
+
+export interface BenchState extends CaseOnBench {
   readonly view: BenchView;
   readonly change: (part: Partial<BenchView>) => void;
   readonly history: RecipeHistory;
@@ -35,10 +41,16 @@ export interface BenchState {
   readonly holdBlink: (toBad: boolean) => void;
 }
 
+export const CaseContext = createContext<CaseOnBench | null>(null);
 export const BenchContext = createContext<BenchState | null>(null);
 
-export function useBench(): BenchState {
-  const state = useContext(BenchContext);
-  if (!state) throw new RangeError('a part of the bench must stand inside the bench');
-  return state;
-}
+const required = <Value>(value: Value | null): Value => {
+  if (value === null) throw new RangeError('a part of the bench must stand inside the bench');
+  return value;
+};
+
+/** The case, its images and the catalogue: what stays while the hand works. */
+export const useCaseOnBench = (): CaseOnBench => required(useContext(CaseContext));
+
+/** All of it, with the recipe, what it gives, and what is on the table. */
+export const useBench = (): BenchState => required(useContext(BenchContext));

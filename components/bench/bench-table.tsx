@@ -1,6 +1,6 @@
 /** The bench with everything that it works on: makes the shared state and takes the layout that fits the screen. */
 import { useLayout } from '@/components/ui/use-layout';
-import { BenchContext } from './bench-context';
+import { BenchContext, CaseContext } from './bench-context';
 import { useBenchKeys } from './bench-keys';
 import { PhoneBench } from './phone-bench';
 import { TabletBench } from './tablet-bench';
@@ -10,12 +10,14 @@ import { WideBench } from './wide-bench';
 const layouts = { phone: PhoneBench, tablet: TabletBench, wide: WideBench } as const;
 
 export function BenchTable(given: OnTheBench) {
-  const state = useBenchState(given);
+  const { onBench, state } = useBenchState(given);
   useBenchKeys(state.dispatch);
   const Layout = layouts[useLayout()];
   return (
-    <BenchContext value={state}>
-      <Layout />
-    </BenchContext>
+    <CaseContext value={onBench}>
+      <BenchContext value={state}>
+        <Layout />
+      </BenchContext>
+    </CaseContext>
   );
 }

@@ -1,5 +1,5 @@
 /** The scan facts with their origin, what they imply, and what was assumed. */
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { View } from 'react-native';
 import { useImplications } from '@/components/api/implications';
 import { NumberInput } from '@/components/ui/number-input';
@@ -10,14 +10,14 @@ import { space } from '@/components/ui/theme';
 import { EyeHeading } from './eye-heading';
 import { FactRow } from './fact-row';
 import { benchFacts, factText, originWords, type BenchFact } from './fact-words';
-import { useBench } from './bench-context';
+import { useCaseOnBench } from './bench-context';
 import { PhaseEncodeChoice } from './phase-encode-choice';
 
 const names = Object.keys(benchFacts) as BenchFact[];
 const startFrequency = 0.3;
 
 function ScanFactRows() {
-  const { bad } = useBench();
+  const { bad } = useCaseOnBench();
   const silent = names.filter((name) => bad.acquisition[name].value === null);
   return (
     <>
@@ -46,7 +46,7 @@ function ScanFactRows() {
 }
 
 function Implications() {
-  const { bad } = useBench();
+  const { bad } = useCaseOnBench();
   const [frequency, setFrequency] = useState(startFrequency);
   const implications = useImplications(bad.id, frequency);
   if (implications.error) return <ProblemNotice error={implications.error} onRetry={() => void implications.refetch()} />;
@@ -79,8 +79,8 @@ function Implications() {
   );
 }
 
-export function FactsTab() {
-  const { bad } = useBench();
+export const FactsTab = memo(function FactsTab() {
+  const { bad } = useCaseOnBench();
   const origin = originWords(bad.acquisition.phaseEncode);
   return (
     <View>
@@ -107,4 +107,4 @@ export function FactsTab() {
       ))}
     </View>
   );
-}
+});

@@ -4,7 +4,7 @@ import { useCorrectFacts } from '@/components/api/images';
 import { Notice } from '@/components/ui/notice';
 import { Tabs, type Tab } from '@/components/ui/tabs';
 import type { PhaseEncode } from '@/server/contract/facts';
-import { useBench } from './bench-context';
+import { useCaseOnBench } from './bench-context';
 
 const axes: readonly Tab<PhaseEncode>[] = [
   { value: 'column', label: 'up and down' },
@@ -13,7 +13,7 @@ const axes: readonly Tab<PhaseEncode>[] = [
 const unknown: readonly Tab<PhaseEncode | 'unknown'>[] = [{ value: 'unknown', label: 'not known' }, ...axes];
 
 export function PhaseEncodeChoice() {
-  const { bad, phaseEncode } = useBench();
+  const { bad, phaseEncode } = useCaseOnBench();
   const correct = useCorrectFacts(bad.id);
   return (
     <View>

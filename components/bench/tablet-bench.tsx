@@ -10,12 +10,13 @@ import { CompareBar } from './compare-bar';
 import { Eye } from './eye';
 import { NumbersLine } from './numbers-line';
 import { Panes } from './panes';
+import { ProfileStrip } from './profile-strip';
 import { RecipePanel } from './recipe-panel';
 import { useKeepAsTrial } from './use-keep-as-trial';
 
 export function TabletBench() {
   const { colours } = useTheme();
-  const { frame } = useBench();
+  const { frame, view } = useBench();
   const screen = useWindowDimensions();
   const keep = useKeepAsTrial();
   const size = pictureSize(
@@ -42,6 +43,9 @@ export function TabletBench() {
             }}
           >
             <RecipePanel look="warp" />
+            <View style={{ marginTop: space(3), paddingTop: space(2), borderTopWidth: 1, borderTopColor: colours.rule }}>
+              <ProfileStrip domain={view.compare === 'side-by-side' ? view.domain : 'image'} />
+            </View>
           </View>
           <View style={{ flex: 1, minWidth: 0 }}>
             <Eye scrolls={false} />

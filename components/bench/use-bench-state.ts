@@ -8,7 +8,7 @@ import type { Cause, Method } from '@/server/contract/catalogue';
 import type { Image } from '@/server/contract/images';
 import type { Recipe } from '@/server/contract/recipe';
 import type { SimulationRequest } from '@/server/contract/simulations';
-import type { BenchState } from './bench-context';
+import type { BenchState, CaseOnBench } from './bench-context';
 import { startView, type BenchView } from './bench-view';
 import { placeIssues } from './issue-places';
 import { recipeHistory, startHistory } from './recipe-history';
@@ -25,8 +25,7 @@ export interface OnTheBench {
 }
 
 /** The simulation that the bench asks for; without a phase-encode axis there is none: the bench asks and does not guess. */
-function requestOf({ bad, source }: OnTheBench, recipe: Recipe, kspaceOf: BenchView['kspaceOf']): SimulationRequest | null {
-  const phaseEncode = bad.acquisition.phaseEncode.value;
+function requestOf({ bad, source, phaseEncode }: CaseOnBench, recipe: Recipe, kspaceOf: BenchView['kspaceOf']): SimulationRequest | null {
   if (phaseEncode === null) return null;
   return {
     imageId: source.id,
@@ -37,32 +36,32 @@ function requestOf({ bad, source }: OnTheBench, recipe: Recipe, kspaceOf: BenchV
   };
 }
 
-export function useBenchState(given: OnTheBench): BenchState {
-  const { bad, source } = given;
-  const frame = useMemo(() => centredGrid(bad.rows, bad.columns, bad.spacingMm ?? [1, 1]), [bad.rows, bad.columns, bad.spacingMm]);
+/** The part that stays while the hand works. */
+function useCase({ kase, bad, source, causes, methods }: OnTheBench): CaseOnBench {
+  return useMemo(
+    () => ({
+      ...{ kase, bad, source, causes, methods },
+      runsOn: source.id === bad.id ? ('bad' as const) : ('comparison' as const),
+      phaseEncode: bad.acquisition.phaseEncode.value,
+      frame: centredGrid(bad.rows, bad.columns, bad.spacingMm ?? [1, 1]),
+    }),
+    [kase, bad, source, causes, methods],
+  );
+}
+
+export function useBenchState(given: OnTheBench): { onBench: CaseOnBench; state: BenchState } {
+  const onBench = useCase(given);
+  const { bad, frame } = onBench;
   const [view, setView] = useState(() => startView(frame, bad.range));
   const change = useCallback((part: Partial<BenchView>) => setView((before) => ({ ...before, ...part })), []);
   const [history, dispatch] = useReducer(recipeHistory, given.recipe, startHistory);
-  const request = useMemo(() => requestOf(given, history.present, view.kspaceOf), [given, history.present, view.kspaceOf]);
+  const request = useMemo(() => requestOf(onBench, history.present, view.kspaceOf), [onBench, history.present, view.kspaceOf]);
   const simulation = useSimulation(request);
   const badImage = usePixels(bad.id, 'image').data?.planes;
   const badKspace = usePixels(bad.id, 'kspace').data?.planes;
   const shown = useShown({ badImage, badKspace, simulation: simulation.shown }, view);
   const issues = useMemo(() => placeIssues(simulation.error instanceof ApiProblem ? simulation.error.issues : []), [simulation.error]);
   const blink = useBlink(view.compare === 'blink');
-  return {
-    ...given,
-    runsOn: source.id === bad.id ? 'bad' : 'comparison',
-    phaseEncode: bad.acquisition.phaseEncode.value,
-    frame,
-    view,
-    change,
-    history,
-    dispatch,
-    simulation,
-    issues,
-    badPlanes: { image: badImage, kspace: badKspace },
-    shown,
-    ...blink,
-  };
+  const badPlanes = { image: badImage, kspace: badKspace };
+  return { onBench, state: { ...onBench, view, change, history, dispatch, simulation, issues, badPlanes, shown, ...blink } };
 }

@@ -8,7 +8,7 @@ import type { Cursor } from '@/components/image/cursor';
 import type { Domain } from '@/components/image/edge-scale';
 import type { PictureMark } from '@/components/image/mark-words';
 import type { Mark } from '@/server/contract/case-parts';
-import { useBench } from './bench-context';
+import { useBench, useCaseOnBench } from './bench-context';
 
 type Sample = readonly [column: number, row: number];
 
@@ -25,7 +25,7 @@ export interface LetteredMark {
 
 /** Marks on the bad image, oldest first, each with its letter. */
 export function useLetteredMarks(): readonly LetteredMark[] {
-  const { kase, bad } = useBench();
+  const { kase, bad } = useCaseOnBench();
   const { data } = useMarks(kase.id);
   return useMemo(() => {
     const own = (data ?? []).filter(({ imageId }) => imageId === bad.id);

@@ -2,7 +2,7 @@
  * A picture: planes in layers, each clipped to its part, and above them the cursor, the divider and the marks. It takes the focus:
  * arrows move the cursor (with Shift by ten), Home centres it, + and − magnify, 0 shows the whole picture.
  */
-import { useMemo, useRef, type KeyboardEvent } from 'react';
+import { memo, useMemo, useRef, type KeyboardEvent } from 'react';
 import { cursorAfterKey, cursorAt, type Cursor } from './cursor';
 import type { PlaneGrid } from './display-plane';
 import { EmptyWarp } from './empty-warp';
@@ -111,7 +111,7 @@ export function Picture(props: PictureProps) {
 
 const percent = (fraction: number): string => `${fraction * 100}%`;
 
-function LayerPlane({ layer, frame, region }: { layer: Layer; frame: PlaneGrid; region: Region }) {
+const LayerPlane = memo(function LayerPlane({ layer, frame, region }: { layer: Layer; frame: PlaneGrid; region: Region }) {
   const { left, top, width, height } = placement(layer.plane, frame, region);
   const clip = `inset(0 ${percent(1 - layer.to)} 0 ${percent(layer.from)})`;
   return (
@@ -125,4 +125,4 @@ function LayerPlane({ layer, frame, region }: { layer: Layer; frame: PlaneGrid; 
       />
     </div>
   );
-}
+});
