@@ -73,6 +73,7 @@ test('on the bench a cause is added, and both panes follow its slider', async ()
   await takePicture(page, 'bench-periodic-motion');
 
   await page.getByRole('button', { name: 'keep as trial' }).click();
+  await page.getByText('kept as trial 1').first().waitFor();
   await page.goto(caseAddress);
   await page.getByRole('row', { name: /Periodic motion/ }).waitFor();
 });
@@ -116,7 +117,9 @@ test('the physicist writes the finding, asks for sign-off and signs', async () =
   await form.getByRole('button', { name: /^cause/ }).click();
   await page.getByRole('menuitemradio', { name: 'Periodic motion' }).click();
   await form.getByRole('radio', { name: 'reproduced', exact: true }).click();
-  await form.getByRole('textbox', { name: 'the finding' }).fill('The distance of the copies and their strength are those of periodic motion.');
+  await form
+    .getByRole('textbox', { name: 'the finding' })
+    .fill('The distance of the copies and their strength are those of periodic motion.');
   await form.getByRole('button', { name: 'write the finding' }).click();
   await form.waitFor({ state: 'detached' });
   await page.getByRole('button', { name: 'ask for sign-off' }).click();
