@@ -3,6 +3,7 @@ import type { Acquisition } from './acquisition';
 import type { Cause, Driver, Reconstruction, Remedy, Sighting, Source } from './cause';
 import { initialOf } from './initial';
 import type { Parameter, Parameters } from './parameter';
+import { strengthOf } from './swatch';
 
 export type DescribedParameter =
   | {
@@ -33,6 +34,7 @@ export interface DescribedCause extends DescribedReconstruction {
   formula: string;
   drivers: Driver[];
   needsObjectPhase: boolean;
+  strength: Record<string, [mild: number, strong: number]>;
   remedies: Remedy[];
 }
 
@@ -62,6 +64,7 @@ export const describeCause = (cause: Cause, acquisition?: Acquisition): Describe
   parameters: describeParameters(cause.parameters, acquisition),
   looks: { ...cause.looks },
   needsObjectPhase: cause.needsObjectPhase === true,
+  strength: Object.fromEntries(Object.entries(strengthOf(cause)).map(([id, [mild, strong]]) => [id, [mild, strong]])),
   remedies: cause.remedies.map((remedy) => ({ ...remedy })),
   sources: cause.sources.map((source) => ({ ...source })),
 });

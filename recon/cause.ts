@@ -67,6 +67,8 @@ interface CauseBase<P extends Parameters> extends Described<P> {
   readonly changesMatrix?: boolean;
   /** Parameter values at which the cause does nothing, where there are such. */
   readonly identity?: ValuesOf<P>;
+  /** Quantities that the swatch moves, each [mild, strong], where the line from identity through the initial value does not suit. */
+  readonly strength?: { readonly [K in keyof P]?: readonly [mild: number, strong: number] };
 }
 
 /** Acts on the complex image before it is encoded, [row, column]. */
@@ -85,6 +87,10 @@ export type Cause<P extends Parameters = Parameters> = ImageCause<P> | KspaceCau
 
 /** Reconstruction: k-space as acquired to a complex image. */
 export interface Reconstruction<P extends Parameters = Parameters> extends Described<P> {
+  /** The image may have more pixels than there are samples. Left out: the shape stays. */
+  readonly changesMatrix?: boolean;
+  /** Parameter values at which it restores an object of which all samples were taken. Left out: at all values. */
+  readonly identity?: ValuesOf<P>;
   reconstruct(kspace: Encoded, parameters: ValuesOf<P>, context: Context): ComplexPlane;
 }
 

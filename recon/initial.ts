@@ -9,7 +9,7 @@ export interface Initial {
 }
 
 /** Within the range and on the nearest step from `min`; rounded to 12 digits, so that 0.4 + 35·0.01 is 0.75. */
-function onStep(value: number, { min, max, step }: Quantity): number {
+export function onStep(value: number, { min, max, step }: Quantity): number {
   const stepped = min + Math.round((value - min) / step) * step;
   return Number(Math.min(max, Math.max(min, stepped)).toPrecision(12));
 }

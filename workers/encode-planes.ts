@@ -66,6 +66,9 @@ function scaled(named: NamedPlane, name: string, values: Float64Array, low: numb
   return { description: { ...describe(named), name, type: 'uint16', low, high: top }, samples };
 }
 
+/** Log magnitudes drawn black and white in a small picture of k-space: four decades. */
+export const kspaceWindow = [-4, 0] as const;
+
 /** log10(|K| / max|K|), not below the floor; an empty plane is all floor. */
 export function logMagnitude({ re, im }: ComplexPlane): Float64Array {
   const values = new Float64Array(re.length);

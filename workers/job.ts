@@ -95,6 +95,15 @@ export interface ThumbnailResult {
   readonly bytes: Uint8Array;
 }
 
+/** A small PNG of a cause on the head phantom. `strength` 0 mild to 1 strong; `side` in pixels, and samples of the phantom. */
+export interface SwatchJob {
+  readonly kind: 'swatch';
+  readonly causeId: string;
+  readonly strength: number;
+  readonly domain: 'half' | Domain;
+  readonly side: number;
+}
+
 /** A place in an image in pixels, [row, column]. */
 export interface PixelPlace {
   readonly row: number;

@@ -16,6 +16,7 @@ import type {
   Planes,
   SimulateJob,
   SimulateResult,
+  SwatchJob,
   ThumbnailJob,
   ThumbnailResult,
   TrialJob,
@@ -41,6 +42,7 @@ export interface WorkerPool {
   trial(job: TrialJob, gone?: AbortSignal): Promise<TrialResult>;
   pixels(job: PixelsJob, gone?: AbortSignal): Promise<Planes>;
   thumbnail(job: ThumbnailJob, gone?: AbortSignal): Promise<ThumbnailResult>;
+  swatch(job: SwatchJob, gone?: AbortSignal): Promise<ThumbnailResult>;
   measure(job: MeasureJob, gone?: AbortSignal): Promise<MeasureResult>;
   /** Reads one file; `undefined` when it took longer than `limitMs`, whose thread is then stopped. */
   readDicom(bytes: Uint8Array, limitMs: number): Promise<Read | undefined>;
@@ -59,7 +61,10 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
   const shared = { execArgv: files.execArgv, env: {} };
   const pool = new Piscina({ ...shared, filename: files.simulate, minThreads: threads, maxThreads: threads, maxQueue: longestQueue });
   const reader = openReader(new Piscina({ ...shared, filename: files.readDicom, minThreads: 1, maxThreads: 1 }));
-  const run = async <Result>(job: SimulateJob | TrialJob | PixelsJob | ThumbnailJob | MeasureJob, gone?: AbortSignal): Promise<Result> => {
+  const run = async <Result>(
+    job: SimulateJob | TrialJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob,
+    gone?: AbortSignal,
+  ): Promise<Result> => {
     gone?.throwIfAborted();
     const stop = gone && afterGrace(gone);
     try {
@@ -73,6 +78,7 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
     trial: run<TrialResult>,
     pixels: run<Planes>,
     thumbnail: run<ThumbnailResult>,
+    swatch: run<ThumbnailResult>,
     measure: run<MeasureResult>,
     readDicom: reader.read,
     threads: () => pool.threads.length + reader.threads(),

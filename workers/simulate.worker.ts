@@ -6,7 +6,7 @@ import { asComplex, centredGrid, type Plane } from '../recon/grid';
 import { prepare, simulate, type PreparedObject, type Simulation } from '../recon/simulate';
 import type { Recipe } from '../recon/recipe';
 import { compareNumbers, type Reference } from './compare-numbers';
-import { encodePlanes, logMagnitude, type NamedPlane } from './encode-planes';
+import { encodePlanes, kspaceWindow, logMagnitude, type NamedPlane } from './encode-planes';
 import { handBack } from './hand-back';
 import { measure } from './measure';
 import type {
@@ -18,17 +18,17 @@ import type {
   Planes,
   SimulateJob,
   SimulateResult,
+  SwatchJob,
   ThumbnailJob,
   ThumbnailResult,
   TrialJob,
   TrialResult,
 } from './job';
 import { smallPicture } from './small-picture';
+import { drawSwatch } from './swatch';
 
-type Job = SimulateJob | TrialJob | PixelsJob | ThumbnailJob | MeasureJob;
+type Job = SimulateJob | TrialJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob;
 
-/** Log magnitudes drawn black and white in a small picture of k-space: four decades. */
-const kspaceWindow = [-4, 0] as const;
 /** Objects kept with their transform while sliders move: the image, the one beside it, with and without a phase. */
 const preparedLimit = 4;
 const prepared = new Map<string, PreparedObject>();
@@ -43,6 +43,8 @@ export default function runJob(job: Job): SimulateResult | TrialResult | Planes 
       return readPixels(job);
     case 'thumbnail':
       return drawThumbnail(job);
+    case 'swatch':
+      return drawSwatch(job);
     case 'measure':
       return measure(planeOf(job.source), job);
   }

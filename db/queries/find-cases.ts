@@ -16,6 +16,8 @@ export interface CaseFilter {
   readonly state?: CaseRow['state'] | 'open' | undefined;
   readonly scannerId?: string | undefined;
   readonly seen?: CaseRow['seen'][number] | undefined;
+  /** The cause of the finding that stands. */
+  readonly cause?: string | undefined;
 }
 
 export interface CasePage {
@@ -32,15 +34,20 @@ const written = sql`concat_ws(E'\n', ${cases.title}, ${cases.description}, ${cas
   (select string_agg(${marks.text}, E'\n') from ${marks} where ${marks.caseId} = ${cases.id}),
   (select string_agg(${comments.text}, E'\n') from ${comments} where ${comments.caseId} = ${cases.id}))`;
 
+/** The cause of the finding that stands: an earlier one was replaced. */
+const foundCause = sql`(select ${findings.cause} from ${findings}
+    where ${findings.caseId} = ${cases.id} order by ${findings.version} desc limit 1)`;
+
 /** `%` and `_` of a typed word are letters, not wildcards. */
 const asPattern = (word: string): string => `%${word.replace(/[\\%_]/g, (letter) => `\\${letter}`)}%`;
 
-function matching(departmentId: string, { q, scannerId, seen }: CaseFilter): SQL | undefined {
+function matching(departmentId: string, { q, scannerId, seen, cause }: CaseFilter): SQL | undefined {
   const words = (q ?? '').split(/\s+/).filter((word) => word !== '');
   return and(
     eq(cases.departmentId, departmentId),
     scannerId === undefined ? undefined : eq(cases.scannerId, scannerId),
     seen === undefined ? undefined : arrayContains(cases.seen, [seen]),
+    cause === undefined ? undefined : sql`${foundCause} = ${cause}`,
     ...words.map((word) => sql`${written} ilike ${asPattern(word)}`),
   );
 }

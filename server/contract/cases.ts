@@ -118,6 +118,8 @@ export const listCases = route({
     state: z.enum(['open', ...caseStates]).optional(),
     scannerId: identifier.optional(),
     seen: sightingSchema.optional(),
+    /** Cases whose finding is this cause of the catalogue. */
+    cause: z.string().max(60).optional(),
     order: z.enum(caseOrders).default('age'),
     descending: z.enum(['true', 'false']).default('false'),
     offset: z.coerce.number().int().min(0).default(0),

@@ -57,6 +57,8 @@ export const causeSchema = z.object({
   looks: z.object({ image: z.string(), kspace: z.string() }),
   /** Whether the bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
   needsObjectPhase: z.boolean(),
+  /** The quantities that a swatch moves with its strength, each at [mild, strong]. */
+  strength: z.record(z.string(), z.tuple([z.number(), z.number()])),
   remedies: z.array(remedySchema),
   sources: z.array(sourceSchema),
 });
@@ -79,6 +81,26 @@ export const listCauses = route({
   query: z.object({ imageId: identifier.optional() }),
   output: z.array(causeSchema),
 });
+
+/** Left half the picture, right half its k-space, as in the sample book; or one of the two. */
+export const swatchDomains = ['half', 'image', 'kspace'] as const;
+export type SwatchDomain = (typeof swatchDomains)[number];
+export const readSwatch = route({
+  method: 'get',
+  path: '/api/causes/:causeId/swatch',
+  summary:
+    'A square PNG of the cause on the head phantom, computed by its own model: phase encoding left and right, strength 0 mild to 1 strong. Simulated, not for diagnosis',
+  access: everyMember,
+  params: z.object({ causeId: z.string().max(60) }),
+  query: z.object({
+    strength: z.coerce.number().min(0).max(1).default(0.5),
+    domain: z.enum(swatchDomains).default('half'),
+    /** Pixels of a side. */
+    side: z.enum(['128', '256']).default('128'),
+  }),
+  answers: 'binary',
+});
+
 export const listReconstructions = route({
   method: 'get',
   path: '/api/reconstructions',

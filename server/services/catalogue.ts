@@ -3,8 +3,13 @@ import type { Database } from '../../db/client';
 import { describeCause, describeReconstruction } from '../../recon/catalogue';
 import { causes } from '../../recon/causes';
 import { reconstructions } from '../../recon/reconstructions';
-import type { Cause, Method } from '../contract/catalogue';
+import { causeOf } from '../../recon/recipe-check';
+import type { z } from 'zod';
+import type { Cause, Method, readSwatch } from '../contract/catalogue';
+import type { Dependencies } from '../dependencies';
 import { acquisitionOf } from '../dicom/acquisition';
+import { AppError } from '../errors';
+import type { Binary } from '../serve';
 import { currentFacts, requireNamedImage } from './image-source';
 import type { Caller } from './sessions';
 
@@ -19,3 +24,18 @@ export async function describeCauses(db: Database, caller: Caller, imageId: stri
 }
 
 export const describeReconstructions = (): Method[] => reconstructions.map((method) => describeReconstruction(method));
+
+/** The same for everybody and every time; an update of the models may change it. */
+const swatchHeaders = { 'Cache-Control': 'private, max-age=3600' };
+
+/** The swatch of a cause, or `not-found`. */
+export async function drawSwatch(
+  { workers }: Pick<Dependencies, 'workers'>,
+  causeId: string,
+  { strength, domain, side }: z.output<typeof readSwatch.query>,
+  gone: AbortSignal,
+): Promise<Binary> {
+  if (causeOf(causeId) === undefined) throw new AppError('not-found');
+  const { bytes } = await workers.swatch({ kind: 'swatch', causeId, strength, domain, side: Number(side) }, gone);
+  return { mediaType: 'image/png', bytes, headers: swatchHeaders };
+}

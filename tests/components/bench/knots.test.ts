@@ -13,6 +13,7 @@ const motion: Cause = {
   parameters: [],
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
+  strength: {},
   remedies: [],
   sources: [],
 };

@@ -13,6 +13,7 @@ const cause = (id: string, stage: Cause['stage']): Cause => ({
   parameters: [],
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
+  strength: {},
   remedies: [],
   sources: [],
 });

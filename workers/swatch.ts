@@ -1,0 +1,75 @@
+/**
+ * The picture of a cause in the catalogue: its model runs on the head phantom, and the result is drawn into a square as large as the
+ * phantom's field of view, or as the part of k-space that a clean scan covers. No strip is burned in: the sample book draws the stitched
+ * edge beside each, and says of all of them that they are simulated.
+ */
+import { encode } from 'fast-png';
+import { transform } from '../recon/fourier';
+import { asComplex, type Grid } from '../recon/grid';
+import { headGrid, headImage } from '../recon/phantoms/head';
+import { causeOf } from '../recon/recipe-check';
+import { prepare, simulate, type PreparedObject } from '../recon/simulate';
+import { swatchAcquisition, swatchRecipe } from '../recon/swatch';
+import { kspaceWindow, logMagnitude } from './encode-planes';
+import type { SwatchJob, ThumbnailResult } from './job';
+
+/** The brightest tissue of the phantom is 1; a little more, so that what adds to it is still seen. */
+const imageWindow = [0, 1.1] as const;
+
+/** The phantom at each size, with and without a phase. */
+const objects = new Map<string, PreparedObject>();
+
+export function drawSwatch({ causeId, strength, domain, side }: SwatchJob): ThumbnailResult {
+  const cause = causeOf(causeId);
+  if (cause === undefined) throw new RangeError(`causeId must be in the catalogue, got ${causeId}`);
+  const recipe = swatchRecipe(cause, strength);
+  const { image, kspace } = simulate(phantom(side, recipe.objectPhase), recipe, swatchAcquisition);
+  const drawn = {
+    image: () => draw({ values: image.values, grid: image, window: imageWindow }, headGrid(side), side),
+    kspace: () => draw({ values: logMagnitude(kspace), grid: kspace, window: kspaceWindow }, transform(phantom(side).object), side),
+  };
+  const data = domain === 'half' ? halves(drawn.image(), drawn.kspace(), side) : drawn[domain]();
+  return { bytes: encode({ width: side, height: side, data, channels: 1, depth: 8 }) };
+}
+
+function phantom(side: number, phase?: PreparedObject['phase']): PreparedObject {
+  const key = `${side} ${phase?.range} ${phase?.seed}`;
+  const known = objects.get(key);
+  if (known) return known;
+  const object = prepare(asComplex(headImage(headGrid(side))), phase);
+  objects.set(key, object);
+  return object;
+}
+
+interface Drawing {
+  readonly values: Float64Array;
+  readonly grid: Grid;
+  readonly window: readonly [number, number];
+}
+
+/** Grey levels on the square of `frame`: the nearest sample at each place, black where the plane does not reach. */
+function draw({ values, grid, window: [low, high] }: Drawing, frame: Grid, side: number): Uint8Array {
+  const rows = samplesAt(frame.origin[0], frame.spacing[0], side, grid.origin[0], grid.spacing[0], grid.rows);
+  const columns = samplesAt(frame.origin[1], frame.spacing[1], side, grid.origin[1], grid.spacing[1], grid.columns);
+  const levels = new Uint8Array(side * side);
+  rows.forEach((row, y) => {
+    columns.forEach((column, x) => {
+      if (row === undefined || column === undefined) return;
+      const value = values[row * grid.columns + column] as number;
+      levels[y * side + x] = Math.max(0, Math.min(255, Math.round((255 * (value - low)) / (high - low))));
+    });
+  });
+  return levels;
+}
+
+/** For each place of the frame along one axis, the index of the nearest sample, or undefined beyond the last. */
+function samplesAt(from: number, step: number, n: number, origin: number, spacing: number, count: number): (number | undefined)[] {
+  return Array.from({ length: n }, (_, place) => {
+    const index = Math.round((from + place * step - origin) / spacing);
+    return index >= 0 && index < count ? index : undefined;
+  });
+}
+
+/** The left half of the one and the right half of the other. */
+const halves = (left: Uint8Array, right: Uint8Array, side: number): Uint8Array =>
+  left.map((level, i) => (i % side < side / 2 ? level : (right[i] as number)));
