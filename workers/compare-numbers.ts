@@ -3,7 +3,7 @@ import type { Acquisition, PhaseEncode } from '../recon/acquisition';
 import type { Grid, Plane } from '../recon/grid';
 import { ghostRatio, type GhostRatio } from '../recon/metrics/ghost-ratio';
 import { leastSquaresGain, nrmse } from '../recon/metrics/nrmse';
-import { ssim } from '../recon/metrics/ssim';
+import { ssim, ssimReference, type SsimReference } from '../recon/metrics/ssim';
 import { resample } from '../recon/resample';
 import type { SimulationNumbers } from './job';
 
@@ -20,11 +20,13 @@ export interface Reference {
   readonly plane: () => Plane;
 }
 
-/** A reference on the grid of the simulated image, with its own ghost ratio. */
+/** A reference on the grid of the simulated image, with what stays of it while the simulation changes. */
 interface LaidOver {
   readonly key: string;
   readonly plane: Plane;
   readonly ghostRatio: number | null;
+  /** Undefined where a side is shorter than the window of `ssim`. */
+  readonly forSsim: SsimReference | undefined;
 }
 let newest: LaidOver | undefined;
 
@@ -40,13 +42,12 @@ export function compareNumbers(simulated: Plane, bad: Reference | undefined, { p
   const error = nrmse(simulated, laidOver.plane);
   if (!Number.isFinite(error))
     return { ...nothingToCompare, ...own, reason: 'the image to compare with is empty where the simulated one lies' };
-  const isLargeEnough = Math.min(simulated.rows, simulated.columns) >= ssimWindow;
   return {
     ...own,
     ...because,
     nrmse: error,
     gain: leastSquaresGain(simulated, laidOver.plane),
-    ssim: isLargeEnough ? ssim(simulated, laidOver.plane) : null,
+    ssim: laidOver.forSsim ? ssim(simulated, laidOver.forSsim) : null,
     ghostRatioOfBad: laidOver.ghostRatio,
   };
 }
@@ -58,7 +59,8 @@ function layOver({ key: image, plane }: Reference, grid: Plane, phaseEncode: Pha
   const original = plane();
   const laid = isSameGrid(grid, original) ? original : tryResample(original, grid);
   if (laid === undefined) return undefined;
-  newest = { key, plane: laid, ghostRatio: ghostRatio(laid, phaseEncode).value };
+  const isLargeEnough = Math.min(grid.rows, grid.columns) >= ssimWindow;
+  newest = { key, plane: laid, ghostRatio: ghostRatio(laid, phaseEncode).value, forSsim: isLargeEnough ? ssimReference(laid) : undefined };
   return newest;
 }
 

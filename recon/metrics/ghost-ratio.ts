@@ -33,74 +33,100 @@ const mostZeros = 0.25;
 export function objectMask({ rows, columns, values }: Plane): Uint8Array {
   const threshold = objectThreshold * percentile(values, 99);
   const mask = new Uint8Array(values.length).fill(1);
-  const reached: number[] = [];
-  const reach = (row: number, column: number): void => {
-    if (row < 0 || column < 0 || row >= rows || column >= columns) return;
-    const i = row * columns + column;
+  // Every pixel is reached once at most.
+  const reached = new Int32Array(values.length);
+  let nReached = 0;
+  const reach = (i: number): void => {
     if (mask[i] === 0 || (values[i] as number) > threshold) return;
     mask[i] = 0;
-    reached.push(i);
+    reached[nReached++] = i;
   };
-  for (let row = 0; row < rows; row++) for (const column of [0, columns - 1]) reach(row, column);
-  for (let column = 0; column < columns; column++) for (const row of [0, rows - 1]) reach(row, column);
-  for (let i = reached.pop(); i !== undefined; i = reached.pop()) {
-    const row = Math.floor(i / columns);
+  for (let row = 0; row < rows; row++) for (const column of [0, columns - 1]) reach(row * columns + column);
+  for (let column = 0; column < columns; column++) for (const row of [0, rows - 1]) reach(row * columns + column);
+  for (let next = 0; next < nReached; next++) {
+    const i = reached[next] as number;
     const column = i % columns;
-    reach(row - 1, column);
-    reach(row + 1, column);
-    reach(row, column - 1);
-    reach(row, column + 1);
+    if (i >= columns) reach(i - columns);
+    if (i < values.length - columns) reach(i + columns);
+    if (column > 0) reach(i - 1);
+    if (column < columns - 1) reach(i + 1);
   }
   return mask;
 }
 
-/** The mask and all pixels within `guard` of it along rows or columns. */
+/** The mask and all pixels within `guard` of it along rows or columns: a square, grown along one axis after the other. */
 function dilated(mask: Uint8Array, rows: number, columns: number): Uint8Array {
+  const along = new Uint8Array(mask.length);
+  for (let row = 0; row < rows; row++) {
+    const start = row * columns;
+    for (let column = 0; column < columns; column++) {
+      if (mask[start + column] === 1) along.fill(1, start + Math.max(0, column - guard), start + Math.min(columns, column + guard + 1));
+    }
+  }
   const grown = new Uint8Array(mask.length);
   for (let row = 0; row < rows; row++) {
-    for (let column = 0; column < columns; column++) {
-      if (mask[row * columns + column] === 0) continue;
-      for (let r = Math.max(0, row - guard); r <= Math.min(rows - 1, row + guard); r++) {
-        grown.fill(1, r * columns + Math.max(0, column - guard), r * columns + Math.min(columns - 1, column + guard) + 1);
+    for (let r = Math.max(0, row - guard); r <= Math.min(rows - 1, row + guard); r++) {
+      for (let column = 0; column < columns; column++) {
+        if (along[r * columns + column] === 1) grown[row * columns + column] = 1;
       }
     }
   }
   return grown;
 }
 
-function meanOver(values: Float64Array, isInside: (i: number) => boolean): RegionMean & { zeros: number } {
-  let sum = 0;
-  let nPixels = 0;
-  let zeros = 0;
-  for (let i = 0; i < values.length; i++) {
-    if (!isInside(i)) continue;
-    nPixels++;
-    sum += values[i] as number;
-    if (values[i] === 0) zeros++;
+/** 1 for each line along the phase encoding that meets the object: columns for axis 0, rows for axis 1. */
+function linesThrough(object: Uint8Array, rows: number, columns: number, axis: 0 | 1): Uint8Array {
+  const meets = new Uint8Array(axis === 0 ? columns : rows);
+  for (let row = 0; row < rows; row++) {
+    for (let column = 0; column < columns; column++) {
+      if (object[row * columns + column] === 1) meets[axis === 0 ? column : row] = 1;
+    }
   }
-  return { nPixels, mean: nPixels > 0 ? sum / nPixels : null, zeros };
+  return meets;
 }
 
-/** Mean of the ghost region over mean of the object, 0 upwards. */
-export function ghostRatio(image: Plane, phaseEncode: PhaseEncode): GhostRatio {
+interface Tally {
+  sum: number;
+  nPixels: number;
+  zeros: number;
+}
+
+const noPixels = (): Tally => ({ sum: 0, nPixels: 0, zeros: 0 });
+
+function count(entry: Tally, value: number): void {
+  entry.sum += value;
+  entry.nPixels++;
+  if (value === 0) entry.zeros++;
+}
+
+/** Sums over the object, over the air that its ghosts reach, and over the rest of the air; the edge of the object is none of them. */
+function tally(image: Plane, axis: 0 | 1): Record<'object' | 'ghost' | 'otherAir', Tally> {
   const { rows, columns, values } = image;
   const object = objectMask(image);
   const nearObject = dilated(object, rows, columns);
-  const axis = phaseEncodeAxis(phaseEncode);
-  // Lines along the phase encoding that meet the object: columns for axis 0, rows for axis 1.
-  const meetsObject = new Uint8Array(axis === 0 ? columns : rows);
-  const lineOf = (i: number): number => (axis === 0 ? i % columns : Math.floor(i / columns));
-  object.forEach((isObject, i) => {
-    if (isObject === 1) meetsObject[lineOf(i)] = 1;
-  });
-  const inObject = meanOver(values, (i) => object[i] === 1);
-  const ghost = meanOver(values, (i) => nearObject[i] === 0 && meetsObject[lineOf(i)] === 1);
-  const otherAir = meanOver(values, (i) => nearObject[i] === 0 && meetsObject[lineOf(i)] === 0);
-  const region = ({ nPixels, mean }: RegionMean): RegionMean => ({ nPixels, mean });
-  const regions = { object: region(inObject), ghost: region(ghost), otherAir: region(otherAir) };
+  const meetsObject = linesThrough(object, rows, columns, axis);
+  const tallies = { object: noPixels(), ghost: noPixels(), otherAir: noPixels() };
+  for (let row = 0; row < rows; row++) {
+    for (let column = 0; column < columns; column++) {
+      const i = row * columns + column;
+      const air = meetsObject[axis === 0 ? column : row] === 1 ? tallies.ghost : tallies.otherAir;
+      if (object[i] === 1) count(tallies.object, values[i] as number);
+      else if (nearObject[i] === 0) count(air, values[i] as number);
+    }
+  }
+  return tallies;
+}
+
+const region = ({ nPixels, sum }: Tally): RegionMean => ({ nPixels, mean: nPixels > 0 ? sum / nPixels : null });
+
+/** Mean of the ghost region over mean of the object, 0 upwards. */
+export function ghostRatio(image: Plane, phaseEncode: PhaseEncode): GhostRatio {
+  const sums = tally(image, phaseEncodeAxis(phaseEncode));
+  const regions = { object: region(sums.object), ghost: region(sums.ghost), otherAir: region(sums.otherAir) };
+  const { object, ghost } = regions;
   const not = (because: string): GhostRatio => ({ value: null, because, regions });
-  if (inObject.mean === null || !(inObject.mean > 0)) return not('no object stands out from the background');
+  if (object.mean === null || !(object.mean > 0)) return not('no object stands out from the background');
   if (ghost.mean === null || ghost.nPixels < leastPixels) return not('the object leaves no air along the phase encoding');
-  if (ghost.zeros > mostZeros * ghost.nPixels) return not('the air is blanked: a good part of it is exactly zero');
-  return { value: ghost.mean / inObject.mean, regions };
+  if (sums.ghost.zeros > mostZeros * ghost.nPixels) return not('the air is blanked: a good part of it is exactly zero');
+  return { value: ghost.mean / object.mean, regions };
 }

@@ -14,63 +14,79 @@ export function gaussianWindow(): Float64Array {
   return weights.map((weight) => weight / total);
 }
 
+/** From the edge of the window to its centre. */
+const [w5, w4, w3, w2, w1, w0] = gaussianWindow() as unknown as readonly [number, number, number, number, number, number];
+
+/** The weighted mean of eleven samples `stride` apart, from index i on; those equally far from the centre are added first. */
+function weightedMean(samples: Float64Array, i: number, stride: number): number {
+  let sum = w0 * (samples[i + 5 * stride] as number);
+  sum += w1 * ((samples[i + 4 * stride] as number) + (samples[i + 6 * stride] as number));
+  sum += w2 * ((samples[i + 3 * stride] as number) + (samples[i + 7 * stride] as number));
+  sum += w3 * ((samples[i + 2 * stride] as number) + (samples[i + 8 * stride] as number));
+  sum += w4 * ((samples[i + stride] as number) + (samples[i + 9 * stride] as number));
+  return sum + w5 * ((samples[i] as number) + (samples[i + 10 * stride] as number));
+}
+
 /** Local means where the window fits wholly: (rows − 10) × (columns − 10), the window applied along rows, then along columns. */
-function localMean(values: Float64Array, rows: number, columns: number, weights: Float64Array): Float64Array {
+function localMean(values: Float64Array, rows: number, columns: number): Float64Array {
   const innerRows = rows - windowSize + 1;
   const innerColumns = columns - windowSize + 1;
   const along = new Float64Array(rows * innerColumns);
   for (let row = 0; row < rows; row++) {
-    for (let column = 0; column < innerColumns; column++) {
-      let sum = 0;
-      for (let w = 0; w < windowSize; w++) sum += (weights[w] as number) * (values[row * columns + column + w] as number);
-      along[row * innerColumns + column] = sum;
-    }
+    for (let column = 0; column < innerColumns; column++)
+      along[row * innerColumns + column] = weightedMean(values, row * columns + column, 1);
   }
   const means = new Float64Array(innerRows * innerColumns);
-  for (let row = 0; row < innerRows; row++) {
-    for (let w = 0; w < windowSize; w++) {
-      const weight = weights[w] as number;
-      const from = (row + w) * innerColumns;
-      const to = row * innerColumns;
-      for (let column = 0; column < innerColumns; column++) {
-        means[to + column] = (means[to + column] as number) + weight * (along[from + column] as number);
-      }
-    }
-  }
+  for (let i = 0; i < means.length; i++) means[i] = weightedMean(along, i, innerColumns);
   return means;
 }
 
-const product = (a: Float64Array, b: Float64Array): Float64Array => a.map((value, i) => value * (b[i] as number));
+function product(a: Float64Array, b: Float64Array): Float64Array {
+  const result = new Float64Array(a.length);
+  for (let i = 0; i < result.length; i++) result[i] = (a[i] as number) * (b[i] as number);
+  return result;
+}
+
+/** What SSIM needs of the image to compare with: it stays while a slider moves. */
+export interface SsimReference {
+  readonly plane: Plane;
+  readonly c1: number;
+  readonly c2: number;
+  readonly mean: Float64Array;
+  readonly variance: Float64Array;
+}
+
+/** Throws where a side is shorter than the window. */
+export function ssimReference(plane: Plane): SsimReference {
+  const { rows, columns, values } = plane;
+  if (Math.min(rows, columns) < windowSize) throw RangeError(`ssim needs at least ${windowSize} rows and columns, got ${rows}×${columns}`);
+  const L = percentile(values, 99.9);
+  const mean = localMean(values, rows, columns);
+  const variance = localMean(product(values, values), rows, columns);
+  for (let i = 0; i < mean.length; i++) variance[i] = (variance[i] as number) - (mean[i] as number) ** 2;
+  return { plane, c1: (0.01 * L) ** 2, c2: (0.03 * L) ** 2, mean, variance };
+}
 
 /**
- * Structural similarity after the least-squares gain: the mean over all places of an 11 × 11 Gaussian window, σ 1.5, of
+ * Structural similarity of s after the least-squares gain g: the mean over all places of an 11 × 11 Gaussian window, σ 1.5, of
  *   (2μ_s μ_b + c1)(2σ_sb + c2) / ((μ_s² + μ_b² + c1)(σ_s² + σ_b² + c2)),  c1 = (0.01 L)², c2 = (0.03 L)²,
- * with L the 99.9th percentile of b. Throws where a side is shorter than the window.
+ * with L the 99.9th percentile of b. Means are taken of s itself, and g comes in afterwards: they are linear in it.
  * Source: Wang, Bovik, Sheikh, Simoncelli, IEEE Trans Image Process 2004;13:600, doi 10.1109/TIP.2003.819861 (eq. 13, from memory).
  */
-export function ssim(s: Plane, b: Plane): number {
-  const { rows, columns } = b;
-  const g = leastSquaresGain(s, b);
-  if (Math.min(rows, columns) < windowSize) throw RangeError(`ssim needs at least ${windowSize} rows and columns, got ${rows}×${columns}`);
-  const L = percentile(b.values, 99.9);
-  const c1 = (0.01 * L) ** 2;
-  const c2 = (0.03 * L) ** 2;
-  const weights = gaussianWindow();
-  const scaled = s.values.map((value) => g * value);
-  const mean = (values: Float64Array) => localMean(values, rows, columns, weights);
-  const meanS = mean(scaled);
-  const meanB = mean(b.values);
-  const meanSS = mean(product(scaled, scaled));
-  const meanBB = mean(product(b.values, b.values));
-  const meanSB = mean(product(scaled, b.values));
+export function ssim(s: Plane, b: Plane | SsimReference): number {
+  const { plane, c1, c2, mean, variance } = 'plane' in b ? b : ssimReference(b);
+  const g = leastSquaresGain(s, plane);
+  const { rows, columns } = plane;
+  const meanS = localMean(s.values, rows, columns);
+  const meanSS = localMean(product(s.values, s.values), rows, columns);
+  const meanSB = localMean(product(s.values, plane.values), rows, columns);
   let sum = 0;
-  for (let i = 0; i < meanS.length; i++) {
-    const ms = meanS[i] as number;
-    const mb = meanB[i] as number;
-    const varianceS = (meanSS[i] as number) - ms * ms;
-    const varianceB = (meanBB[i] as number) - mb * mb;
-    const covariance = (meanSB[i] as number) - ms * mb;
-    sum += ((2 * ms * mb + c1) * (2 * covariance + c2)) / ((ms * ms + mb * mb + c1) * (varianceS + varianceB + c2));
+  for (let i = 0; i < mean.length; i++) {
+    const ms = g * (meanS[i] as number);
+    const mb = mean[i] as number;
+    const varianceS = g * g * (meanSS[i] as number) - ms * ms;
+    const covariance = g * (meanSB[i] as number) - ms * mb;
+    sum += ((2 * ms * mb + c1) * (2 * covariance + c2)) / ((ms * ms + mb * mb + c1) * (varianceS + (variance[i] as number) + c2));
   }
-  return sum / meanS.length;
+  return sum / mean.length;
 }
