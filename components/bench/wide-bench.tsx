@@ -20,6 +20,8 @@ const railWidth = 88;
 /** Header, head and readout of a pane, edge below it, compare bar, numbers; and a recipe with its sliders. */
 const fixedHeight = 48 + 32 + 40 + paneMargins.below + 48 + 44;
 const recipeHeight = 252;
+/** Nothing scrolls at 900; the profile is there where the screen is higher. */
+const profileFrom = 980;
 
 export function WideBench() {
   const { colours } = useTheme();
@@ -40,9 +42,11 @@ export function WideBench() {
           <BenchNotices keep={keep} />
           <View style={{ paddingHorizontal: space(6), paddingBottom: space(3) }}>
             <RecipePanel look="loom" />
-            <View style={{ marginTop: space(3), paddingTop: space(2), borderTopWidth: 1, borderTopColor: colours.rule }}>
-              <ProfileStrip domain={view.compare === 'side-by-side' ? view.domain : 'image'} />
-            </View>
+            {screen.height >= profileFrom ? (
+              <View style={{ marginTop: space(3), paddingTop: space(2), borderTopWidth: 1, borderTopColor: colours.rule }}>
+                <ProfileStrip domain={view.compare === 'side-by-side' ? view.domain : 'image'} />
+              </View>
+            ) : null}
           </View>
         </ScrollView>
         <View style={{ width: eyeWidth, borderLeftWidth: 1, borderLeftColor: colours.rule }}>

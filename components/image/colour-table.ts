@@ -9,17 +9,22 @@ import type { Window } from './window-level';
 export type ColourTable = Uint32Array;
 export const tableLength = fullScale + 1;
 
+const opaque = 255 << 24;
+
 export const packColour = (red: number, green: number, blue: number): number => ((255 << 24) | (blue << 16) | (green << 8) | red) >>> 0;
 
 /** Values between `low` (sample 0) and `high` (sample 65535), black below the window, white above it, linear within. */
 export function greyTable(window: Window, low: number, high: number): ColourTable {
   const table = new Uint32Array(tableLength);
+  // Signed words of the same bytes stay small integers in every engine: this runs for each picture while a slider moves.
+  const words = new Int32Array(table.buffer);
   const black = window.level - window.width / 2;
   const slope = ((high - low) / fullScale / window.width) * 255;
-  const start = ((low - black) / window.width) * 255;
+  const start = ((low - black) / window.width) * 255 + 0.5;
   for (let sample = 0; sample < tableLength; sample++) {
-    const grey = Math.min(255, Math.max(0, Math.round(start + slope * sample)));
-    table[sample] = 0xff000000 + grey * 0x010101;
+    const level = start + slope * sample;
+    const grey = level <= 0 ? 0 : level >= 255 ? 255 : level | 0;
+    words[sample] = opaque | (grey << 16) | (grey << 8) | grey;
   }
   return table;
 }
