@@ -23,6 +23,15 @@ export function linesOf({ rows, columns }: Pick<Grid, 'rows' | 'columns'>, { pha
     : { nLines: columns, centre: Math.floor(columns / 2), samplesPerLine: rows, lineStride: 1, sampleStride: columns };
 }
 
+/** The two directions of a plane, as a form names them. */
+export type EncodingDirection = 'phase-encode' | 'readout';
+
+/** The "lines" that are counted along `direction`: along the readout they are the samples of equal kx of all phase-encode lines. */
+export function linesAlong(grid: Pick<Grid, 'rows' | 'columns'>, { phaseEncode }: Acquisition, direction: EncodingDirection): Lines {
+  const readout = phaseEncode === 'row' ? 'column' : 'row';
+  return linesOf(grid, { phaseEncode: direction === 'readout' ? readout : phaseEncode });
+}
+
 /** k-space with every sample taken; the samples are copied, so that a cached transform stays as it is. */
 export function fullyTaken(kspace: ComplexPlane): Encoded {
   return { ...kspace, re: kspace.re.slice(), im: kspace.im.slice(), taken: new Uint8Array(kspace.re.length).fill(1) };
@@ -36,6 +45,12 @@ export function takenLines(kspace: Encoded, lines: Lines): readonly boolean[] {
     }
     return false;
   });
+}
+
+/** For each line its number among the lines that are taken, from 0; −1 where it is not taken: a skipped line takes no time. */
+export function takenOrder(kspace: Encoded, lines: Lines): Int32Array {
+  let n = 0;
+  return Int32Array.from(takenLines(kspace, lines), (isTaken) => (isTaken ? n++ : -1));
 }
 
 /** A copy in which the lines that `keep` refuses are zero and not taken. */

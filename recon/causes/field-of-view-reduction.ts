@@ -6,33 +6,10 @@
 import { phaseEncodeAxis } from '../acquisition';
 import type { Encoded } from '../cause';
 import { defineCause } from '../cause';
+import { fold } from '../fold';
 import { inverseAlong, transformAlong } from '../fourier';
-import type { ComplexPlane } from '../grid';
-import { centredGrid, complexZeros } from '../grid';
 import { fullyTaken } from '../lines';
 import { quantity } from '../parameter';
-
-/** Adds the lines of `plane` along `axis` up modulo `n`, about the line `offset` from the centre. */
-function fold(plane: ComplexPlane, axis: 0 | 1, n: number, offset: number): ComplexPlane {
-  const { rows, columns, spacing } = plane;
-  const folded = complexZeros(centredGrid(axis === 0 ? n : rows, axis === 1 ? n : columns, spacing));
-  const length = axis === 0 ? rows : columns;
-  const target = Int32Array.from({ length }, (_, index) => {
-    const position = index - Math.floor(length / 2) - offset + Math.floor(n / 2);
-    return ((position % n) + n) % n;
-  });
-  for (let row = 0; row < rows; row++) {
-    for (let column = 0; column < columns; column++) {
-      const toRow = axis === 0 ? (target[row] as number) : row;
-      const toColumn = axis === 1 ? (target[column] as number) : column;
-      const from = row * columns + column;
-      const to = toRow * folded.columns + toColumn;
-      folded.re[to] = (folded.re[to] as number) + (plane.re[from] as number);
-      folded.im[to] = (folded.im[to] as number) + (plane.im[from] as number);
-    }
-  }
-  return folded;
-}
 
 export const fieldOfViewReduction = defineCause({
   id: 'field-of-view-reduction',
@@ -76,7 +53,12 @@ export const fieldOfViewReduction = defineCause({
       year: 2006,
       standing: 'confirmed',
     },
-    { citation: 'Pusey E et al. Magnetic resonance imaging artifacts. RadioGraphics 6:891', year: 1986, standing: 'from memory' },
+    {
+      citation: 'Pusey E et al. Magnetic resonance imaging artifacts: mechanism and clinical significance. RadioGraphics 6:891',
+      year: 1986,
+      doi: '10.1148/radiographics.6.5.3685515',
+      standing: 'confirmed',
+    },
     { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'confirmed' },
   ],
   remedies: [

@@ -1,11 +1,13 @@
 /**
  * Partial Fourier: only the lines ky ≥ −(2f−1)·N/2 are taken, round(f·N) of N, so that the band of fraction 2f−1 about the centre is
- * complete on both sides. What the missing lines cost depends on the reconstruction and on the phase of the object: without
- * one, k-space is Hermitian and nothing is lost.
+ * complete on both sides. Along the readout the same: an asymmetric echo, of which the first part is not sampled. What the
+ * missing samples cost depends on the reconstruction and on the phase of the object: without one, k-space is Hermitian and nothing
+ * is lost.
  */
 import { defineCause } from '../cause';
-import { keepLines, linesOf } from '../lines';
-import { quantity } from '../parameter';
+import type { EncodingDirection } from '../lines';
+import { keepLines, linesAlong } from '../lines';
+import { choice, quantity } from '../parameter';
 
 export const partialFourier = defineCause({
   id: 'partial-fourier',
@@ -13,16 +15,17 @@ export const partialFourier = defineCause({
   stage: 'encoding',
   domain: 'kspace',
   seen: ['blur', 'lines', 'signal-loss'],
-  runsAlong: 'phase-encode',
-  formula: String.raw`K'(k_y) = \begin{cases} K(k_y) & k_y \ge -(2f - 1)\,N/2 \\ 0 & \text{else} \end{cases}`,
+  runsAlong: 'both',
+  formula: String.raw`K'(k) = \begin{cases} K(k) & k \ge -(2f - 1)\,N/2 \\ 0 & \text{else} \end{cases}`,
   drivers: [
     { fact: 'Partial Fourier fraction', does: 'is f; the band 2f − 1 about the centre is complete on both sides' },
+    { fact: 'Partial Fourier direction', does: 'is the axis of the missing side: lines, or the first part of every echo' },
     { fact: 'TE and sequence', does: 'set how fast the phase of the object varies, and so how much the reconstruction loses' },
   ],
   needsObjectPhase: true,
   parameters: {
     fraction: quantity({
-      label: 'Fraction of lines taken',
+      label: 'Fraction taken',
       unit: 'of N',
       min: 0.625,
       max: 1,
@@ -33,11 +36,19 @@ export const partialFourier = defineCause({
         read: ({ partialFourierFraction: f }) => (f !== undefined && f < 1 ? f : undefined),
       },
     }),
+    direction: choice<EncodingDirection>({
+      label: 'Along',
+      options: [
+        { value: 'phase-encode', label: 'Phase encoding' },
+        { value: 'readout', label: 'Readout (asymmetric echo)' },
+      ],
+      initial: 'phase-encode',
+    }),
   },
-  identity: { fraction: 1 },
+  identity: { fraction: 1, direction: 'phase-encode' },
   looks: {
     image:
-      'Zero-filled, blurred along the phase encoding with ringing at edges; with homodyne sharp again, but dark or bright where the phase of the object changes fast.',
+      'Zero-filled, blurred along the direction chosen with ringing at edges; with homodyne sharp again, but dark or bright where the phase of the object changes fast.',
     kspace: 'One side is empty beyond the band 2f−1 about the centre. The k-space of a magnitude image is symmetric and does not show it.',
   },
   sources: [
@@ -78,8 +89,8 @@ export const partialFourier = defineCause({
       price: 'Slower reconstruction',
     },
   ],
-  apply(kspace, { fraction }, { acquisition }) {
-    const lines = linesOf(kspace, acquisition);
+  apply(kspace, { fraction, direction }, { acquisition }) {
+    const lines = linesAlong(kspace, acquisition, direction);
     const nTaken = Math.round(fraction * lines.nLines);
     return keepLines(kspace, lines, (line) => line >= lines.nLines - nTaken);
   },

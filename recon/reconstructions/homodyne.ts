@@ -4,21 +4,15 @@
  * Source: Noll, Nishimura, Macovski, IEEE Trans Med Imaging 1991;10:154, doi 10.1109/42.79473.
  *
  * Where both sides reach equally far nothing is to be made up, and the result is the zero-filled one: for all lines, and for lines
- * skipped evenly. With both skipped lines and a short side the copies stay and each is sharpened.
+ * skipped evenly. With both skipped lines and a short side the copies stay and each is sharpened. Along the phase encoding and along
+ * the readout alike; where both have a short side the one that lacks more is made up and the other stays zero-filled: the
+ * method knows one conjugate side only.
  */
 import { defineReconstruction } from '../cause';
 import { inverse } from '../fourier';
 import type { ComplexPlane } from '../grid';
-import { linesOf, takenLines, weightLines } from '../lines';
-
-/** The furthest line taken below and above the line of zero phase encoding. For an even count the line −N/2 is left out: it is its
- *  own mirror image. */
-function reachOf(taken: readonly boolean[], centre: number): { below: number; above: number } {
-  const isSelfConjugate = (line: number) => taken.length % 2 === 0 && line === 0;
-  const first = taken.findIndex((isTaken, line) => isTaken && !isSelfConjugate(line));
-  const last = taken.lastIndexOf(true);
-  return { below: Math.max(0, centre - first), above: Math.max(0, last - centre) };
-}
+import { linesAlong, weightLines } from '../lines';
+import { reachOf, shortfall } from '../reach';
 
 /** W of every line; `side` is +1 where the lines above the centre are complete, −1 where those below are. */
 export function homodyneWeight(nLines: number, centre: number, reach: number, side: 1 | -1): Float64Array {
@@ -60,13 +54,16 @@ export const homodyne = defineReconstruction({
     },
   ],
   reconstruct(kspace, _parameters, { acquisition }) {
-    const lines = linesOf(kspace, acquisition);
-    const { below, above } = reachOf(takenLines(kspace, lines), lines.centre);
-    if (below === above) return inverse(kspace);
-    const reach = Math.max(1, Math.min(below, above));
+    const [worst] = (['phase-encode', 'readout'] as const)
+      .map((direction) => linesAlong(kspace, acquisition, direction))
+      .map((lines) => ({ lines, reach: reachOf(kspace, lines) }))
+      .sort((a, b) => shortfall(b.reach) - shortfall(a.reach));
+    if (!worst || shortfall(worst.reach) === 0) return inverse(kspace);
+    const { lines, reach } = worst;
+    const ks = Math.max(1, Math.min(reach.below, reach.above));
     const none = new Float64Array(lines.nLines);
-    const ramp = homodyneWeight(lines.nLines, lines.centre, reach, above > below ? 1 : -1);
-    const band = none.map((_, line) => (Math.abs(line - lines.centre) < reach ? 1 : 0));
+    const ramp = homodyneWeight(lines.nLines, lines.centre, ks, reach.above > reach.below ? 1 : -1);
+    const band = none.map((_, line) => (Math.abs(line - lines.centre) < ks ? 1 : 0));
     const image = inverse(weightLines(kspace, lines, { re: ramp, im: none }));
     const low = inverse(weightLines(kspace, lines, { re: band, im: none }));
     return inPhase(image, low);

@@ -4,7 +4,7 @@ import { inverse, transform } from '../../recon/fourier';
 import { magnitude } from '../../recon/grid';
 import { fullyTaken, keepLines, linesOf } from '../../recon/lines';
 import { checkRecipe } from '../../recon/recipe-check';
-import { noisePlane } from '../recon/planes';
+import { largestDifference, noisePlane } from '../recon/planes';
 import { acquisitions, contextOf, corners, initialValues, refused, sizes } from './samples';
 
 /** All lines; every second; without the first third; one line alone. */
@@ -30,21 +30,23 @@ describe.each(reconstructions.map((method) => [method.id, method] as const))('%s
             const kspace = keepLines(full, lines, (line) => sampling(line, lines.nLines, lines.centre));
             const before = { re: kspace.re.slice(), im: kspace.im.slice(), taken: kspace.taken.slice() };
             const image = method.reconstruct(kspace, parameters, contextOf(acquisition));
-            expect([image.rows, image.columns, image.re.length]).toEqual([rows, columns, rows * columns]);
+            expect([image.re.length, image.im.length]).toEqual([image.rows * image.columns, image.rows * image.columns]);
+            if (method.changesMatrix !== true) expect([image.rows, image.columns]).toEqual([rows, columns]);
             expect(image.re.every(Number.isFinite) && image.im.every(Number.isFinite)).toBe(true);
             expect([kspace.re, kspace.im, kspace.taken]).toEqual([before.re, before.im, before.taken]);
             const again = method.reconstruct(kspace, parameters, contextOf(acquisition));
-            expect([again.re, again.im]).toEqual([image.re, image.im]);
+            expect(largestDifference(again, image)).toBe(0);
           }
         }
       }
     }
   });
 
-  test('restores the magnitude of an object of which all samples were taken', () => {
+  test('restores the magnitude of an object of which all samples were taken, at the values that it declares as its identity', () => {
     const object = noisePlane(15, 21);
     for (const acquisition of acquisitions) {
-      const image = method.reconstruct(fullyTaken(transform(object)), initialValues(method.parameters), contextOf(acquisition));
+      const parameters = method.identity ?? initialValues(method.parameters);
+      const image = method.reconstruct(fullyTaken(transform(object)), parameters, contextOf(acquisition));
       const expected = magnitude(inverse(transform(object))).values;
       magnitude(image).values.forEach((value, i) => expect(value).toBeCloseTo(expected[i] ?? NaN, 12));
     }
