@@ -33,6 +33,8 @@ export interface Acquisition {
   readonly acquisitionType?: '2D' | '3D';
   /** Metres. */
   readonly sliceThickness?: number;
+  /** Unit vector of the main field along growing row index, growing column index and the slice normal; its sign does not matter. */
+  readonly fieldDirection?: readonly [row: number, column: number, normal: number];
 }
 
 /** The axis along which lines are counted: 0 where the row index varies (`column`), 1 where the column index does. */

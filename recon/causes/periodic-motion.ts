@@ -1,22 +1,80 @@
 /**
- * Periodic motion as a phase error of each line, K'(n) = K(n)·exp(i·a·sin(2π·f·T·n + φ)), T = TR · averages: through-plane motion or
- * flow that comes round with frequency f. By Jacobi–Anger the ghost of order j has amplitude J_j(a) and lies
- * j·frac(T·f) of the phase field of view away, whatever the matrix.
+ * Periodic motion that comes round with frequency f, ω = 2πf. Through-plane motion or flow turns the phase of each line,
+ * K'(n) = K(n)·exp(i·a·sin(ωt + φ)); by Jacobi–Anger the ghost of order j has amplitude J_j(a) and lies j·frac(T·f) of the phase field of view
+ * away, whatever the matrix, T = TR · averages. A displacement of A pixels turns it by exp(−i2πk·A·sin(ωt + φ)/N), so that edges ghost
+ * more than what is even; a signal that comes and goes, 1 + m·cos(ωt + φ), has ghosts of m/2. Source: Wood & Henkelman, Med Phys 1985;12:143.
  *
- * Assumed: one line each T, in order from one edge of k-space to the other; averages are the inner loop and a is the swing that
- * is left after averaging. n counts lines that are taken, so that skipped lines take no time and the ghost then moves by
- * frac(T·f)/R. Where the header gives no TR, 500 ms is assumed; where it gives no averages, one.
+ * Assumed: one line each T, in order from one edge of k-space to the other, all of the object moving as one; averages as `line-courses.ts` says.
+ * n counts lines that are taken, so that skipped lines take no time and the ghost then moves by frac(T·f)/R.
  */
 import type { Acquisition } from '../acquisition';
+import type { Encoded } from '../cause';
 import { defineCause } from '../cause';
+import type { Averaging } from '../line-courses';
+import { timesOf } from '../line-courses';
+import type { Lines } from '../lines';
 import { linesOf, takenLines, weightLines } from '../lines';
-import { quantity } from '../parameter';
+import { choice, quantity } from '../parameter';
+import { fromMillimetres } from '../units';
 
-const assumedRepetitionTime = 0.5;
+type Moves = 'phase' | 'along-phase-encode' | 'along-readout' | 'amplitude';
 
-/** Seconds from one line to the next. */
-export const lineInterval = ({ repetitionTime, averages }: Acquisition): number =>
-  (repetitionTime ?? assumedRepetitionTime) * (averages ?? 1);
+/** For each line the phases ωt + φ of the cycle at which it is taken; none where it is not. */
+function cyclesOf(
+  kspace: Encoded,
+  lines: Lines,
+  { frequency, start, averaging }: { frequency: number; start: number; averaging: Averaging },
+  acquisition: Acquisition,
+): number[][] {
+  const taken = takenLines(kspace, lines);
+  const nTaken = taken.filter(Boolean).length;
+  const phi = (start * Math.PI) / 180;
+  let n = 0;
+  return taken.map((isTaken) =>
+    isTaken ? timesOf(n++, nTaken, averaging, acquisition).map((t) => 2 * Math.PI * frequency * t + phi) : [],
+  );
+}
+
+/** Each line times the mean, over its averages, of size·exp(i·phase). */
+function weightedLines(
+  kspace: Encoded,
+  lines: Lines,
+  cycles: number[][],
+  of: (cycle: number, line: number) => { size: number; phase: number },
+): Encoded {
+  const weight = { re: new Float64Array(lines.nLines).fill(1), im: new Float64Array(lines.nLines) };
+  cycles.forEach((averages, line) => {
+    if (averages.length === 0) return;
+    const terms = averages.map((cycle) => of(cycle, line));
+    weight.re[line] = terms.reduce((sum, { size, phase }) => sum + size * Math.cos(phase), 0) / averages.length;
+    weight.im[line] = terms.reduce((sum, { size, phase }) => sum + size * Math.sin(phase), 0) / averages.length;
+  });
+  return weightLines(kspace, lines, weight);
+}
+
+/** Each line of an object that is displaced by `swing`·sin(cycle) pixels along the readout: the mean over its averages. */
+function swungAlongReadout(kspace: Encoded, lines: Lines, cycles: number[][], swing: number): Encoded {
+  const moved = { ...kspace, re: kspace.re.slice(), im: kspace.im.slice(), taken: kspace.taken.slice() };
+  const { samplesPerLine, lineStride, sampleStride } = lines;
+  cycles.forEach((averages, line) => {
+    for (let sample = 0; sample < samplesPerLine && averages.length > 0; sample++) {
+      const turn = (-2 * Math.PI * (sample - Math.floor(samplesPerLine / 2)) * swing) / samplesPerLine;
+      let re = 0;
+      let im = 0;
+      for (const cycle of averages) {
+        const phase = turn * Math.sin(cycle);
+        re += Math.cos(phase) / averages.length;
+        im += Math.sin(phase) / averages.length;
+      }
+      const i = line * lineStride + sample * sampleStride;
+      const a = moved.re[i] as number;
+      const b = moved.im[i] as number;
+      moved.re[i] = a * re - b * im;
+      moved.im[i] = a * im + b * re;
+    }
+  });
+  return moved;
+}
 
 export const periodicMotion = defineCause({
   id: 'periodic-motion',
@@ -25,18 +83,40 @@ export const periodicMotion = defineCause({
   domain: 'kspace',
   seen: ['ghosts'],
   runsAlong: 'phase-encode',
-  formula: String.raw`K'(k_x, n) = K(k_x, n)\, e^{\,i a \sin(2\pi f T n + \varphi)},\quad T = T_R \, N_{\mathrm{avg}}`,
+  formula: String.raw`K'(k_x, n) = K(k_x, n)\, e^{\,i a \sin(2\pi f T n + \varphi)},\quad T = T_R \, N_{\mathrm{avg}};\quad a = -2\pi k A / N \text{ for a displacement}`,
   drivers: [
     { fact: 'TR × averages', does: 'sets how far apart the copies lie: frac(TR × averages × frequency) of the phase field of view' },
     { fact: 'Phase-encode axis', does: 'sets the direction in which the copies run' },
     { fact: 'Acceleration', does: 'divides the distance of the copies by R' },
+    { fact: 'Breathing and pulse', does: 'are the frequency: 0.15 to 0.4 Hz for breathing, 0.8 to 1.7 Hz for the heart' },
   ],
   parameters: {
+    moves: choice<Moves>({
+      label: 'What moves',
+      options: [
+        { value: 'phase', label: 'Phase: through-plane motion, flow' },
+        { value: 'along-phase-encode', label: 'Place along phase encoding' },
+        { value: 'along-readout', label: 'Place along readout' },
+        { value: 'amplitude', label: 'Brightness' },
+      ],
+      initial: 'phase',
+    }),
     frequency: quantity({ label: 'Frequency', unit: 'Hz', min: 0.05, max: 3, step: 0.005, initial: 0.25 }),
     phaseSwing: quantity({ label: 'Phase swing', unit: 'rad', min: 0, max: 2, step: 0.01, initial: 0.6 }),
+    displacement: quantity({ label: 'Displacement', unit: 'mm', min: 0, max: 20, step: 0.1, initial: 5 }),
+    modulation: quantity({ label: 'Change of brightness', unit: 'of signal', min: 0, max: 0.5, step: 0.01, initial: 0.2 }),
     start: quantity({ label: 'Start of cycle', unit: '°', min: 0, max: 360, step: 1, initial: 0 }),
+    averaging: choice<Averaging>({
+      label: 'Averages',
+      options: [
+        { value: 'left-over', label: 'The swing is what they leave' },
+        { value: 'inner-loop', label: 'Each line is averaged before the next' },
+        { value: 'outer-loop', label: 'All lines are taken, then again' },
+      ],
+      initial: 'left-over',
+    }),
   },
-  identity: { frequency: 0.25, phaseSwing: 0, start: 0 },
+  identity: { moves: 'phase', frequency: 0.25, phaseSwing: 0, displacement: 5, modulation: 0.2, start: 0, averaging: 'left-over' },
   looks: {
     image:
       'Faint copies of the whole object along the phase encoding, whatever way the motion goes, at equal steps of frac(TR × averages × frequency) of the field of view. Where the header has no TR, 500 ms is assumed.',
@@ -86,20 +166,19 @@ export const periodicMotion = defineCause({
     },
     { change: 'Change TR so that the ghost falls outside the organ', who: 'physicist', price: 'Contrast changes with TR' },
   ],
-  apply(kspace, { frequency: f, phaseSwing: a, start }, { acquisition }) {
+  apply(kspace, { moves, phaseSwing, displacement, modulation, ...course }, { acquisition }) {
     const lines = linesOf(kspace, acquisition);
-    const taken = takenLines(kspace, lines);
-    const T = lineInterval(acquisition);
-    const phi = (start * Math.PI) / 180;
-    const weight = { re: new Float64Array(lines.nLines).fill(1), im: new Float64Array(lines.nLines) };
-    let n = 0;
-    for (let line = 0; line < lines.nLines; line++) {
-      if (!taken[line]) continue;
-      const phase = a * Math.sin(2 * Math.PI * f * T * n + phi);
-      weight.re[line] = Math.cos(phase);
-      weight.im[line] = Math.sin(phase);
-      n++;
+    const cycles = cyclesOf(kspace, lines, course, acquisition);
+    // 1/(n·Δ) of k-space times n is 1/Δ: metres times it are pixels.
+    const pixels = (axis: 0 | 1): number =>
+      fromMillimetres(displacement) * kspace.spacing[axis] * (axis === 0 ? kspace.rows : kspace.columns);
+    const [phaseAxis, readoutAxis] = lines.sampleStride === 1 ? ([0, 1] as const) : ([1, 0] as const);
+    if (moves === 'along-readout') return swungAlongReadout(kspace, lines, cycles, pixels(readoutAxis));
+    if (moves === 'amplitude') {
+      return weightedLines(kspace, lines, cycles, (cycle) => ({ size: 1 + modulation * Math.cos(cycle), phase: 0 }));
     }
-    return weightLines(kspace, lines, weight);
+    if (moves === 'phase') return weightedLines(kspace, lines, cycles, (cycle) => ({ size: 1, phase: phaseSwing * Math.sin(cycle) }));
+    const perLine = (-2 * Math.PI * pixels(phaseAxis)) / lines.nLines;
+    return weightedLines(kspace, lines, cycles, (cycle, line) => ({ size: 1, phase: perLine * (line - lines.centre) * Math.sin(cycle) }));
   },
 });

@@ -50,7 +50,10 @@ describe('A sudden movement', () => {
   test('after the last line, or in a single shot, does nothing', () => {
     const object = noisePlane(32, 16);
     const parameters = { course: 'sudden', alongPhaseEncode: 5, alongReadout: 5, rotation: 4 };
-    for (const still of [{ onset: 1 }, { onset: 0.6, linesPerShot: 32 }]) {
+    for (const still of [
+      { onset: 1, linesPerShot: 1 },
+      { onset: 0.6, linesPerShot: 32 },
+    ]) {
       const { kspace } = simulate(object, motion({ ...parameters, ...still }), acquisition);
       expect(kspace.re).toEqual(transform(object).re);
     }
