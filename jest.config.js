@@ -33,6 +33,8 @@ const onNode = {
 
 /** @type {import('jest').Config} */
 module.exports = {
+  // Generous, because two busy cores are slow and a limit proves nothing; what must be fast has its own check.
+  testTimeout: 60_000,
   projects: [
     { ...onNode, displayName: 'recon', testMatch: ['<rootDir>/tests/{recon,laws}/**/*.test.ts'] },
     {
@@ -46,6 +48,7 @@ module.exports = {
       preset: 'jest-expo/web',
       displayName: 'components',
       testMatch: ['<rootDir>/tests/components/**/*.test.{ts,tsx}'],
+      setupFilesAfterEnv: ['<rootDir>/tests/components/patience.ts'],
       moduleNameMapper: { '^@/(.*)$': '<rootDir>/$1' },
     },
     { ...onNode, displayName: 'architecture', testMatch: ['<rootDir>/tests/architecture.test.ts'] },

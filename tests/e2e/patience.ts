@@ -1,2 +1,2 @@
-/** A chapter of the main path takes 20 seconds on two idle cores and minutes on busy ones: three minutes a test, not Jest's five seconds. */
+/** A chapter of the main path takes 20 seconds on two idle cores and minutes on busy ones: it has three. */
 jest.setTimeout(180_000);
