@@ -88,7 +88,7 @@ function CompareFooter() {
           length={Math.max(72, Math.min(160, width - 292))}
         />
         <Press
-          aria-label="signed difference"
+          aria-label="diff: signed difference"
           aria-pressed={isDifference}
           onPress={() => change({ compare: isDifference ? 'divider' : 'difference' })}
           style={() => ({

@@ -9,29 +9,18 @@ import { LinkText } from '@/components/ui/link-text';
 import { LoadingWarp } from '@/components/ui/loading-warp';
 import { ProblemNotice } from '@/components/ui/problem-notice';
 import { Screen } from '@/components/ui/screen';
-import type { Method } from '@/server/contract/catalogue';
-import type { Recipe } from '@/server/contract/recipe';
 import { imagesOf } from './bench-images';
 import { BenchTable } from './bench-table';
-import { initialValues } from './recipe-order';
+import { startRecipe } from './recipe-start';
 
 interface BenchProps {
   caseId: string;
   trialId?: string | undefined;
+  /** A cause to start with; a trial that is opened has its own. */
+  add?: string | undefined;
 }
 
-const firstSeed = 1;
-
-/** Nothing done yet: no step, the first reconstruction of the catalogue. */
-function emptyRecipe([first]: readonly Method[]): Recipe {
-  return {
-    steps: [],
-    reconstruction: { method: first?.id ?? 'zero-filled', parameters: first ? initialValues(first.parameters) : {} },
-    seed: firstSeed,
-  };
-}
-
-export function Bench({ caseId, trialId }: BenchProps) {
+export function Bench({ caseId, trialId, add }: BenchProps) {
   const kase = useCase(caseId);
   const trials = useTrials(caseId);
   const trial = trials.data?.find(({ id }) => id === trialId);
@@ -77,7 +66,7 @@ export function Bench({ caseId, trialId }: BenchProps) {
         source={source.data}
         causes={causes.data}
         methods={methods.data}
-        recipe={trial?.recipe ?? emptyRecipe(methods.data)}
+        recipe={trial?.recipe ?? startRecipe(methods.data, causes.data, add)}
       />
     </Screen>
   );

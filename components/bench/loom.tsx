@@ -18,7 +18,7 @@ function LoomKnot({ entry, chosen, onPress }: LoomKnotProps) {
   const isStep = typeof entry.knot === 'number';
   return (
     <Press
-      aria-label={`${entry.stage}: ${entry.word}${isStep && !entry.isOn ? ', switched off' : ''}`}
+      aria-label={`${entry.stage} ${entry.word}${isStep && !entry.isOn ? ', switched off' : ''}`}
       aria-pressed={chosen}
       onPress={onPress}
       style={() => ({ flex: 1, minWidth: 0, minHeight: 60 })}

@@ -47,8 +47,8 @@ export function ProfileStrip({ domain }: { domain: Domain }) {
         <Text variant="small" numberOfLines={1} style={{ flexShrink: 1 }}>
           {name}
         </Text>
-        <Text variant="small" tone="inkFaint" style={{ marginLeft: 'auto' }}>
-          {domain === 'image' ? 'through the cursor, in the window' : 'through the cursor'}
+        <Text variant="small" tone="inkFaint" numberOfLines={1} style={{ marginLeft: 'auto', paddingLeft: 8 }}>
+          through the cursor
         </Text>
       </View>
       <svg

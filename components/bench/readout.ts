@@ -41,15 +41,32 @@ export function imageReadout(cursor: Cursor, frame: PlaneGrid, { bad, simulation
 
 const degrees = (radians: number): string => fixed((radians * 180) / Math.PI, 0);
 
+const axisNames = {
+  known: { line: 'line', sample: 'sample', kLine: 'k pe', kSample: 'k ro' },
+  unknown: { line: 'row', sample: 'column', kLine: 'ky', kSample: 'kx' },
+} as const;
+
+/** Line and sample where the phase-encode axis is known; row and column, which promise nothing, where it is not. */
+function kspacePlace(cursor: Cursor, frame: PlaneGrid, phaseEncode: PhaseEncode | null): ReadoutItem[] {
+  const names = phaseEncode === null ? axisNames.unknown : axisNames.known;
+  // With `column` lines are counted along the rows.
+  const { line, sample, kPhaseEncode, kReadout } = kspacePosition(cursor, frame, phaseEncode ?? 'column');
+  return [
+    place(names.line, line),
+    place(names.sample, sample),
+    item(names.kLine, fixed(kPhaseEncode, 0), '1/m'),
+    item(names.kSample, fixed(kReadout, 0), '1/m'),
+  ];
+}
+
 /** `name`: which k-space of the simulation is on the table. */
 export function kspaceReadout(
   cursor: Cursor,
   frame: PlaneGrid,
-  phaseEncode: PhaseEncode,
+  phaseEncode: PhaseEncode | null,
   { bad, simulation }: Planes,
   name: string,
 ): ReadoutItem[] {
-  const { line, sample, kPhaseEncode, kReadout } = kspacePosition(cursor, frame, phaseEncode);
   const { x, y } = positionMm(cursor, kspaceGrid(frame));
   const at = (planes: ReadonlyMap<string, DisplayPlane> | undefined, key: string): number | null => read(planes?.get(key), y, x);
   const isTaken = (log: number | null): boolean => log !== null && log > -8;
@@ -57,10 +74,7 @@ export function kspaceReadout(
   const log = at(simulation?.planes, `${name}.log`);
   const phase = ofBad === null ? (isTaken(log) ? at(simulation?.planes, `${name}.phase`) : null) : at(bad, 'kspace.phase');
   return [
-    place('line', line),
-    place('sample', sample),
-    item('k pe', fixed(kPhaseEncode, 0), '1/m'),
-    item('k ro', fixed(kReadout, 0), '1/m'),
+    ...kspacePlace(cursor, frame, phaseEncode),
     item(
       'log K',
       words(ofBad ?? (isTaken(log) ? log : null), (value) => fixed(value, 2)),

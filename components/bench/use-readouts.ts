@@ -9,7 +9,6 @@ export function useReadouts(): Record<Domain, ReadoutItem[]> {
   const { shown } = simulation;
   return {
     image: imageReadout(view.cursor, frame, { bad: badPlanes.image, simulation: shown }),
-    // Without an axis line and sample are those of the rows; the edges then say ky and kx.
-    kspace: kspaceReadout(view.cursor, frame, phaseEncode ?? 'column', { bad: badPlanes.kspace, simulation: shown }, name),
+    kspace: kspaceReadout(view.cursor, frame, phaseEncode, { bad: badPlanes.kspace, simulation: shown }, name),
   };
 }

@@ -22,7 +22,7 @@ function WarpKnot({ entry, chosen, ground, onPress }: WarpKnotProps) {
   const off = typeof entry.knot === 'number' && !entry.isOn;
   return (
     <Press
-      aria-label={`${entry.stage}: ${entry.word}${off ? ', switched off' : ''}`}
+      aria-label={`${entry.word} ${off ? 'off' : entry.stage}`}
       aria-pressed={chosen}
       onPress={onPress}
       style={({ hovered }) => [

@@ -66,6 +66,7 @@ export function Picture(props: PictureProps) {
     event.preventDefault();
   };
 
+  const covered = layers.reduce((total, { from, to }) => total + to - from, 0);
   const strokes = useMemo(() => {
     const centre = pointOf([cursor.column, cursor.row], size, region);
     const ofMarks = marks.flatMap(({ kind, points }) =>
@@ -99,7 +100,7 @@ export function Picture(props: PictureProps) {
         userSelect: 'none',
       }}
     >
-      {layers.length === 0 ? <EmptyWarp width={width} height={height} /> : null}
+      {covered < 1 ? <EmptyWarp width={width} height={height} /> : null}
       {layers.map((layer) => (
         <LayerPlane key={layer.name} layer={layer} frame={frame} region={region} />
       ))}

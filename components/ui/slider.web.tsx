@@ -62,7 +62,7 @@ export function Slider(props: SliderProps) {
               onLetGo?.();
             }}
           />
-          <Text variant="mono" tone="inkFaint" style={{ width: 28, pointerEvents: 'none' }} numberOfLines={1} aria-hidden>
+          <Text variant="mono" tone="inkFaint" style={{ minWidth: 28, maxWidth: 72, pointerEvents: 'none' }} numberOfLines={1} aria-hidden>
             {unit}
           </Text>
         </View>

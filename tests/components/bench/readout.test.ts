@@ -54,6 +54,11 @@ describe('the readout', () => {
     ]);
   });
 
+  it('speaks of rows and columns where the phase-encode axis is not known', () => {
+    const items = kspaceReadout({ row: 1, column: 3 }, frame, null, { bad, simulation: null }, 'kspaceOfImage');
+    expect(text(items).slice(0, 4)).toEqual(['row \u22121', 'column 1', 'ky \u22121 1/m', 'kx 1 1/m']);
+  });
+
   it('says nothing of a sample that was never taken', () => {
     const items = kspaceReadout({ row: 1, column: 3 }, frame, 'column', { bad, simulation: untaken }, 'kspace');
     expect(items.slice(4).map(({ value }) => value)).toEqual(['–', '–']);
