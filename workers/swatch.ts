@@ -5,9 +5,10 @@
  */
 import { encode } from 'fast-png';
 import { transform } from '../recon/fourier';
-import { asComplex, type Grid } from '../recon/grid';
+import { asComplex, type ComplexPlane, type Grid } from '../recon/grid';
 import { headGrid, headImage } from '../recon/phantoms/head';
 import { causeOf } from '../recon/recipe-check';
+import { randomOf } from '../recon/random';
 import { prepare, simulate, type PreparedObject } from '../recon/simulate';
 import { swatchAcquisition, swatchRecipe } from '../recon/swatch';
 import { kspaceWindow, logMagnitude } from './encode-planes';
@@ -15,6 +16,9 @@ import type { SwatchJob, ThumbnailResult } from './job';
 
 /** The brightest tissue of the phantom is 1; a little more, so that what adds to it is still seen. */
 const imageWindow = [0, 1.1] as const;
+
+/** Noise of each channel over the brightest tissue: a clean head scan (common practice: signal to noise of 40 to 100). */
+const noise = 0.01;
 
 /** The phantom at each size, with and without a phase. */
 const objects = new Map<string, PreparedObject>();
@@ -36,9 +40,16 @@ function phantom(side: number, phase?: PreparedObject['phase']): PreparedObject 
   const key = `${side} ${phase?.range} ${phase?.seed}`;
   const known = objects.get(key);
   if (known) return known;
-  const object = prepare(asComplex(headImage(headGrid(side))), phase);
+  const object = prepare(withNoise(asComplex(headImage(headGrid(side)))), phase);
   objects.set(key, object);
   return object;
+}
+
+/** White complex noise, the same every time. Without it k-space would be that of a drawing, not of a scan. */
+function withNoise(object: ComplexPlane): ComplexPlane {
+  const random = randomOf(7, 'noise of the swatches');
+  const noisy = (values: Float64Array) => values.map((value) => value + noise * random.normal());
+  return { ...object, re: noisy(object.re), im: noisy(object.im) };
 }
 
 interface Drawing {
@@ -70,6 +81,6 @@ function samplesAt(from: number, step: number, n: number, origin: number, spacin
   });
 }
 
-/** The left half of the one and the right half of the other. */
-const halves = (left: Uint8Array, right: Uint8Array, side: number): Uint8Array =>
-  left.map((level, i) => (i % side < side / 2 ? level : (right[i] as number)));
+/** The left half of the picture, and beside it the middle half of k-space: its centre stays whole. */
+const halves = (picture: Uint8Array, kspace: Uint8Array, side: number): Uint8Array =>
+  picture.map((level, i) => (i % side < side / 2 ? level : (kspace[i - side / 4] as number)));

@@ -1,7 +1,7 @@
 /** The catalogue: causes (with values from an image's scan facts when one is named), reconstructions, corrections. */
 import { useQuery } from '@tanstack/react-query';
-import { listCauses, listCorrections, listReconstructions } from '@/server/contract/catalogue';
-import { call } from './call';
+import { listCauses, listCorrections, listReconstructions, readSwatch } from '@/server/contract/catalogue';
+import { addressOf, call, type CallInput } from './call';
 
 export const causesKey = (imageId?: string) => ['causes', imageId ?? null] as const;
 
@@ -17,3 +17,7 @@ export const useReconstructions = () =>
 
 export const useCorrections = () =>
   useQuery({ queryKey: ['corrections'], queryFn: ({ signal }) => call(listCorrections, {}, signal), staleTime: Infinity });
+
+/** Address of the swatch of a cause. */
+export const swatchOf = (causeId: string, query: NonNullable<CallInput<typeof readSwatch>['query']>): string =>
+  addressOf(readSwatch.path, { causeId }, query);

@@ -1,9 +1,13 @@
-/** One cause: what it looks like, what drives it, what can be changed now, what needs service, and where it is published. */
-import type { ReactNode } from 'react';
+/**
+ * One cause: what it does to a picture and to k-space from mild to strong, what it looks like, what drives it, what can be changed now,
+ * what needs others, the model, where it is published, and the cases that had it. It prints as a page.
+ */
+import { useState } from 'react';
 import { View } from 'react-native';
 import { useCauses } from '@/components/api/catalogue';
+import { ActionBar } from '@/components/ui/action-bar';
 import { BarHead } from '@/components/ui/bar-head';
-import { Badge } from '@/components/ui/badge';
+import { Button } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
 import { LinkText } from '@/components/ui/link-text';
 import { LoadingWarp } from '@/components/ui/loading-warp';
@@ -12,115 +16,120 @@ import { Screen } from '@/components/ui/screen';
 import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
+import { useLayout } from '@/components/ui/use-layout';
 import type { Cause } from '@/server/contract/catalogue';
-import { Section } from '../case/view/section';
-import { Deference } from './deference';
-import { RemedyList } from './remedy-list';
-import { SourceList } from './source-list';
+import { sightingWords } from '../case/words';
+import { BenchOffer } from './bench-offer';
+import { CauseModel, CauseRemedies } from './cause-parts';
+import { alongWords } from './cause-words';
+import { PrintPage } from './print-page';
 import { stageWords } from './stage-words';
+import { StrengthMat } from './strength-mat';
 
-function Line({ name, children }: { name: string; children: ReactNode }) {
-  const { colours } = useTheme();
+/** What is seen and where it runs, in a line. */
+export const factsLine = ({ seen, runsAlong }: Cause): string =>
+  [
+    ...seen.map((sighting) => sightingWords[sighting]),
+    `runs along ${runsAlong === 'both' ? 'both directions' : alongWords[runsAlong]}`,
+  ].join(' · ');
+
+function CauseHead({ cause, gutters }: { cause: Cause; gutters: number }) {
   return (
-    <View
-      style={{ flexDirection: 'row', alignItems: 'baseline', paddingVertical: 6, borderBottomWidth: 1, borderBottomColor: colours.rule }}
-    >
-      <Text variant="small" tone="inkFaint" style={{ width: 100, paddingRight: space(3) }}>
-        {name}
+    <View style={{ paddingHorizontal: gutters, paddingBottom: space(4), gap: 2 }}>
+      <Text variant="title" level={1}>
+        {cause.title}
       </Text>
-      <Text variant="detail" style={{ flex: 1 }}>
-        {children}
+      <Text variant="small" tone="inkSoft">
+        {factsLine(cause)}
       </Text>
     </View>
   );
 }
 
-const runsAlongWords: Record<Cause['runsAlong'], string> = {
-  'phase-encode': 'the phase encoding',
-  readout: 'the readout',
-  both: 'both directions',
-  none: 'neither direction',
-};
-
-const rangeOf = (parameter: Cause['parameters'][number]): string =>
-  'options' in parameter
-    ? parameter.options.map(({ label }) => label).join(', ')
-    : `${parameter.min} to ${parameter.max} ${parameter.unit}${parameter.fromHeader ? `, from ${parameter.fromHeader}` : ''}`.replace(
-        '-',
-        '−',
-      );
-
-function CauseBody({ cause }: { cause: Cause }) {
-  const atHand = cause.remedies.filter(({ who }) => who !== 'licensed service');
-  const service = cause.remedies.filter(({ who }) => who === 'licensed service');
+function CausePhone({ cause }: { cause: Cause }) {
   return (
-    <View style={{ width: '100%', maxWidth: 720, paddingHorizontal: gutter.phone, paddingBottom: space(8) }}>
-      <Text variant="title" level={1}>
-        {cause.title}
-      </Text>
-      <Section title="Looks like">
-        <Line name="image">{cause.looks.image}</Line>
-        <Line name="k-space">{cause.looks.kspace}</Line>
-        <Line name="runs along">{runsAlongWords[cause.runsAlong]}</Line>
-      </Section>
-      {atHand.length > 0 ? (
-        <Section title="What can be changed now">
-          <RemedyList remedies={atHand} />
-        </Section>
-      ) : null}
-      {service.length > 0 ? (
-        <Section title="Needs service">
-          <RemedyList remedies={service} />
-        </Section>
-      ) : null}
-      <Deference />
-      {cause.drivers.length > 0 ? (
-        <Section title="Driven by">
-          {cause.drivers.map(({ fact, does }) => (
-            <Line key={fact} name={fact.toLowerCase()}>
-              {does}
-            </Line>
-          ))}
-        </Section>
-      ) : null}
-      <Section title="Parameters of the model">
-        {cause.parameters.map((parameter) => (
-          <Line key={parameter.id} name={parameter.label.toLowerCase()}>
-            {rangeOf(parameter)}
-          </Line>
-        ))}
-        {cause.needsObjectPhase ? (
-          <View style={{ paddingTop: space(2) }}>
-            <Badge glyph="waits" word="needs the phase of the object" small stitched tone="inkSoft" />
-            <Text variant="detail" tone="inkSoft">
-              Without one the model looks better than it is; the bench starts it with a smooth synthetic phase and shows it.
-            </Text>
-          </View>
-        ) : null}
-      </Section>
-      <Section title="Sources">
-        <SourceList sources={cause.sources} />
-      </Section>
+    <View style={{ width: '100%', maxWidth: 720, alignSelf: 'center' }}>
+      <CauseHead cause={cause} gutters={gutter.phone} />
+      <StrengthMat cause={cause} gutters={gutter.phone} />
+      <View style={{ paddingHorizontal: gutter.phone, paddingBottom: space(8) }}>
+        <CauseModel cause={cause} />
+        <CauseRemedies cause={cause} />
+      </View>
+    </View>
+  );
+}
+
+function CauseWide({ cause }: { cause: Cause }) {
+  const { colours } = useTheme();
+  return (
+    <View style={{ flexDirection: 'row', flexGrow: 1 }}>
+      <View style={{ flex: 1, minWidth: 0, paddingBottom: space(8) }}>
+        <CauseHead cause={cause} gutters={gutter.wide} />
+        <StrengthMat cause={cause} gutters={gutter.wide} />
+        <View style={{ paddingHorizontal: gutter.wide, maxWidth: 820 }}>
+          <CauseModel cause={cause} />
+        </View>
+      </View>
+      <View
+        style={{ width: 460, paddingHorizontal: gutter.wide, paddingBottom: space(8), borderLeftWidth: 1, borderLeftColor: colours.rule }}
+      >
+        <CauseRemedies cause={cause} />
+      </View>
+    </View>
+  );
+}
+
+function NotThere() {
+  return (
+    <View style={{ padding: gutter.phone }}>
+      <EmptyState text="There is no such cause in the catalogue." action={<LinkText label="to the causes" href="/causes" />} />
     </View>
   );
 }
 
 export function CauseScreen({ causeId }: { causeId: string }) {
   const { data, error, refetch } = useCauses();
+  const [offering, setOffering] = useState(false);
+  const wide = useLayout() === 'wide';
   const cause = data?.find(({ id }) => id === causeId);
+  const tryIt = <Button label="try it on the bench" kind="first" grow={!wide} onPress={() => setOffering(true)} />;
+  const screenOnly = { dataSet: { screenOnly: 'true' } };
   return (
-    <Screen
-      title={cause?.title ?? 'Cause'}
-      head={<BarHead back="/causes" backLabel="to the causes" title={cause ? `causes · ${stageWords[cause.stage]}` : 'causes'} faint />}
-    >
-      {error ? <ProblemNotice error={error} onRetry={() => void refetch()} /> : null}
-      {!data && !error ? <LoadingWarp what="fetching the catalogue" /> : null}
-      {cause ? <CauseBody cause={cause} /> : null}
-      {data && !cause ? (
-        <View style={{ padding: gutter.phone }}>
-          <EmptyState text="There is no such cause in the catalogue." action={<LinkText label="to the causes" href="/causes" />} />
-        </View>
-      ) : null}
-    </Screen>
+    <PrintPage>
+      <Screen
+        title={cause?.title ?? 'Cause'}
+        head={
+          <View {...screenOnly} style={wide ? { paddingVertical: space(2), paddingRight: gutter.wide - 4 } : null}>
+            <BarHead
+              back="/causes"
+              backLabel="to the causes"
+              title={cause ? `causes · ${stageWords[cause.stage]}` : 'causes'}
+              faint
+              end={
+                cause ? (
+                  <View style={{ flexDirection: 'row', gap: space(2) }}>
+                    <Button label="print" kind="plain" onPress={() => window.print()} />
+                    {wide ? tryIt : null}
+                  </View>
+                ) : null
+              }
+            />
+          </View>
+        }
+        actions={
+          cause && !wide ? (
+            <View {...screenOnly}>
+              <ActionBar>{tryIt}</ActionBar>
+            </View>
+          ) : null
+        }
+      >
+        {error && !data ? <ProblemNotice error={error} onRetry={() => void refetch()} /> : null}
+        {!data && !error ? <LoadingWarp what="fetching the catalogue" picture={96} /> : null}
+        {cause ? wide ? <CauseWide cause={cause} /> : <CausePhone cause={cause} /> : null}
+        {data && !cause ? <NotThere /> : null}
+        {offering && cause ? <BenchOffer cause={cause} onClose={() => setOffering(false)} /> : null}
+      </Screen>
+    </PrintPage>
   );
 }

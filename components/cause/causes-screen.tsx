@@ -1,143 +1,148 @@
 /**
- * The catalogue: every modelled cause on the warp thread of the signal chain, stage after stage. Filtering reshuffles nothing: the rest
- * become a line of names.
+ * The catalogue as a sample book: every cause as a swatch that its own model computed, in the order of the signal chain. Words and
+ * filters stand in the address. On a wide screen a table of stages and directions, else a list.
  */
 import { useState } from 'react';
 import { ScrollView, View } from 'react-native';
 import { useCauses } from '@/components/api/catalogue';
+import { EmptyState } from '@/components/ui/empty-state';
+import { GlyphButton } from '@/components/ui/glyph-button';
+import { LinkText } from '@/components/ui/link-text';
 import { LoadingWarp } from '@/components/ui/loading-warp';
 import { PageHead } from '@/components/ui/page-head';
-import { Press } from '@/components/ui/press';
-import { Glyph } from '@/components/ui/glyph';
 import { ProblemNotice } from '@/components/ui/problem-notice';
 import { Screen } from '@/components/ui/screen';
-import { stitchedLine } from '@/components/ui/stitches';
-import { Tabs, type Tab } from '@/components/ui/tabs';
 import { Text } from '@/components/ui/text';
-import { gutter, space } from '@/components/ui/theme';
+import { gutter, space, touchTarget } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { useLayout } from '@/components/ui/use-layout';
 import type { Cause } from '@/server/contract/catalogue';
-import { sightings, type Sighting } from '@/server/contract/sighting';
-import { sightingWords } from '../case/words';
-import { causesByStage, stageWords } from './stage-words';
+import { SearchField } from '../case/list/search-field';
+import { fits, isNarrowed, paramsOf, readFilters, type CatalogueFilters, type Params } from './catalogue-filters';
+import { MoreFilters, SeenBar } from './filter-bar';
+import { SampleBook } from './sample-book';
+import { SampleList } from './sample-list';
 
-type SeenFilter = Sighting | 'any';
-
-const fits = (cause: Cause, seen: SeenFilter): boolean => seen === 'any' || cause.seen.includes(seen);
-
-/** Any, and each thing that at least one cause shows. */
-const seenTabs = (causes: readonly Cause[]): Tab<SeenFilter>[] => [
-  { value: 'any', label: 'any', count: causes.length },
-  ...sightings
-    .map((value) => ({ value, label: sightingWords[value], count: causes.filter((cause) => fits(cause, value)).length }))
-    .filter(({ count }) => count > 0),
-];
-
-function CauseRow({ cause }: { cause: Cause }) {
-  const { colours } = useTheme();
-  return (
-    <Press
-      href={{ pathname: '/causes/[causeId]', params: { causeId: cause.id } }}
-      aria-label={`${cause.title}: ${cause.looks.image}`}
-      style={({ hovered }) => ({
-        flexDirection: 'row',
-        alignItems: 'center',
-        gap: space(3),
-        paddingVertical: space(3),
-        borderTopWidth: 1,
-        borderTopColor: colours.rule,
-        backgroundColor: hovered ? colours.clothSunk : 'transparent',
-      })}
-    >
-      <View style={{ flex: 1, gap: 2 }}>
-        <Text variant="caseTitle">{cause.title}</Text>
-        <Text variant="detail" tone="inkSoft">
-          {cause.looks.image}
-        </Text>
-        <Text variant="small" tone="inkFaint">
-          k-space: {cause.looks.kspace}
-        </Text>
-      </View>
-      <Glyph name="right" colour={colours.inkFaint} />
-    </Press>
-  );
+interface CausesScreenProps {
+  /** What stands in the address. */
+  params: Params;
+  onParams: (params: Record<string, string | undefined>) => void;
 }
 
-function Stages({ causes, seen }: { causes: readonly Cause[]; seen: SeenFilter }) {
+const computed = 'computed on the demo phantom, every one SIMULATED · NOT FOR DIAGNOSIS';
+
+/** The foot of the book. */
+function BookFoot() {
   const { colours } = useTheme();
   return (
-    <View style={{ maxWidth: 760, paddingLeft: 40, paddingRight: gutter.phone, paddingBottom: space(8) }}>
-      <View style={{ position: 'absolute', left: 21, top: 24, bottom: 0, width: 2, backgroundColor: colours.ruleStrong }} />
-      {causesByStage(causes).map(({ stage, causes: all }) => {
-        const ofStage = all.filter((cause) => fits(cause, seen));
-        const rest = all.filter((cause) => !fits(cause, seen));
-        return (
-          <View key={stage} role="region" aria-label={stageWords[stage]} style={{ paddingBottom: space(3) }}>
-            <View
-              style={{ flexDirection: 'row', alignItems: 'baseline', justifyContent: 'space-between', paddingTop: 11, paddingBottom: 10 }}
-            >
-              <View
-                style={{
-                  position: 'absolute',
-                  left: -24,
-                  top: 15,
-                  width: 12,
-                  height: 12,
-                  borderWidth: 2,
-                  borderColor: colours.ruleStrong,
-                  backgroundColor: ofStage.length > 0 ? colours.ruleStrong : colours.cloth,
-                }}
-              />
-              <Text variant="heading" level={2}>
-                {stageWords[stage]}
-              </Text>
-              <Text variant="small" tone="inkFaint">
-                {all.length === 0 ? 'none modelled yet' : rest.length > 0 ? `${ofStage.length} of ${all.length}` : all.length}
-              </Text>
-            </View>
-            {ofStage.map((cause) => (
-              <CauseRow key={cause.id} cause={cause} />
-            ))}
-            {rest.length > 0 ? (
-              <View style={[{ paddingTop: space(1), paddingBottom: 10 }, stitchedLine(colours.ruleStrong)]}>
-                <Text variant="detail" tone="inkFaint">
-                  {rest.map(({ title }) => title).join(', ')}
-                </Text>
-              </View>
-            ) : null}
-          </View>
-        );
-      })}
+    <View
+      style={{
+        minHeight: touchTarget,
+        flexDirection: 'row',
+        alignItems: 'center',
+        justifyContent: 'space-between',
+        gap: space(4),
+        marginHorizontal: gutter.wide,
+        borderTopWidth: 1,
+        borderTopColor: colours.rule,
+      }}
+    >
+      <Text variant="small" tone="inkFaint" style={{ flexShrink: 1 }}>
+        When you say what you see, the others stay in their places as stitched outlines: the book never reshuffles.
+      </Text>
+      <Text variant="small" tone="inkFaint">
+        {computed}
+      </Text>
     </View>
   );
 }
 
-export function CausesScreen() {
-  const { colours } = useTheme();
-  const [seen, setSeen] = useState<SeenFilter>('any');
-  const wide = useLayout() === 'wide';
-  const { data, error, refetch } = useCauses();
+function Samples({
+  causes,
+  filters,
+  onAll,
+  wide,
+}: {
+  causes: readonly Cause[];
+  filters: CatalogueFilters;
+  onAll: () => void;
+  wide: boolean;
+}) {
+  const none = isNarrowed(filters) && !causes.some((cause) => fits(cause, filters));
   return (
-    <Screen title="Causes" still head={<PageHead title="Causes" />}>
-      {data ? (
-        <View
-          style={{
-            backgroundColor: colours.clothSunk,
-            borderTopWidth: 1,
-            borderBottomWidth: 1,
-            borderColor: colours.rule,
-            paddingHorizontal: wide ? space(2) : 0,
-          }}
-        >
-          <Tabs label="what is seen" ruled={false} value={seen} onChange={setSeen} tabs={seenTabs(data)} />
+    <View>
+      {none ? (
+        <View role="status" style={{ paddingHorizontal: wide ? gutter.wide : gutter.phone, paddingTop: space(3) }}>
+          <EmptyState text="No cause fits these words and filters." action={<LinkText label="show all" onPress={onAll} />} />
         </View>
       ) : null}
-      <ScrollView style={{ flex: 1 }} contentContainerStyle={{ paddingLeft: wide ? space(2) : 0 }}>
-        {error ? <ProblemNotice error={error} onRetry={() => void refetch()} /> : null}
-        {!data && !error ? <LoadingWarp what="fetching the catalogue" /> : null}
-        {data ? <Stages causes={data} seen={seen} /> : null}
+      {wide ? <SampleBook causes={causes} filters={filters} /> : <SampleList causes={causes} filters={filters} />}
+    </View>
+  );
+}
+
+export function CausesScreen({ params, onParams }: CausesScreenProps) {
+  const wide = useLayout() === 'wide';
+  const { data, error, refetch } = useCauses();
+  const filters = readFilters(params);
+  const [searching, setSearching] = useState(Boolean(filters.q || filters.along || filters.who));
+  const change = (next: CatalogueFilters): void => onParams(paramsOf(next));
+  const search = (
+    <SearchField
+      value={filters.q}
+      onSearch={(q) => change({ ...filters, q })}
+      label="search the causes"
+      placeholder="a word, a scan fact, a remedy"
+    />
+  );
+  const aside = (
+    <Text variant="small" tone="inkFaint">
+      {wide ? 'left half: the picture · right half: its k-space' : 'phantom, SIMULATED'}
+    </Text>
+  );
+  return (
+    <Screen
+      title="Causes"
+      still
+      head={
+        <PageHead
+          title="Causes"
+          end={
+            <>
+              {aside}
+              {wide ? null : (
+                <GlyphButton glyph="search" label="search and filter" expanded={searching} onPress={() => setSearching(!searching)} />
+              )}
+            </>
+          }
+        >
+          {wide ? <View style={{ width: 360, marginLeft: space(6) }}>{search}</View> : null}
+        </PageHead>
+      }
+    >
+      {!wide && searching ? (
+        <View style={{ paddingHorizontal: gutter.phone }}>
+          <View style={{ flexDirection: 'row' }}>{search}</View>
+          <MoreFilters filters={filters} onChange={change} />
+        </View>
+      ) : null}
+      {data ? <SeenBar causes={data} filters={filters} onChange={change} wide={wide} /> : null}
+      <ScrollView style={{ flex: 1 }} contentContainerStyle={{ flexGrow: 1 }}>
+        {error && !data ? <ProblemNotice error={error} onRetry={() => void refetch()} /> : null}
+        {!data && !error ? <LoadingWarp what="fetching the catalogue" picture={84} /> : null}
+        {data && data.length === 0 ? (
+          <View style={{ padding: gutter.phone }}>
+            <EmptyState text="No cause is modelled yet." />
+          </View>
+        ) : null}
+        {data ? <Samples causes={data} filters={filters} onAll={() => change(readFilters({}))} wide={wide} /> : null}
+        {wide ? null : (
+          <Text variant="small" tone="inkFaint" style={{ paddingHorizontal: gutter.phone, paddingBottom: space(4) }}>
+            {computed}
+          </Text>
+        )}
       </ScrollView>
+      {wide && data ? <BookFoot /> : null}
     </Screen>
   );
 }

@@ -8,5 +8,16 @@ export const stageWords: Record<Stage, string> = {
   reconstruction: 'reconstruction',
 };
 
+/** What a stage is about, in a line. */
+export const stageMeanings: Record<Stage, string> = {
+  object: 'what moved or sat wrong',
+  encoding: 'where the lines were laid',
+  receive: 'what was heard',
+  reconstruction: 'how it was put together',
+};
+
+/** The stages that have a cause, each with its causes in the order of the catalogue. */
 export const causesByStage = (causes: readonly Cause[]): { stage: Stage; causes: Cause[] }[] =>
-  (Object.keys(stageWords) as Stage[]).map((stage) => ({ stage, causes: causes.filter((cause) => cause.stage === stage) }));
+  (Object.keys(stageWords) as Stage[])
+    .map((stage) => ({ stage, causes: causes.filter((cause) => cause.stage === stage) }))
+    .filter(({ causes: ofStage }) => ofStage.length > 0);

@@ -82,7 +82,7 @@ export const listCauses = route({
   output: z.array(causeSchema),
 });
 
-/** Left half the picture, right half its k-space, as in the sample book; or one of the two. */
+/** Left half the picture, right half the middle of its k-space, as in the sample book; or one of the two. */
 export const swatchDomains = ['half', 'image', 'kspace'] as const;
 export type SwatchDomain = (typeof swatchDomains)[number];
 export const readSwatch = route({

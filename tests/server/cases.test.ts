@@ -145,6 +145,19 @@ describe('finding cases', () => {
     expect(await titles('q=zeppelin&order=age&descending=true')).toEqual(['Ghosts', 'Fold-in', 'Noise']);
     expect(await titles('q=zeppelin&order=number&limit=1&offset=1')).toEqual(['Fold-in']);
   });
+  it('filters by the cause of the finding that stands: one that was replaced does not count', async () => {
+    const physicist = await application.as('physicist');
+    const filed = await file({ title: 'Copies' });
+    const find = (cause: string) =>
+      physicist.post(`/api/cases/${filed.id}/findings`).send({ cause, confidence: 'consistent', text: 'As far apart' }).expect(200);
+    await find('uniform-undersampling');
+    expect(await titles('cause=uniform-undersampling')).toEqual(['Copies']);
+    await find('periodic-motion');
+    expect(await titles('cause=uniform-undersampling')).toEqual([]);
+    expect(await titles('cause=periodic-motion')).toEqual(['Copies']);
+    const { counts } = (await physicist.get('/api/cases?cause=periodic-motion').expect(200)).body;
+    expect(counts).toEqual({ reported: 1, 'under-investigation': 0, 'awaiting-sign-off': 0, closed: 0 });
+  });
   it('counts what there is in each state under the other filters', async () => {
     const agent = await application.as('technologist');
     const answer = await agent.get('/api/cases?q=zeppelin&state=under-investigation').expect(200);

@@ -1,5 +1,7 @@
+import { useLocalSearchParams, useRouter } from 'expo-router';
 import { CausesScreen } from '@/components/cause/causes-screen';
 
 export default function CausesRoute() {
-  return <CausesScreen />;
+  const router = useRouter();
+  return <CausesScreen params={useLocalSearchParams()} onParams={router.setParams} />;
 }

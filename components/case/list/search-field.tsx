@@ -11,17 +11,23 @@ interface SearchFieldProps {
   value: string;
   onSearch: (words: string) => void;
   autoFocus?: boolean;
+  /** What is searched, as it is spoken. */
+  label?: string;
+  placeholder?: string;
 }
+
+const ofCases = { label: 'search the cases', placeholder: 'number, words, scanner, coil' };
 
 const restMs = 250;
 
-export function SearchField({ value, onSearch, autoFocus = false }: SearchFieldProps) {
+export function SearchField({ value, onSearch, autoFocus = false, ...words }: SearchFieldProps) {
   const { colours } = useTheme();
-  const [words, setWords] = useState(value);
+  const { label, placeholder } = { ...ofCases, ...words };
+  const [typed, setTyped] = useState(value);
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
   useEffect(() => () => clearTimeout(timer.current), []);
   const type = (text: string): void => {
-    setWords(text);
+    setTyped(text);
     clearTimeout(timer.current);
     timer.current = setTimeout(() => onSearch(text.trim()), restMs);
   };
@@ -40,15 +46,15 @@ export function SearchField({ value, onSearch, autoFocus = false }: SearchFieldP
     >
       <Glyph name="search" colour={colours.ink} />
       <TextInput
-        value={words}
+        value={typed}
         onChangeText={type}
         autoFocus={autoFocus}
-        placeholder="number, words, scanner, coil"
-        aria-label="search the cases"
+        placeholder={placeholder}
+        aria-label={label}
         inputMode="search"
         style={[textVariants.detail, { flex: 1, height: 40, minWidth: 0, color: colours.ink }]}
       />
-      {words ? <GlyphButton glyph="shut" label="clear the search" onPress={() => type('')} /> : null}
+      {typed ? <GlyphButton glyph="shut" label="clear the search" onPress={() => type('')} /> : null}
     </View>
   );
 }

@@ -1,11 +1,10 @@
 /** The recipe that the bench starts with. */
 import { startRecipe } from '@/components/bench/recipe-start';
-import { describeCause, describeReconstruction } from '@/recon/catalogue';
-import { causes as modelled } from '@/recon/causes';
-import { reconstructions } from '@/recon/reconstructions';
+import { causeWith } from '../cause/causes';
 
-const causes = modelled.map((cause) => describeCause(cause));
-const methods = reconstructions.map((method) => describeReconstruction(method));
+const swing = { id: 'swing', label: 'Swing', unit: 'rad', min: 0, max: 2, step: 0.1, initial: 0.6 };
+const causes = [causeWith({ id: 'motion', parameters: [swing] }), causeWith({ id: 'undersampling', needsObjectPhase: true })];
+const methods = [{ id: 'zero-filled', title: 'Zero-filled', parameters: [], looks: { image: '', kspace: '' }, sources: [] }];
 
 test('Without a cause in the address nothing is done yet', () => {
   expect(startRecipe(methods, causes, undefined)).toEqual({
@@ -16,13 +15,13 @@ test('Without a cause in the address nothing is done yet', () => {
 });
 
 test('A cause in the address is the first step, at its initial values', () => {
-  const { steps } = startRecipe(methods, causes, 'periodic-motion');
-  expect(steps).toEqual([{ cause: 'periodic-motion', parameters: { frequency: 0.25, phaseSwing: 0.6, start: 0 } }]);
+  const { steps } = startRecipe(methods, causes, 'motion');
+  expect(steps).toEqual([{ cause: 'motion', parameters: { swing: 0.6 } }]);
 });
 
 test('It brings an object phase where the cause needs one', () => {
-  expect(startRecipe(methods, causes, 'uniform-undersampling').objectPhase).toEqual({ range: 1.6, seed: 1 });
-  expect(startRecipe(methods, causes, 'periodic-motion').objectPhase).toBeUndefined();
+  expect(startRecipe(methods, causes, 'undersampling').objectPhase).toEqual({ range: 1.6, seed: 1 });
+  expect(startRecipe(methods, causes, 'motion').objectPhase).toBeUndefined();
 });
 
 test('A cause that is not in the catalogue starts nothing', () => {

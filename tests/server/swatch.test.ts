@@ -1,0 +1,58 @@
+/** Swatches over HTTP: every cause of the catalogue on the head phantom, and what is not there. */
+import { decode } from 'fast-png';
+import { causes } from '../../recon/causes';
+import { openApplication, type Application } from './application';
+import { binary } from './planes';
+
+let application: Application;
+let agent: Awaited<ReturnType<Application['as']>>;
+beforeAll(async () => {
+  application = await openApplication();
+  agent = await application.as('technologist');
+});
+afterAll(() => application.close());
+
+async function levelsOf(causeId: string, query: object) {
+  const answer = await agent.get(`/api/causes/${causeId}/swatch`).query(query).buffer().parse(binary).expect(200);
+  expect(answer.type).toBe('image/png');
+  const { width, height, channels, depth, data } = decode(answer.body);
+  expect([width, height, channels, depth]).toEqual([128, 128, 1, 8]);
+  return data;
+}
+
+/** The most grey levels between two pictures at any pixel: a spike is one sample. */
+const difference = (a: ArrayLike<number>, b: ArrayLike<number>): number =>
+  Array.from(a).reduce((most, level, i) => Math.max(most, Math.abs(level - (b[i] as number))), 0);
+
+describe.each(causes.map(({ id }) => id))('the swatch of %s', (id) => {
+  it.each(['image', 'kspace', 'half'])('is a picture of 128 pixels a side (%s), other when strong than when mild', async (domain) => {
+    const mild = await levelsOf(id, { domain, strength: 0 });
+    const strong = await levelsOf(id, { domain, strength: 1 });
+    // Ten levels of 255 are seen at an edge (common practice: two per cent of contrast is the threshold). A cause below is to state `strength`.
+    expect(difference(mild, strong)).toBeGreaterThan(10);
+  });
+});
+
+it('half is the left half of the picture, and beside it the middle half of k-space', async () => {
+  const [first] = causes;
+  if (!first) throw new Error('the catalogue is empty');
+  const of = (domain: string) => levelsOf(first.id, { domain, strength: 0.4 });
+  const [half, image, kspace] = [await of('half'), await of('image'), await of('kspace')];
+  const row = (data: ArrayLike<number>, from: number, to: number) => Array.from(data).slice(64 * 128 + from, 64 * 128 + to);
+  expect(row(half, 0, 64)).toEqual(row(image, 0, 64));
+  expect(row(half, 64, 128)).toEqual(row(kspace, 32, 96));
+});
+
+it('is the same picture every time, and may be kept', async () => {
+  const ask = () => agent.get('/api/causes/periodic-motion/swatch?strength=0.7&side=256').buffer().parse(binary).expect(200);
+  const [once, again] = [await ask(), await ask()];
+  expect(Buffer.compare(once.body, again.body)).toBe(0);
+  expect(decode(once.body).width).toBe(256);
+  expect(once.get('cache-control')).toMatch(/max-age=\d+/);
+});
+
+it('a cause that is not in the catalogue is not there', () => agent.get('/api/causes/gremlins/swatch').expect(404));
+
+it.each(['strength=1.2', 'strength=-0.1', 'domain=wavelet', 'side=4096'])('%s is refused', (query) =>
+  agent.get(`/api/causes/periodic-motion/swatch?${query}`).expect(400),
+);
