@@ -1,8 +1,10 @@
 /** Which lines partial Fourier takes. What becomes of the others is checked with the reconstructions. */
 import type { Acquisition } from '../../../recon/acquisition';
+import { partialFourier } from '../../../recon/causes/partial-fourier';
 import { linesOf, takenLines } from '../../../recon/lines';
 import { simulate } from '../../../recon/simulate';
 import { reference } from '../../reference/values';
+import { actOnObject } from '../act-on-kspace';
 import { noisePlane } from '../planes';
 
 const acquisition: Acquisition = { phaseEncode: 'row' };
@@ -41,6 +43,13 @@ describe('Partial Fourier', () => {
     expect(column(kspace, -20)).toBe(0);
     expect(column(kspace, 20)).toBeGreaterThan(1);
     expect(column(kspaceOfImage(), -20)).toBeCloseTo(column(kspaceOfImage(), 20), 10);
+  });
+
+  test('along the readout takes the later part of every echo: the band about its middle is complete', () => {
+    const { taken } = actOnObject(partialFourier, noisePlane(5, 32), { fraction: 0.75, direction: 'readout' });
+    for (let row = 0; row < 5; row++) {
+      expect(Array.from(taken.subarray(row * 32, (row + 1) * 32))).toEqual([...Array<number>(8).fill(0), ...Array<number>(24).fill(1)]);
+    }
   });
 
   test('takes the nearest whole number of an odd count of lines', () => {
