@@ -23,6 +23,7 @@ export const clipping = defineCause({
     level: quantity({ label: 'Level that the receiver holds', unit: '× max |K|', min: 0.05, max: 1, step: 0.05, initial: 0.2 }),
   },
   identity: { level: 1 },
+  strength: { level: [0.6, 0.05] },
   looks: {
     image: 'Washed out, with a pale halo that reaches into the air and weak broad contrast, some of it inverted; edges stay.',
     kspace: 'A flat plateau in the centre: the largest samples are all equal in their real or imaginary part.',

@@ -67,6 +67,8 @@ export const gradientNonLinearity = defineCause({
     }),
   },
   identity: { displacement: 0 },
+  /** A field of view of 24 cm reaches 12 cm out, where a fifth of it is left. */
+  strength: { displacement: [5, 20] },
   looks: {
     image:
       'Straight lines bend towards the edge of a large field of view; the periphery is drawn in and brighter, or pushed out and darker.',
