@@ -5,6 +5,7 @@ import { centredGrid, complexZeros } from '../../../recon/grid';
 import type { Plane } from '../../../recon/grid';
 import { transform } from '../../../recon/fourier';
 import { simulate } from '../../../recon/simulate';
+import { objectReference } from '../../reference/object';
 import { reference } from '../../reference/values';
 import { box, energy, noisePlane } from '../planes';
 
@@ -12,7 +13,7 @@ const motion = (frequency: number, phaseSwing: number, start = 0) => ({
   cause: 'periodic-motion',
   parameters: { frequency, phaseSwing, start },
 });
-const recipeOf = (...steps: { cause: string; parameters: Record<string, number> }[]) => ({
+const recipeOf = (...steps: { cause: string; parameters: Record<string, number | string> }[]) => ({
   steps,
   reconstruction: { method: 'zero-filled', parameters: {} },
   seed: 1,
@@ -125,5 +126,85 @@ describe('What k-space shows', () => {
     // a·sin(2π·f·T·n + φ), n counted from the first line.
     expect(Math.cos(turn)).toBeCloseTo(Math.cos(Math.sin(2 * Math.PI * 0.4 * 0.5 * line)), 12);
     expect(Math.sin(turn)).toBeCloseTo(Math.sin(Math.sin(2 * Math.PI * 0.4 * 0.5 * line)), 12);
+  });
+});
+
+describe('What else can move', () => {
+  const moving = (parameters: Record<string, number | string>) =>
+    recipeOf({ cause: 'periodic-motion', parameters: { frequency: 0.25, start: 0, ...parameters } });
+
+  test('A brightness that changes by 20 % has ghosts of a tenth, one on each side', () => {
+    const { image } = simulate(box(128, [40, 60], [50, 70]), moving({ moves: 'amplitude', modulation: 0.2 }), acquisition);
+    for (const side of [-1, 1]) {
+      // 1e-9 is the tolerance of the reference; rows 50 and 50 ± 16 are clear of one another.
+      expect(image.values[((50 + side * 16 + 128) % 128) * 128 + 60]).toBeCloseTo(0.5 * 0.2, 9);
+    }
+    expect(objectReference.brightnessGhost).toBe(0.5 * 0.2);
+  });
+
+  test('A displacement along the phase encoding turns line k by −2πk·A·sin(ωt)/N: 3 mm are 2 pixels of 1.5 mm', () => {
+    const point = complexZeros(centredGrid(64, 4, [1.5e-3, 1e-3]));
+    point.re[32 * 4 + 2] = 1;
+    const { kspace } = simulate(point, moving({ moves: 'along-phase-encode', displacement: 3 }), acquisition);
+    for (let line = 0; line < 64; line++) {
+      const expected = (-2 * Math.PI * (line - 32) * 2 * Math.sin(2 * Math.PI * 0.125 * line)) / 64;
+      const i = line * 4 + 1;
+      const turn = Math.atan2(kspace.im[i] ?? NaN, kspace.re[i] ?? NaN) - expected;
+      expect(Math.cos(turn)).toBeCloseTo(1, 12);
+    }
+  });
+
+  test('A displacement along the readout still ghosts along the phase encoding, J_j(2πk·A/M) at readout frequency k', () => {
+    // A bar that is one wave of frequency 4 along the readout: all of its signal has k = ±4.
+    const wave = complexZeros(centredGrid(64, 32, [1e-3, 1e-3]));
+    for (let row = 29; row < 35; row++) {
+      for (let column = 0; column < 32; column++) wave.re[row * 32 + column] = Math.cos((2 * Math.PI * 4 * column) / 32);
+    }
+    const { image } = simulate(wave, moving({ moves: 'along-readout', displacement: 1 }), acquisition);
+    const a = (2 * Math.PI * 4 * 1) / 32;
+    // Ghosts 8 rows away; an odd order of a real wave is a sine where its parent is a cosine, so that peaks are compared.
+    const peak = (row: number) => Math.max(...image.values.subarray(row * 32, row * 32 + 32));
+    expect(Math.abs(peak(31) - jv(0, a))).toBeLessThan(1e-6);
+    expect(Math.abs(peak(31 + 8) - jv(1, a))).toBeLessThan(2 * jv(7, a) + 1e-9);
+    expect(Math.abs(peak(31 + 16) - jv(2, a))).toBeLessThan(2 * jv(6, a) + 1e-9);
+  });
+
+  test('Edges ghost more than what is even: a displaced bar has its ghosts at its ends', () => {
+    const { image } = simulate(box(64, [26, 38], [20, 44]), moving({ moves: 'along-readout', displacement: 1 }), acquisition);
+    const ghost = (column: number) => image.values[(32 + 8) * 64 + column] ?? NaN;
+    expect(ghost(20)).toBeGreaterThan(5 * ghost(32));
+  });
+});
+
+describe('Averages', () => {
+  const swing = { moves: 'amplitude', modulation: 0.3, frequency: 0.25 };
+  const four: Acquisition = { ...acquisition, averages: 4 };
+  /** How much the first line of a point is brighter than the still one. */
+  const first = (parameters: Record<string, number | string>, of: Acquisition) => {
+    const point = complexZeros(centredGrid(16, 1, [1e-3, 1e-3]));
+    point.re[8] = 1;
+    const { kspace } = simulate(point, recipeOf({ cause: 'periodic-motion', parameters: { ...swing, ...parameters } }), of);
+    return kspace.re.map((re) => re * 4 - 1);
+  };
+
+  test('as the inner loop leave |sin(πf·TR·A)/(A·sin(πf·TR))| of the swing: 0.653 for four at 0.25 Hz and 0.5 s', () => {
+    // The middle of four averages lies 0.75 s after the first, 67.5°: started that much before, the first line holds the crest.
+    const [left] = first({ averaging: 'inner-loop', start: 292.5 }, four);
+    const attenuation = Math.abs(Math.sin(Math.PI * 0.25 * 0.5 * 4) / (4 * Math.sin(Math.PI * 0.25 * 0.5)));
+    expect((left ?? NaN) / 0.3).toBeCloseTo(attenuation, 12);
+    expect(attenuation).toBeCloseTo(objectReference.innerLoopAttenuation, 3);
+  });
+
+  test('as the outer loop leave one TR between lines, and average what each pass saw', () => {
+    // 16 lines of 0.5 s are two whole cycles: every pass sees the same, and nothing is averaged away.
+    const once = first({ averaging: 'left-over', start: 10 }, { ...acquisition, averages: 1 });
+    const passes = first({ averaging: 'outer-loop', start: 10 }, four);
+    passes.forEach((value, line) => expect(value).toBeCloseTo(once[line] ?? NaN, 12));
+    // At 0.28125 Hz a pass is two and a quarter cycles: four passes, a quarter of a cycle apart, average to nothing.
+    first({ averaging: 'outer-loop', frequency: 0.28125 }, four).forEach((value) => expect(value).toBeCloseTo(0, 12));
+  });
+
+  test('leave the swing as it is given when it is what they leave', () => {
+    expect(first({ averaging: 'left-over', start: 0 }, four)[0]).toBeCloseTo(0.3, 12);
   });
 });

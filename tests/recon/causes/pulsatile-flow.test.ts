@@ -1,0 +1,58 @@
+/** Pulsatile flow: a row of vessel-sized ghosts (Perman et al. 1986), their places (Wood & Henkelman 1985) and brightness (Jacobi–Anger). */
+import { jv } from 'cephes';
+import type { Acquisition } from '../../../recon/acquisition';
+import { transform } from '../../../recon/fourier';
+import { simulate } from '../../../recon/simulate';
+import { box, largestDifference, noisePlane } from '../planes';
+
+const acquisition: Acquisition = { phaseEncode: 'column', repetitionTime: 0.1, averages: 1 };
+/** Still tissue on the left, a vessel of 6 rows and columns in the middle of an empty band. */
+const object = box(96, [10, 86], [5, 30]);
+for (let row = 45; row < 51; row++) object.re.fill(1, row * 96 + 60, row * 96 + 66);
+const vessel = { alongPhaseEncode: 0, alongReadout: 15 / 96, radius: 0.065, start: 0, meanPhase: 0 };
+const flow = (parameters: Record<string, number>) => ({
+  steps: [{ cause: 'pulsatile-flow', parameters: { ...vessel, frequency: 1.25, phaseSwing: 0, brightness: 0, ...parameters } }],
+  reconstruction: { method: 'zero-filled', parameters: {} },
+  seed: 1,
+});
+/** 0.1 s · 1.25 Hz: 1/8 of the field of view, 12 of 96 lines: twelve whole cycles. */
+const step = 12;
+
+test('Ghosts of order j lie j·frac(TR·f) of the field of view away and have the amplitude J_j of the phase swing', () => {
+  const { image } = simulate(object, flow({ phaseSwing: 0.8 }), acquisition);
+  for (const j of [0, 1, 2, 3]) {
+    // Orders j − 8 fall on order j: J_5(0.8) = 1e-4 on J_3.
+    expect(Math.abs((image.values[(48 + step * j) * 96 + 63] ?? NaN) - Math.abs(jv(j, 0.8)))).toBeLessThan(
+      2 * Math.abs(jv(8 - j, 0.8)) + 1e-9,
+    );
+  }
+  expect(image.values[(48 + step / 2) * 96 + 63]).toBeCloseTo(0, 9);
+});
+
+test('A change of brightness by m has one ghost on each side, of m/2', () => {
+  const { image } = simulate(object, flow({ brightness: 0.4 }), acquisition);
+  expect(image.values[48 * 96 + 63]).toBeCloseTo(1, 10);
+  for (const side of [-1, 1]) expect(image.values[(48 + side * step) * 96 + 63]).toBeCloseTo(0.2, 10);
+  expect(image.values[(48 + 2 * step) * 96 + 63]).toBeCloseTo(0, 10);
+});
+
+test('What lies outside the vessel does not ghost', () => {
+  const { image } = simulate(object, flow({ phaseSwing: 2, brightness: 0.5 }), acquisition);
+  for (let row = 0; row < 96; row++) {
+    for (let column = 0; column < 50; column++)
+      expect(image.values[row * 96 + column]).toBeCloseTo(object.re[row * 96 + column] ?? NaN, 10);
+  }
+});
+
+test('A mean phase alone turns the vessel and makes no ghost', () => {
+  const { image } = simulate(object, flow({ meanPhase: 1.5 }), acquisition);
+  image.values.forEach((value, i) => expect(value).toBeCloseTo(object.re[i] ?? NaN, 10));
+});
+
+test('A vessel of no size beside the grid changes little: its half pixel at most', () => {
+  const input = noisePlane(24, 24);
+  const before = transform(input);
+  const { kspace } = simulate(input, flow({ radius: 0, phaseSwing: 1 }), { ...acquisition });
+  // One pixel, at half weight, turned by at most 1 rad: |ΔK| ≤ ½·|e^i − 1|·|I|/√(N·M), |I| below 4.
+  expect(largestDifference(kspace, before)).toBeLessThan((0.5 * 4) / 24);
+});
