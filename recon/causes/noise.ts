@@ -83,7 +83,6 @@ export const noise = defineCause({
     coils: quantity({ label: 'Coils combined by root sum of squares', unit: 'coils', min: 1, max: 32, step: 1, initial: 1 }),
   },
   strength: { snr: [40, 4] },
-  strength: { snr: [40, 4] },
   looks: {
     image:
       'Grain over the whole image, air included; in air the magnitude has a floor, which rises with the number of coils, and contrast of dark tissue is lost.',
