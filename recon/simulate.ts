@@ -4,24 +4,27 @@
  * of one cause act in the order of the recipe.
  */
 import type { Acquisition } from './acquisition';
-import type { Cause, Context, Encoded } from './cause';
+import type { Encoded } from './cause';
+import type { Action, Chain } from './chain';
+import { chainOf } from './chain';
 import { causes } from './causes/index';
 import { transform } from './fourier';
 import type { ComplexPlane, Plane } from './grid';
 import { asComplex, magnitude } from './grid';
-import { fullyTaken } from './lines';
 import type { ObjectPhase } from './object-phase';
 import { withObjectPhase } from './object-phase';
-import type { ParameterValues, Recipe } from './recipe';
+import type { Recipe } from './recipe';
 import { causeOf, checkRecipe, completeRecipe, reconstructionOf } from './recipe-check';
 import { randomOf } from './random';
 
-/** An object with its phase; its transform is worked out once, when it is first asked for, and kept with it. */
+/** An object with its phase; its transform is worked out once, when it is first asked for, and kept with it, and so is one plane between
+ *  the steps of the last recipe. */
 export interface PreparedObject {
   readonly source: ComplexPlane;
   readonly phase: ObjectPhase | undefined;
   readonly object: ComplexPlane;
   kspace(): ComplexPlane;
+  readonly chain: Chain;
 }
 
 export interface Simulation {
@@ -36,8 +39,9 @@ export interface Simulation {
 /** What a caller keeps between simulations of one object, so that its transform is not repeated while a slider moves. */
 export function prepare(source: ComplexPlane, phase?: ObjectPhase): PreparedObject {
   const object = phase ? withObjectPhase(source, phase) : source;
-  let kspace: ComplexPlane | undefined;
-  return { source, phase, object, kspace: () => (kspace ??= transform(object)) };
+  let transformed: ComplexPlane | undefined;
+  const kspace = (): ComplexPlane => (transformed ??= transform(object));
+  return { source, phase, object, kspace, chain: chainOf(object, kspace) };
 }
 
 const isPrepared = (object: ComplexPlane | PreparedObject): object is PreparedObject => 'source' in object;
@@ -46,12 +50,6 @@ function withPhaseOf(object: ComplexPlane | PreparedObject, { objectPhase: phase
   if (!isPrepared(object)) return prepare(object, phase);
   const isSame = object.phase?.range === phase?.range && object.phase?.seed === phase?.seed;
   return isSame ? object : prepare(object.source, phase);
-}
-
-interface Action {
-  readonly cause: Cause;
-  readonly parameters: ParameterValues;
-  readonly context: Context;
 }
 
 /** The steps that are switched on, in the order of the signal chain. The stream of a step is named by its cause and by how many
@@ -64,7 +62,13 @@ function actionsOf(recipe: Recipe, acquisition: Acquisition): Action[] {
     seen.set(id, occurrence + 1);
     const cause = causeOf(id);
     if (!cause || enabled === false) continue;
-    actions.push({ cause, parameters, context: { acquisition, random: randomOf(recipe.seed, `${id} ${occurrence}`) } });
+    const stream = `${id} ${occurrence}`;
+    actions.push({
+      key: JSON.stringify([stream, parameters, recipe.seed, acquisition]),
+      cause,
+      parameters,
+      context: () => ({ acquisition, random: randomOf(recipe.seed, stream) }),
+    });
   }
   return actions.sort((a, b) => causes.indexOf(a.cause) - causes.indexOf(b.cause));
 }
@@ -81,15 +85,7 @@ export function simulate(object: ComplexPlane | PreparedObject, recipe: Recipe, 
   if (fault) throw RangeError(`${fault.path.join('.')}: ${fault.message}`);
 
   const prepared = withPhaseOf(object, complete);
-  const actions = actionsOf(complete, acquisition);
-  let changed = prepared.object;
-  for (const { cause, parameters, context } of actions) {
-    if (cause.domain === 'image') changed = cause.apply(changed, parameters, context);
-  }
-  let kspace = fullyTaken(changed === prepared.object ? prepared.kspace() : transform(changed));
-  for (const { cause, parameters, context } of actions) {
-    if (cause.domain === 'kspace') kspace = cause.apply(kspace, parameters, context);
-  }
+  const kspace = prepared.chain.run(actionsOf(complete, acquisition));
   const context = { acquisition, random: randomOf(complete.seed, method.id) };
   const image = magnitude(method.reconstruct(kspace, complete.reconstruction.parameters, context));
   return { kspace, image, kspaceOfImage: () => transform(asComplex(image)) };

@@ -5,9 +5,7 @@
  * Source: Van de Walle, IEEE Trans Med Imaging 2000;19:1160 (from memory); Koay, Magn Reson Med 2007;58:430, doi 10.1002/mrm.21292.
  */
 import { besselJ1 } from '../bessel';
-import { reciprocalGrid } from '../fourier';
-import type { ComplexPlane, Grid, Plane } from '../grid';
-import { complexZeros } from '../grid';
+import type { Grid } from '../grid';
 
 export interface Ellipse {
   /** Added to what lies beneath. */
@@ -32,28 +30,6 @@ export function ellipseSignal({ density, a, b, x, y, angle }: Ellipse, kx: numbe
   const size = density * a * b * (q < 1e-9 ? Math.PI : besselJ1(2 * Math.PI * q) / q);
   const phase = -2 * Math.PI * (kx * x + ky * y);
   return { re: size * Math.cos(phase), im: size * Math.sin(phase) };
-}
-
-/** Exact k-space of the shapes, [row, column] on the reciprocal of `image`, in the scale of the orthonormal transform of its pixels. */
-export function ellipseKspace(shapes: readonly Ellipse[], image: Grid): ComplexPlane {
-  const kspace = complexZeros(reciprocalGrid(image));
-  const scale = 1 / (image.spacing[0] * image.spacing[1] * Math.sqrt(image.rows * image.columns));
-  for (let row = 0; row < kspace.rows; row++) {
-    const ky = kspace.origin[0] + row * kspace.spacing[0];
-    for (let column = 0; column < kspace.columns; column++) {
-      const kx = kspace.origin[1] + column * kspace.spacing[1];
-      let re = 0;
-      let im = 0;
-      for (const shape of shapes) {
-        const signal = ellipseSignal(shape, kx, ky);
-        re += signal.re;
-        im += signal.im;
-      }
-      kspace.re[row * kspace.columns + column] = re * scale;
-      kspace.im[row * kspace.columns + column] = im * scale;
-    }
-  }
-  return kspace;
 }
 
 /** Points per pixel and axis where an edge crosses the pixel. */
@@ -83,23 +59,18 @@ function coverage(shape: Ellipse, x: number, y: number, [height, width]: Grid['s
   return within / supersampling ** 2;
 }
 
-/** The shapes drawn on `grid`: each pixel is the mean density over its area, edges by 16 × 16 points. */
-export function ellipseImage(shapes: readonly Ellipse[], grid: Grid): Plane {
-  const { rows, columns, spacing, origin } = grid;
-  const values = new Float64Array(rows * columns);
-  for (const shape of shapes) {
-    const reach = Math.max(shape.a, shape.b);
-    const firstRow = Math.max(0, Math.floor((shape.y - reach - origin[0]) / spacing[0]));
-    const lastRow = Math.min(rows - 1, Math.ceil((shape.y + reach - origin[0]) / spacing[0]));
-    const firstColumn = Math.max(0, Math.floor((shape.x - reach - origin[1]) / spacing[1]));
-    const lastColumn = Math.min(columns - 1, Math.ceil((shape.x + reach - origin[1]) / spacing[1]));
-    for (let row = firstRow; row <= lastRow; row++) {
-      for (let column = firstColumn; column <= lastColumn; column++) {
-        const part = coverage(shape, origin[1] + column * spacing[1], origin[0] + row * spacing[0], spacing);
-        const i = row * columns + column;
-        values[i] = (values[i] as number) + shape.density * part;
-      }
+/** Adds the ellipse to `values` on `grid`: each pixel its mean density over the area of the pixel, edges by 16 × 16 points. */
+export function paintEllipse(shape: Ellipse, { rows, columns, spacing, origin }: Grid, values: Float64Array): void {
+  const reach = Math.max(shape.a, shape.b);
+  const firstRow = Math.max(0, Math.floor((shape.y - reach - origin[0]) / spacing[0]));
+  const lastRow = Math.min(rows - 1, Math.ceil((shape.y + reach - origin[0]) / spacing[0]));
+  const firstColumn = Math.max(0, Math.floor((shape.x - reach - origin[1]) / spacing[1]));
+  const lastColumn = Math.min(columns - 1, Math.ceil((shape.x + reach - origin[1]) / spacing[1]));
+  for (let row = firstRow; row <= lastRow; row++) {
+    for (let column = firstColumn; column <= lastColumn; column++) {
+      const part = coverage(shape, origin[1] + column * spacing[1], origin[0] + row * spacing[0], spacing);
+      const i = row * columns + column;
+      values[i] = (values[i] as number) + shape.density * part;
     }
   }
-  return { rows, columns, spacing, origin, values };
 }

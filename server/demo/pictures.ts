@@ -5,8 +5,9 @@
 import { randomUUID } from 'node:crypto';
 import type { Acquisition, PhaseEncode } from '../../recon/acquisition';
 import { asComplex, type ComplexPlane, type Plane } from '../../recon/grid';
-import { ellipseImage, type Ellipse } from '../../recon/phantoms/ellipse';
+import type { Ellipse } from '../../recon/phantoms/ellipse';
 import { headGrid, headShapes } from '../../recon/phantoms/head';
+import { shapeImage } from '../../recon/phantoms/shape';
 import { randomOf } from '../../recon/random';
 import type { Recipe } from '../../recon/recipe';
 import { simulate } from '../../recon/simulate';
@@ -38,7 +39,7 @@ export interface DemoPicture {
 /** The picture, as it comes through the door. */
 export function demoPicture({ seed, withArm = false, fault, acquisition, header }: DemoPicture): AcceptedImage {
   const shapes = withArm ? [...headShapes, ...arm] : headShapes;
-  const object = withNoise(asComplex(ellipseImage(shapes, headGrid(matrix))), seed);
+  const object = withNoise(asComplex(shapeImage(shapes, headGrid(matrix))), seed);
   const recipe: Recipe = { steps: [], ...fault, reconstruction: { method: 'zero-filled', parameters: {} }, seed };
   const { image } = simulate(object, recipe, acquisition);
   const read = readDicom(asFile(image, { ...header, ...phaseEncodeHeader(acquisition.phaseEncode, image) }));

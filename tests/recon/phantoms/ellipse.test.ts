@@ -2,7 +2,8 @@
 import { transform } from '../../../recon/fourier';
 import { asComplex, centredGrid } from '../../../recon/grid';
 import type { Ellipse } from '../../../recon/phantoms/ellipse';
-import { ellipseImage, ellipseKspace, ellipseSignal } from '../../../recon/phantoms/ellipse';
+import { ellipseSignal } from '../../../recon/phantoms/ellipse';
+import { shapeImage, shapeKspace } from '../../../recon/phantoms/shape';
 import { reference } from '../../reference/values';
 
 const radians = (degrees: number): number => (degrees * Math.PI) / 180;
@@ -37,15 +38,15 @@ describe('The picture of an ellipse', () => {
   const shape: Ellipse = { density: 1, a: 0.021, b: 0.034, x: 0.0072, y: -0.0051, angle: radians(31) };
 
   test('has the area of the ellipse, to the grain of the 16 × 16 points on its edge', () => {
-    const { values } = ellipseImage([shape], grid);
+    const { values } = shapeImage([shape], grid);
     const area = values.reduce((sum, value) => sum + value, 0) * pixel ** 2;
     // About 2π·28 ≈ 180 edge pixels, each with an error of at most 1/16 of one row of points, random in sign: √180/16² pixels of 2240.
     expect(Math.abs(area / (Math.PI * shape.a * shape.b) - 1)).toBeLessThan(3e-5);
   });
 
   test('transforms to the closed form for |k| ≤ N/4, but for aliases of the pixel, which are bounded', () => {
-    const exact = ellipseKspace([shape], grid);
-    const drawn = transform(asComplex(ellipseImage([shape], grid)));
+    const exact = shapeKspace([shape], grid);
+    const drawn = transform(asComplex(shapeImage([shape], grid)));
     // A pixel is a mean over its area: S(k) is multiplied by sinc(kx·Δ)·sinc(ky·Δ) and then sampled, so that the transform is the sum of
     // that product over k + m/Δ. The term m = 0 is the closed form; the others are bounded by |J1(2πq)|/q ≤ 1/(π·q^1.5), q the radius of
     // the ellipse in k, at least |k|·min(a, b). Terms beyond |m| = 12 fall as m^−2.5 and add less than 3 % of the first.

@@ -1,0 +1,8 @@
+/** Every phantom of materials. */
+import { abdomenPhantom } from './abdomen';
+import { headPhantom } from './head';
+import type { Phantom } from './phantom';
+import { resolutionPhantom } from './resolution';
+import { vialPhantom } from './vials';
+
+export const phantoms: readonly Phantom[] = [headPhantom, abdomenPhantom, resolutionPhantom, vialPhantom];
