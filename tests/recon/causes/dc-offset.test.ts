@@ -1,6 +1,7 @@
 /** A constant offset of the receiver: one dot; drifting, a dotted line. */
 import { inverse, transform } from '../../../recon/fourier';
 import type { ComplexPlane } from '../../../recon/grid';
+import { centredGrid, complexZeros } from '../../../recon/grid';
 import type { Step } from '../../../recon/recipe';
 import { simulate } from '../../../recon/simulate';
 import { absolute, box } from '../planes';
@@ -30,6 +31,15 @@ test('Constant in all samples, it is its own value at the centre pixel and nothi
       expect(dot.im[i]).toBeCloseTo(i === centre * size + centre ? 5 : 0, 11);
     });
   }
+});
+
+test('The dot is as bright on a matrix that is not square', () => {
+  const object = complexZeros(centredGrid(30, 48, [1e-3, 1e-3]));
+  object.re.fill(1);
+  const steps = [{ cause: 'dc-offset', parameters: { brightness: 2, drift: 0, phase: 0 } }];
+  const { image } = simulate(object, { steps, reconstruction: { method: 'zero-filled', parameters: {} }, seed: 1 }, { phaseEncode: 'row' });
+  expect(image.values[15 * 48 + 24]).toBeCloseTo(3, 11);
+  expect(image.values[15 * 48 + 25]).toBeCloseTo(1, 11);
 });
 
 test('Drifting evenly from line to line, it is a dotted line through the centre along the phase encoding, c·d/(2(N−1)·sin(π|y|/N))', () => {
