@@ -23,7 +23,21 @@ const noise = 0.01;
 /** The phantom at each size, with and without a phase. */
 const objects = new Map<string, PreparedObject>();
 
-export function drawSwatch({ causeId, strength, domain, side }: SwatchJob): ThumbnailResult {
+/** Pictures that were drawn last, about 10 kB each: everybody opens the same book. */
+const kept = new Map<string, Uint8Array>();
+const keptLimit = 256;
+
+export function drawSwatch(job: SwatchJob): ThumbnailResult {
+  const key = [job.causeId, job.strength, job.domain, job.side].join(' ');
+  const bytes = kept.get(key) ?? encodeSwatch(job);
+  kept.delete(key);
+  kept.set(key, bytes);
+  const [oldest] = kept.keys();
+  if (kept.size > keptLimit && oldest !== undefined) kept.delete(oldest);
+  return { bytes };
+}
+
+function encodeSwatch({ causeId, strength, domain, side }: SwatchJob): Uint8Array {
   const cause = causeOf(causeId);
   if (cause === undefined) throw new RangeError(`causeId must be in the catalogue, got ${causeId}`);
   const recipe = swatchRecipe(cause, strength);
@@ -33,7 +47,7 @@ export function drawSwatch({ causeId, strength, domain, side }: SwatchJob): Thum
     kspace: () => draw({ values: logMagnitude(kspace), grid: kspace, window: kspaceWindow }, transform(phantom(side).object), side),
   };
   const data = domain === 'half' ? halves(drawn.image(), drawn.kspace(), side) : drawn[domain]();
-  return { bytes: encode({ width: side, height: side, data, channels: 1, depth: 8 }) };
+  return encode({ width: side, height: side, data, channels: 1, depth: 8 });
 }
 
 function phantom(side: number, phase?: PreparedObject['phase']): PreparedObject {

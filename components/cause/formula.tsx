@@ -13,6 +13,7 @@ const mathFonts = "'STIX Two Math', 'Cambria Math', 'Latin Modern Math', 'Noto S
 const rules = `
 .formula { overflow-x: auto; overflow-y: hidden; padding: 8px 0; }
 .formula math { font-family: ${mathFonts}; font-size: 19px; line-height: normal; }
+.formula mo.tml-prime { transform: translateY(.42em) scale(1.35); }
 .formula mtable { text-align: left; }
 .formula mtd { padding: 2px 6px; }
 @media print { .formula { overflow: visible; } }

@@ -60,6 +60,9 @@ export function StrengthMat({ cause, gutters }: StrengthMatProps) {
             </>
           ) : null}
         </View>
+        <Text variant="caption" tone="matInkSoft" style={{ paddingTop: space(2) }}>
+          computed by the model on the demo phantom: SIMULATED · NOT FOR DIAGNOSIS
+        </Text>
       </View>
       <View style={{ paddingHorizontal: gutters, paddingTop: space(2) }} {...{ dataSet: { screenOnly: 'true' } }}>
         <Slider label="mild to strong" value={percent} initial={startPercent} min={0} max={100} step={5} unit="%" onChange={setPercent} />

@@ -42,6 +42,7 @@ export const fieldOfViewReduction = defineCause({
     offCentre: quantity({ label: 'Off-centre', unit: 'of full', min: -0.25, max: 0.25, step: 0.01, initial: 0 }),
   },
   identity: { fraction: 1, offCentre: 0 },
+  strength: { fraction: [0.6, 0.4] },
   looks: {
     image:
       'What reaches out of the field of view on one side along the phase encoding comes in again on the opposite side, laid over what is there; where the phases of the two differ they subtract.',
