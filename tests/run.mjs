@@ -53,9 +53,13 @@ async function runJest(projects, parameters, env, folder) {
     const stdio = /** @type {import('node:child_process').StdioOptions} */ (['ignore', 'ignore', 'inherit']);
     // A process group of its own: ended as one, with the browser and the product that its tests started.
     const child = spawn(process.execPath, call, { cwd: root, env: { ...process.env, ...env }, stdio, detached: true });
-    interrupted.signal.addEventListener('abort', () => child.pid !== undefined && process.kill(-child.pid, 'SIGTERM'));
+    const endGroup = () => child.pid !== undefined && process.kill(-child.pid, 'SIGTERM');
+    interrupted.signal.addEventListener('abort', endGroup);
     child.once('error', reject);
-    child.once('exit', resolve);
+    child.once('exit', (exitCode) => {
+      interrupted.signal.removeEventListener('abort', endGroup);
+      resolve(exitCode);
+    });
   });
   if (!existsSync(report)) return { passed: 0, failed: 1, skipped: 0 };
   return countsOf(JSON.parse(readFileSync(report, 'utf8')), code);
