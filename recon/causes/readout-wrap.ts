@@ -32,6 +32,7 @@ export const readoutWrap = defineCause({
     offCentre: quantity({ label: 'Off-centre', unit: 'of full', min: -0.25, max: 0.25, step: 0.01, initial: 0 }),
   },
   identity: { fraction: 1, passed: 1, offCentre: 0 },
+  strength: { fraction: [0.78, 0.5] },
   looks: {
     image:
       'What reaches out of the field of view along the readout comes in again on the opposite side, as bright as the receiver filter lets it; where the phases of the two differ they subtract.',
