@@ -74,23 +74,34 @@ export function fineKspace(kspace: ComplexPlane): FineKspace {
 
 const wrapped = (index: number, n: number): number => ((index % n) + n) % n;
 
+/** Weights and places of the samples about one column, worked out once for all rows that they are used in. */
+const acrossWeights = new Float64Array(width);
+const acrossPlaces = new Int32Array(width);
+
 /** K at row frequency u and column frequency v, in samples from the centre of k-space, into `value` as [re, im]. Zero beyond the band of
  *  the image, |u| > N/2 or |v| > M/2: nothing is known there. */
 export function sampleAt(fine: FineKspace, u: number, v: number, value: Float64Array): void {
   value[0] = 0;
   value[1] = 0;
   if (Math.abs(u) > fine.coarseRows / 2 || Math.abs(v) > fine.coarseColumns / 2) return;
-  const [row, column] = [oversampling * u, oversampling * v];
-  const [firstRow, firstColumn] = [Math.ceil(row - width / 2), Math.ceil(column - width / 2)];
-  const [centreRow, centreColumn] = [Math.floor(fine.rows / 2), Math.floor(fine.columns / 2)];
+  const row = oversampling * u;
+  const column = oversampling * v;
+  const firstRow = Math.ceil(row - width / 2);
+  const firstColumn = Math.ceil(column - width / 2);
+  const centreRow = Math.floor(fine.rows / 2);
+  const centreColumn = Math.floor(fine.columns / 2);
+  for (let tap = 0; tap < width; tap++) {
+    acrossWeights[tap] = kernel(column - firstColumn - tap);
+    acrossPlaces[tap] = wrapped(firstColumn + tap + centreColumn, fine.columns);
+  }
   for (let r = firstRow; r < firstRow + width; r++) {
     const weight = kernel(row - r);
     const start = wrapped(r + centreRow, fine.rows) * fine.columns;
     let re = 0;
     let im = 0;
-    for (let c = firstColumn; c < firstColumn + width; c++) {
-      const across = kernel(column - c);
-      const i = start + wrapped(c + centreColumn, fine.columns);
+    for (let tap = 0; tap < width; tap++) {
+      const across = acrossWeights[tap] as number;
+      const i = start + (acrossPlaces[tap] as number);
       re += across * (fine.re[i] as number);
       im += across * (fine.im[i] as number);
     }
