@@ -60,7 +60,7 @@ export function WindowLine({ domain, bare = false }: WindowLineProps) {
       />
       {bare ? null : (
         <Text variant="mono" tone="inkSoft" style={{ marginLeft: 'auto' }} numberOfLines={1}>
-          drag on the picture
+          drag the picture
         </Text>
       )}
     </View>

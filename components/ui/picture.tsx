@@ -21,6 +21,7 @@ interface PictureProps {
 export function Picture({ source, alt, size, height = size, mat = 3, simulated = false }: PictureProps) {
   const { colours } = useTheme();
   const [failed, setFailed] = useState(false);
+  const [isThere, setIsThere] = useState(false);
   const frame = simulated
     ? { borderWidth: 1, borderStyle: 'dashed' as const, borderColor: colours.matInk, padding: 2 }
     : source
@@ -41,8 +42,9 @@ export function Picture({ source, alt, size, height = size, mat = 3, simulated =
           height={height}
           loading="lazy"
           decoding="async"
+          onLoad={() => setIsThere(true)}
           onError={() => setFailed(true)}
-          style={{ display: 'block', width: size, height, objectFit: 'contain', background: '#000' }}
+          style={{ display: 'block', width: size, height, objectFit: 'contain', background: isThere ? '#000' : 'transparent' }}
         />
       ) : (
         <View style={{ width: size, height, alignItems: 'center', justifyContent: 'center' }}>
