@@ -103,7 +103,7 @@ export const spikes = defineCause({
     {
       change: 'Take loose metal, lamps and leads out of the bore, and seat connectors of coils again',
       who: 'technologist',
-      price: 'Minutes',
+      price: 'A few minutes',
     },
     {
       change: 'Run the spike test with and without the coil, and with the sequence that showed it',
