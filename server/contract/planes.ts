@@ -1,6 +1,8 @@
 /**
  * Planes: typed arrays on the wire, little-endian, row-major, one after the other. Never JSON.
  *
+ * `spacing` and `origin` are millimetres for images and cycles per metre for k-space, [row, column].
+ *
  * Exact form (default): `image` and real planes are float32, k-space is complex64 (interleaved re, im).
  * Display form (`Accept: application/vnd.pickglass.display`): every plane is uint16 with `low` and `high`, the values of 0 and
  * 65535; a k-space plane comes as two: `<name>.log` (log10 of the magnitude over its maximum, clamped at −8) and
