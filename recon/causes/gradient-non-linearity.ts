@@ -78,7 +78,7 @@ export const gradientNonLinearity = defineCause({
     {
       citation: 'Doran SJ et al. A complete distortion correction for MR images: I. Gradient warp correction. Phys Med Biol 50:1343',
       year: 2005,
-      standing: 'confirmed',
+      standing: 'from memory',
     },
     {
       citation:
