@@ -1,11 +1,19 @@
 /** `npm run bench`: measures every figure and prints a table; with `-- --json` the last line is one JSON object for programs. */
 import { jsonOf, tableOf } from './figure';
+import { growthFigures } from './growth';
+import { pipelineFigures } from './pipeline';
 import { previewFigures } from './preview';
 import { requestFigures } from './request';
 import { transformFigures } from './transform';
 
 async function run(): Promise<void> {
-  const figures = [...(await transformFigures()), ...(await previewFigures()), ...(await requestFigures())];
+  const figures = [
+    ...(await transformFigures()),
+    ...(await previewFigures()),
+    ...(await pipelineFigures()),
+    ...(await growthFigures()),
+    ...(await requestFigures()),
+  ];
   console.log(tableOf(figures));
   if (process.argv.includes('--json')) console.log(jsonOf(figures, new Date()));
 }
