@@ -116,7 +116,8 @@ export function CausesScreen({ params, onParams }: CausesScreenProps) {
             </>
           }
         >
-          {wide ? <View style={{ width: 360, marginLeft: space(6) }}>{search}</View> : null}
+          {wide ? <View style={{ width: 320, marginLeft: space(6) }}>{search}</View> : null}
+          {wide ? <MoreFilters filters={filters} onChange={change} /> : null}
         </PageHead>
       }
     >

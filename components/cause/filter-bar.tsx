@@ -46,7 +46,7 @@ interface SeenBarProps extends FilterProps {
   wide: boolean;
 }
 
-/** The band under the head. On a wide screen the other filters stand at its right. */
+/** The band under the head. */
 export function SeenBar({ causes, filters, onChange, wide }: SeenBarProps) {
   const { colours } = useTheme();
   const tabs = seenCounts(causes, filters).map(({ seen, count }) => ({
@@ -82,7 +82,6 @@ export function SeenBar({ causes, filters, onChange, wide }: SeenBarProps) {
           onChange={(value) => onChange({ ...filters, seen: value === 'any' ? '' : value })}
         />
       </View>
-      {wide ? <MoreFilters filters={filters} onChange={onChange} /> : null}
     </View>
   );
 }

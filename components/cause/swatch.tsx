@@ -26,14 +26,14 @@ const usualStrength = 0.6;
 
 function Cut({ cause, width, height }: Omit<SwatchProps, 'outlined'>) {
   const { colours } = useTheme();
-  const [failed, setFailed] = useState(false);
+  const [state, setState] = useState<'waiting' | 'drawn' | 'failed'>('waiting');
   const edge = { borderStyle: 'dashed' as const, borderColor: colours.inkSoft };
   return (
     <View style={{ flexDirection: 'row', gap: mat }}>
       <View style={{ padding: mat, backgroundColor: colours.mat }}>
-        <View style={{ width, height, backgroundColor: '#000000', alignItems: 'center', justifyContent: 'center' }}>
-          {failed ? (
-            <Text variant="caption" style={{ color: '#A3A3A3' }}>
+        <View style={{ width, height, backgroundColor: colours.matRaised, alignItems: 'center', justifyContent: 'center' }}>
+          {state === 'failed' ? (
+            <Text variant="caption" tone="matInkSoft">
               not fetched
             </Text>
           ) : (
@@ -44,16 +44,19 @@ function Cut({ cause, width, height }: Omit<SwatchProps, 'outlined'>) {
               height={height}
               loading="lazy"
               decoding="async"
-              onError={() => setFailed(true)}
+              onLoad={() => setState('drawn')}
+              onError={() => setState('failed')}
               style={{ display: 'block', width, height, objectFit: 'cover' }}
             />
           )}
-          <View
-            style={[
-              { position: 'absolute', left: width / 2, top: 0, bottom: 0, width: 1 },
-              webStyle({ backgroundImage: 'repeating-linear-gradient(180deg, #FFFFFF 0 4px, transparent 4px 7px)' }),
-            ]}
-          />
+          {state === 'drawn' ? (
+            <View
+              style={[
+                { position: 'absolute', left: width / 2, top: 0, bottom: 0, width: 1 },
+                webStyle({ backgroundImage: 'repeating-linear-gradient(180deg, #FFFFFF 0 4px, transparent 4px 7px)' }),
+              ]}
+            />
+          ) : null}
         </View>
       </View>
       <View style={{ width: selvedge, marginVertical: mat, borderLeftWidth: 1, borderRightWidth: 1, ...edge }} />

@@ -60,8 +60,9 @@ export function Select({ label, rows, value, onChange, look = 'field', disabled 
           ]}
         >
           {filter ? (
-            <Text variant="small" tone="inkSoft">
-              {label}
+            // The space is part of the text: what is seen and what is spoken are the same words.
+            <Text variant="small" tone="inkSoft" style={{ marginRight: -6 }}>
+              {`${label} `}
             </Text>
           ) : null}
           <Text

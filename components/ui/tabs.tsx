@@ -65,20 +65,24 @@ export function Tabs<Value extends string>({ label, tabs, value, onChange, even 
                     flexDirection: 'row',
                     alignItems: 'center',
                     justifyContent: 'center',
-                    gap: 6,
                     paddingHorizontal: even ? space(1) : space(3),
                   },
                   even ? { flexGrow: 1 } : null,
                   on ? insideBar('bottom', 2, colours.indigo) : hovered ? insideBar('bottom', 2, colours.ruleStrong) : null,
                 ]}
               >
-                {tab.glyph ? <Glyph name={tab.glyph} colour={on ? colours.ink : colours.inkSoft} /> : null}
+                {tab.glyph ? (
+                  <View style={{ paddingRight: 6 }}>
+                    <Glyph name={tab.glyph} colour={on ? colours.ink : colours.inkSoft} />
+                  </View>
+                ) : null}
                 <Text variant={on ? 'labelStrong' : 'mono'} tone={on ? 'ink' : 'inkSoft'} numberOfLines={1}>
                   {tab.label}
                 </Text>
                 {tab.count === undefined ? null : (
                   <Text variant={on ? 'labelStrong' : 'mono'} tone={on ? 'ink' : 'inkFaint'}>
-                    {tab.count}
+                    {/* The space is part of the text: what is seen and what is spoken are the same words. */}
+                    {` ${tab.count}`}
                   </Text>
                 )}
               </Press>
