@@ -189,9 +189,11 @@ describe('Averages', () => {
 
   test('as the inner loop leave |sin(πf·TR·A)/(A·sin(πf·TR))| of the swing: 0.653 for four at 0.25 Hz and 0.5 s', () => {
     // The middle of four averages lies 0.75 s after the first, 67.5°: started that much before, the first line holds the crest.
-    const [left] = first({ averaging: 'inner-loop', start: 292.5 }, four);
+    const [left, next] = first({ averaging: 'inner-loop', start: 292.5 }, four);
     const attenuation = Math.abs(Math.sin(Math.PI * 0.25 * 0.5 * 4) / (4 * Math.sin(Math.PI * 0.25 * 0.5)));
     expect((left ?? NaN) / 0.3).toBeCloseTo(attenuation, 12);
+    // The next line comes four TR later, half a cycle: the trough.
+    expect((next ?? NaN) / 0.3).toBeCloseTo(-attenuation, 12);
     expect(attenuation).toBeCloseTo(objectReference.innerLoopAttenuation, 3);
   });
 

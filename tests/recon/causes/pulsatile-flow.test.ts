@@ -3,7 +3,7 @@ import { jv } from 'cephes';
 import type { Acquisition } from '../../../recon/acquisition';
 import { transform } from '../../../recon/fourier';
 import { simulate } from '../../../recon/simulate';
-import { box, largestDifference, noisePlane } from '../planes';
+import { absolute, box, largestDifference, noisePlane } from '../planes';
 
 const acquisition: Acquisition = { phaseEncode: 'column', repetitionTime: 0.1, averages: 1 };
 /** Still tissue on the left, a vessel of 6 rows and columns in the middle of an empty band. */
@@ -55,4 +55,12 @@ test('A vessel of no size beside the grid changes little: its half pixel at most
   const { kspace } = simulate(input, flow({ radius: 0, phaseSwing: 1 }), { ...acquisition });
   // One pixel, at half weight, turned by at most 1 rad: |ΔK| ≤ ½·|e^i − 1|·|I|/√(N·M), |I| below 4.
   expect(largestDifference(kspace, before)).toBeLessThan((0.5 * 4) / 24);
+});
+
+test('A cycle that starts at 0° has the vessel brightest at the first line and darkest half a cycle on', () => {
+  const vesselAlone = box(96, [45, 50], [60, 66]);
+  const before = transform(vesselAlone);
+  const { kspace } = simulate(vesselAlone, flow({ brightness: 0.4 }), acquisition);
+  expect(absolute(kspace, 0, 48) / absolute(before, 0, 48)).toBeCloseTo(1.4, 9);
+  expect(absolute(kspace, 4, 48) / absolute(before, 4, 48)).toBeCloseTo(0.6, 9);
 });
