@@ -13,7 +13,7 @@ const rules = `
   html, body { background: #fff !important; }
   nav, [role='navigation'], [data-screen-only], [role='dialog'] { display: none !important; }
   html, body, :has([role='main']), [role='main'], [role='main'] > * { height: auto !important; min-height: 0 !important; overflow: visible !important; flex: 0 0 auto !important; position: static !important; }
-  :has(> [role='main']), [role='main'] { width: 100% !important; display: block !important; }
+  :has([role='main']), [role='main'] { width: 100% !important; display: block !important; background: transparent !important; }
   [role='main'], [role='main'] * { background-color: transparent !important; }
   [role='region'], [role='figure'], [role='listitem'] { break-inside: avoid; }
   img { print-color-adjust: exact; }

@@ -80,6 +80,7 @@ export const radialUndersampling = defineCause({
   parameters: {
     spokes: quantity({ label: 'Spokes', unit: 'spokes', min: 8, max: 804, step: 4, initial: 64 }),
   },
+  strength: { spokes: [200, 16] },
   looks: {
     image:
       'Fine straight streaks that fan out from everything bright, beginning at a distance of P/π pixels from it; edges as sharp as before.',

@@ -116,6 +116,13 @@ test('on paper a cause is light, whole, and without rail, buttons and slider', a
   const title = page.getByRole('heading', { level: 1, name: 'Periodic motion' });
   // The ink of the light theme.
   expect(await title.evaluate((heading) => getComputedStyle(heading).color)).toBe('rgb(34, 32, 27)');
+  const grounds = await title.evaluate((heading) => {
+    const above: string[] = [];
+    for (let element = heading.parentElement; element; element = element.parentElement)
+      above.push(getComputedStyle(element).backgroundColor);
+    return [...new Set(above)];
+  });
+  expect(grounds.sort()).toEqual(['rgb(255, 255, 255)', 'rgba(0, 0, 0, 0)']);
   const { page: paper, content } = await page.evaluate(() => ({
     page: document.documentElement.scrollHeight,
     content: document.querySelector('main, [role=main]')?.scrollHeight ?? Infinity,

@@ -24,12 +24,24 @@ async function levelsOf(causeId: string, query: object) {
 const difference = (a: ArrayLike<number>, b: ArrayLike<number>): number =>
   Array.from(a).reduce((most, level, i) => Math.max(most, Math.abs(level - (b[i] as number))), 0);
 
+/**
+ * What leaves log |K| as it was, to within what is seen: a phase that is only turned, or one factor for all samples. Their `looks` say
+ * that k-space does not show them.
+ */
+const unseenInKspace = ['cross-talk', 'periodic-motion', 'half-field-ghost', 'line-phase-errors', 'quadrature-imbalance'];
+/** Ten levels of 255 are seen at an edge (common practice: two per cent of contrast is the threshold). */
+const seen = 10;
+
 describe.each(causes.map(({ id }) => id))('the swatch of %s', (id) => {
-  it.each(['image', 'kspace', 'half'])('is a picture of 128 pixels a side (%s), other when strong than when mild', async (domain) => {
+  it.each(['image', 'half'])('is a picture of 128 pixels a side (%s), other when strong than when mild', async (domain) => {
     const mild = await levelsOf(id, { domain, strength: 0 });
-    const strong = await levelsOf(id, { domain, strength: 1 });
-    // Ten levels of 255 are seen at an edge (common practice: two per cent of contrast is the threshold). A cause below is to state `strength`.
-    expect(difference(mild, strong)).toBeGreaterThan(10);
+    expect(difference(mild, await levelsOf(id, { domain, strength: 1 }))).toBeGreaterThan(seen);
+  });
+
+  it('shows k-space, other when strong than when mild unless it cannot be seen there', async () => {
+    const mild = await levelsOf(id, { domain: 'kspace', strength: 0 });
+    const change = difference(mild, await levelsOf(id, { domain: 'kspace', strength: 1 }));
+    expect([id, change > seen]).toEqual([id, !unseenInKspace.includes(id)]);
   });
 });
 
