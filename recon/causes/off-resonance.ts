@@ -52,7 +52,7 @@ export const offResonance = defineCause({
       citation:
         'Jezzard P, Balaban RS. Correction for geometric distortion in echo planar images from B0 field variations. Magn Reson Med 34:65',
       year: 1995,
-      standing: 'confirmed',
+      standing: 'from memory',
     },
     {
       citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences',

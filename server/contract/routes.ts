@@ -12,6 +12,6 @@ import * as simulations from './simulations';
 
 const isRoute = (value: unknown): value is Route => typeof value === 'object' && value !== null && 'method' in value && 'access' in value;
 
-export const routes: readonly Route[] = [session, health, images, measurements, catalogue, simulations, registry, cases, caseParts].flatMap((resource) =>
-  Object.values(resource).filter(isRoute),
+export const routes: readonly Route[] = [session, health, images, measurements, catalogue, simulations, registry, cases, caseParts].flatMap(
+  (resource) => Object.values(resource).filter(isRoute),
 );

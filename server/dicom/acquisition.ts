@@ -3,6 +3,7 @@
  * out, so that a model falls back to its own initial value and says so; what a member set counts like the header.
  */
 import type { Acquisition } from '../../recon/acquisition';
+import { fieldDirectionOf } from '../../recon/field-direction';
 import { fromDegrees, fromMegahertz, fromMillimetres, fromMilliseconds, fromPercent } from '../../recon/units';
 import type { ScanFacts } from '../contract/facts';
 
@@ -36,6 +37,7 @@ export function acquisitionOf(facts: ScanFacts): Acquisition | AcquisitionWithou
     echoPlanar: known(facts.echoPlanar),
     acquisitionType: known(facts.acquisitionType),
     sliceThickness: converted(facts.sliceThicknessMm, fromMillimetres),
+    fieldDirection: fieldDirectionOf(known(facts.imageOrientation) ?? [], known(facts.patientPosition) ?? ''),
   };
   const present = Object.fromEntries(Object.entries(scanned).filter(([, value]) => value !== undefined)) as Omit<
     Acquisition,

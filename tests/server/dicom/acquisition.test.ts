@@ -59,3 +59,10 @@ test('without a phase encoding axis there is none to simulate along', () => {
   expect(phaseEncode).toBeUndefined();
   expect(repetitionTime).toBe(2.3);
 });
+
+test('orientation and patient position say which way the main field points in the picture', () => {
+  // Coronal, head first supine: rows run along x, columns towards the feet, so that B0 (the z of the patient) lies up the columns.
+  const coronal = { imageOrientation: [1, 0, 0, 0, 0, -1], patientPosition: 'HFS', phaseEncodingDirection: 'ROW' };
+  expect(acquisitionOf(readMade(coronal).facts).fieldDirection).toEqual([-1, 0, 0]);
+  expect(acquisitionOf(readMade({ ...coronal, patientPosition: 'HFDL' }).facts).fieldDirection).toBeUndefined();
+});
