@@ -48,7 +48,9 @@ describe('a trial', () => {
     const agent = await application.as('technologist');
     const recipe = { ...motionRecipe(), steps: [{ cause: 'periodic-motion', parameters: { frequency: 0.4 } }] };
     const kept = (await agent.post(`${at}/trials`).send({ imageId: head.id, recipe }).expect(201)).body;
-    expect(Object.keys(kept.recipe.steps[0].parameters).sort()).toEqual(['frequency', 'phaseSwing', 'start']);
+    const { body: causes } = await agent.get('/api/causes').expect(200);
+    const { parameters } = causes.find(({ id }: { id: string }) => id === 'periodic-motion');
+    expect(Object.keys(kept.recipe.steps[0].parameters).sort()).toEqual(parameters.map(({ id }: { id: string }) => id).sort());
     expect(kept.metrics).toMatchObject({ nrmse: null });
     expect(kept.metrics).not.toHaveProperty('computedInMs');
   });
