@@ -10,7 +10,6 @@ import { ThemeContext, useTheme } from '@/components/ui/theme-context';
 const rules = `
 @media print {
   @page { margin: 14mm; }
-  html, body { background: #fff !important; }
   nav, [role='navigation'], [data-screen-only], [role='dialog'] { display: none !important; }
   html, body, :has([role='main']), [role='main'], [role='main'] > * { height: auto !important; min-height: 0 !important; overflow: visible !important; flex: 0 0 auto !important; position: static !important; }
   :has([role='main']), [role='main'] { width: 100% !important; display: block !important; background: transparent !important; }
