@@ -13,6 +13,8 @@ const rules = `
   nav, [role='navigation'], [data-screen-only], [role='dialog'] { display: none !important; }
   html, body, :has([role='main']), [role='main'], [role='main'] > * { height: auto !important; min-height: 0 !important; overflow: visible !important; flex: 0 0 auto !important; position: static !important; }
   :has([role='main']), [role='main'] { width: 100% !important; display: block !important; background: transparent !important; }
+  /* After the rule above, and stronger: the canvas of a dark scheme is dark by itself. */
+  html:root:has([role='main']) { color-scheme: light !important; background: #fff !important; }
   [role='main'], [role='main'] * { background-color: transparent !important; }
   [role='region'], [role='figure'], [role='listitem'] { break-inside: avoid; }
   img { print-color-adjust: exact; }

@@ -110,6 +110,7 @@ test('on paper a cause is light, whole, and without rail, buttons and slider', a
   const { page } = opened;
   await page.getByRole('button', { name: /^theme: light/ }).click();
   await page.locator('.formula math').first().waitFor();
+  await drawn(page);
   await page.emulateMedia({ media: 'print' });
   expect(await page.getByRole('navigation').isVisible()).toBe(false);
   expect(await page.getByRole('slider').isVisible()).toBe(false);
@@ -122,7 +123,8 @@ test('on paper a cause is light, whole, and without rail, buttons and slider', a
       above.push(getComputedStyle(element).backgroundColor);
     return [...new Set(above)];
   });
-  expect(grounds).toEqual(['rgba(0, 0, 0, 0)']);
+  // The last is the root, which is the paper.
+  expect(grounds).toEqual(['rgba(0, 0, 0, 0)', 'rgb(255, 255, 255)']);
   const { page: paper, content } = await page.evaluate(() => ({
     page: document.documentElement.scrollHeight,
     content: document.querySelector('main, [role=main]')?.scrollHeight ?? Infinity,
