@@ -1,8 +1,10 @@
 import type { Recipe } from '../../recon/recipe';
 import { checkRecipe, completeRecipe } from '../../recon/recipe-check';
 
+/** Every parameter of a cause named by hand, and no other. */
+const wrapAround = { fraction: 0.75, offCentre: 0.1 };
 const complete: Recipe = {
-  steps: [{ cause: 'periodic-motion', parameters: { frequency: 0.3, phaseSwing: 0.5, start: 0 } }],
+  steps: [{ cause: 'field-of-view-reduction', parameters: wrapAround }],
   reconstruction: { method: 'zero-filled', parameters: {} },
   seed: 1,
 };
@@ -22,15 +24,15 @@ describe('The check of a recipe', () => {
   });
 
   test('names a missing and an unknown parameter', () => {
-    const faults = checkRecipe(withStep('periodic-motion', { frequency: 0.3, phaseSwing: 0.5, begin: 0 }));
+    const faults = checkRecipe(withStep('field-of-view-reduction', { fraction: 0.75, centre: 0 }));
     expect(faults.map(({ path }) => path)).toEqual([
-      ['steps', 0, 'parameters', 'start'],
-      ['steps', 0, 'parameters', 'begin'],
+      ['steps', 0, 'parameters', 'offCentre'],
+      ['steps', 0, 'parameters', 'centre'],
     ]);
   });
 
   test('is not fooled by names that every object has', () => {
-    const faults = checkRecipe(withStep('partial-fourier', { fraction: 0.75, constructor: 1 }));
+    const faults = checkRecipe(withStep('field-of-view-reduction', { ...wrapAround, constructor: 1 }));
     expect(faults.map(({ path }) => path)).toEqual([['steps', 0, 'parameters', 'constructor']]);
   });
 
@@ -53,8 +55,8 @@ describe('The check of a recipe', () => {
 
 describe('A completed recipe', () => {
   test('has the initial value for what was left out, and keeps what was given', () => {
-    const recipe = completeRecipe(withStep('periodic-motion', { phaseSwing: 0 }));
-    expect(recipe.steps[0]?.parameters).toEqual({ frequency: 0.25, phaseSwing: 0, start: 0 });
+    const recipe = completeRecipe(withStep('field-of-view-reduction', { offCentre: 0.1 }));
+    expect(recipe.steps[0]?.parameters).toEqual(wrapAround);
     expect(checkRecipe(recipe)).toEqual([]);
   });
 
