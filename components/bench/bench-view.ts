@@ -40,7 +40,7 @@ export interface BenchView {
 /** log10 of the magnitude over its maximum: wide enough that the noise of a usual image is dark grey and the centre is not white all over. */
 const logRange = [-4, -0.3] as const;
 
-export function startView(frame: PlaneGrid, range: readonly [number, number]): BenchView {
+export function startView(frame: PlaneGrid, range: readonly [number, number], knot: Knot): BenchView {
   const imageWindow = windowOfRange(range[0], range[1]);
   return {
     compare: 'divider',
@@ -57,7 +57,7 @@ export function startView(frame: PlaneGrid, range: readonly [number, number]): B
     phonePanes: 'image',
     tool: null,
     markText: '',
-    knot: 'object',
+    knot,
     tab: 'recipe',
   };
 }

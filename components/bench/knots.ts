@@ -33,3 +33,6 @@ export function knotsOf(recipe: Recipe, { causes, methods }: Catalogue, runsOn: 
     { knot: 'reconstruction', stage: 'reconstruction', word: method, isOn: false },
   ];
 }
+
+/** The knot that lies open first: the first step where there is one, so that its sliders are at hand. */
+export const firstKnot = ({ steps }: Recipe): Knot => (steps.length > 0 ? 0 : 'object');

@@ -11,6 +11,7 @@ import type { SimulationRequest } from '@/server/contract/simulations';
 import type { BenchState, CaseOnBench } from './bench-context';
 import { startView, type BenchView } from './bench-view';
 import { placeIssues } from './issue-places';
+import { firstKnot } from './knots';
 import { recipeHistory, startHistory } from './recipe-history';
 import { useBlink } from './use-blink';
 import { useShown } from './use-shown';
@@ -52,7 +53,7 @@ function useCase({ kase, bad, source, causes, methods }: OnTheBench): CaseOnBenc
 export function useBenchState(given: OnTheBench): { onBench: CaseOnBench; state: BenchState } {
   const onBench = useCase(given);
   const { bad, frame } = onBench;
-  const [view, setView] = useState(() => startView(frame, bad.range));
+  const [view, setView] = useState(() => startView(frame, bad.range, firstKnot(given.recipe)));
   const change = useCallback((part: Partial<BenchView>) => setView((before) => ({ ...before, ...part })), []);
   const [history, dispatch] = useReducer(recipeHistory, given.recipe, startHistory);
   const request = useMemo(() => requestOf(onBench, history.present, view.kspaceOf), [onBench, history.present, view.kspaceOf]);

@@ -1,5 +1,5 @@
 /** The knots of a recipe: object first, steps in physical order, reconstruction last. */
-import { knotsOf } from '@/components/bench/knots';
+import { firstKnot, knotsOf } from '@/components/bench/knots';
 import type { Cause } from '@/server/contract/catalogue';
 
 const motion: Cause = {
@@ -40,5 +40,10 @@ describe('the knots of a recipe', () => {
 
   it('say when the recipe acts on the bad image itself', () => {
     expect(knotsOf({ ...recipe, objectPhase: undefined }, { causes: [motion], methods }, 'bad')[0]?.word).toBe('bad image itself');
+  });
+
+  it('lie open at the first step, and at the object where there is none', () => {
+    expect(firstKnot(recipe)).toBe(0);
+    expect(firstKnot({ ...recipe, steps: [] })).toBe('object');
   });
 });
