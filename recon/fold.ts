@@ -4,6 +4,21 @@
  */
 import type { ComplexPlane } from './grid';
 import { centredGrid, complexZeros } from './grid';
+import { quantity } from './parameter';
+
+/** The part of the full field of view along the phase encoding that an object is folded to. */
+export const phaseFieldOfView = quantity({
+  label: 'Phase field of view',
+  unit: 'of full',
+  min: 0.4,
+  max: 1,
+  step: 0.01,
+  initial: 0.75,
+  fromHeader: {
+    fact: 'Percent phase field of view',
+    read: ({ phaseFieldOfViewFraction: r }) => (r !== undefined && r < 1 ? r : undefined),
+  },
+});
 
 /** Adds the lines of `plane` along `axis` up modulo `n`, about the line `offset` from the centre. What lies outside the window of `n`
  *  lines comes in times `passed`. */

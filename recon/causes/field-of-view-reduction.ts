@@ -6,7 +6,7 @@
 import { phaseEncodeAxis } from '../acquisition';
 import type { Encoded } from '../cause';
 import { defineCause } from '../cause';
-import { fold } from '../fold';
+import { fold, phaseFieldOfView } from '../fold';
 import { inverseAlong, transformAlong } from '../fourier';
 import { fullyTaken } from '../lines';
 import { quantity } from '../parameter';
@@ -27,18 +27,7 @@ export const fieldOfViewReduction = defineCause({
   needsObjectPhase: true,
   changesMatrix: true,
   parameters: {
-    fraction: quantity({
-      label: 'Phase field of view',
-      unit: 'of full',
-      min: 0.4,
-      max: 1,
-      step: 0.01,
-      initial: 0.75,
-      fromHeader: {
-        fact: 'Percent phase field of view',
-        read: ({ phaseFieldOfViewFraction: r }) => (r !== undefined && r < 1 ? r : undefined),
-      },
-    }),
+    fraction: phaseFieldOfView,
     offCentre: quantity({ label: 'Off-centre', unit: 'of full', min: -0.25, max: 0.25, step: 0.01, initial: 0 }),
   },
   identity: { fraction: 1, offCentre: 0 },

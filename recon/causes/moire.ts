@@ -6,7 +6,7 @@
  */
 import { phaseEncodeAxis } from '../acquisition';
 import { defineCause } from '../cause';
-import { fold } from '../fold';
+import { fold, phaseFieldOfView } from '../fold';
 import { linesOf } from '../lines';
 import { quantity } from '../parameter';
 
@@ -25,18 +25,7 @@ export const moire = defineCause({
   ],
   changesMatrix: true,
   parameters: {
-    fraction: quantity({
-      label: 'Phase field of view',
-      unit: 'of full',
-      min: 0.4,
-      max: 1,
-      step: 0.01,
-      initial: 0.75,
-      fromHeader: {
-        fact: 'Percent phase field of view',
-        read: ({ phaseFieldOfViewFraction: r }) => (r !== undefined && r < 1 ? r : undefined),
-      },
-    }),
+    fraction: phaseFieldOfView,
     cycles: quantity({ label: 'Phase at the edge', unit: 'cycles', min: 0, max: 40, step: 0.5, initial: 6 }),
   },
   identity: { fraction: 1, cycles: 0 },
