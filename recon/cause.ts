@@ -15,12 +15,28 @@ export interface Source {
   readonly standing: 'confirmed' | 'from memory' | 'common practice';
 }
 
+/** `changes`: up or down, as it is done. */
+export type Move = 'rises' | 'falls' | 'changes';
+
+/** What a remedy moves besides the fault; what is left out stays as it is. */
+export interface Moves {
+  /** Of the scan; `once` at the table or for an adjustment, after which the scan is as long as before. */
+  readonly time?: Move | 'once';
+  readonly snr?: Move;
+  readonly contrast?: 'changes';
+  readonly sar?: Move;
+  readonly nerveStimulation?: Move;
+  /** What the implant of a patient was cleared for may no longer hold. */
+  readonly implantConditions?: 'changes';
+}
+
 export interface Remedy {
   /** What to change, in the trade's words. */
   readonly change: string;
   readonly who: 'technologist' | 'physicist' | 'licensed service';
-  /** Time, SNR, contrast; SAR, nerve stimulation or implant conditions where they change. */
+  /** In a sentence: all that `moves` names, how much, and what else is paid. */
   readonly price: string;
+  readonly moves?: Moves;
 }
 
 export interface Context {

@@ -106,24 +106,35 @@ export const pulsatileFlow = defineCause({
     {
       change: 'Saturation band upstream of the slice',
       who: 'technologist',
-      price: 'More RF (SAR rises) and a longer minimum TR',
+      price: 'More RF and a longer minimum TR: SAR rises, check the conditions of an implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Flow compensation',
       who: 'technologist',
-      price: 'Longer shortest TE; gradients switch harder: nerve stimulation and the conditions of an implant',
+      price:
+        'Longer shortest TE, and contrast with it; gradients switch harder: nerve stimulation rises, check the conditions of an implant',
+      moves: { contrast: 'changes', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Trigger on the pulse',
       who: 'technologist',
       price: 'Longer; TR follows the heart, and contrast with it',
+      moves: { time: 'rises', contrast: 'changes' },
     },
     {
       change: 'Swap phase and frequency encoding: the row of dots then runs the other way, clear of the organ',
       who: 'technologist',
-      price: 'Wrap-around turns with it; oversample if the long side is now phase encoded',
+      price:
+        'Wrap-around turns with it: oversample, which takes longer, if the long side is now phase encoded; other gradients work hardest: check nerve stimulation and the conditions of an implant',
+      moves: { time: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
-    { change: 'Black-blood preparation', who: 'physicist', price: 'Longer, fewer slices, SAR rises' },
+    {
+      change: 'Black-blood preparation',
+      who: 'physicist',
+      price: 'Longer, fewer slices, other contrast; SAR rises: check the conditions of an implant',
+      moves: { time: 'rises', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
+    },
   ],
   apply(kspace, { frequency, phaseSwing: a, meanPhase, brightness: m, start, ...lumen }, { acquisition }) {
     const lines = linesOf(kspace, acquisition);

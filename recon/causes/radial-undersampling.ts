@@ -101,21 +101,29 @@ export const radialUndersampling = defineCause({
     },
   ],
   remedies: [
-    { change: 'Take more spokes', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
+    {
+      change: 'Take more spokes',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR rises with the square root',
+      moves: { time: 'rises', snr: 'rises' },
+    },
     {
       change: 'Saturate fat, or put a band over bright tissue at the edge: what is bright streaks most',
       who: 'technologist',
-      price: 'More RF (SAR rises) and a longer minimum TR',
+      price: 'More RF and a longer minimum TR: SAR rises, check the conditions of an implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Switch off coil elements that see bright tissue outside the region',
       who: 'technologist',
       price: 'A minute at the table; signal falls there',
+      moves: { time: 'once', snr: 'falls' },
     },
     {
       change: 'A coarser matrix, or a smaller field of view, at the same number of spokes',
       who: 'physicist',
-      price: 'Detail, or room around the object',
+      price: 'Detail, or room around the object; SNR rises with larger pixels, falls with a smaller field of view',
+      moves: { snr: 'changes' },
     },
   ],
   apply(kspace, { spokes }) {

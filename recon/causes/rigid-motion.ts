@@ -96,31 +96,39 @@ export const rigidMotion = defineCause({
       change: 'Make the patient comfortable, explain, pad and fix the head or limb, and repeat',
       who: 'technologist',
       price: 'A few minutes at the table and the time of one scan',
+      moves: { time: 'once' },
     },
     {
       change: 'Shorten the scan: fewer averages, acceleration, longer echo trains',
       who: 'technologist',
-      price: 'Less SNR; longer trains blur more and raise SAR',
+      price: 'Less SNR; longer trains blur more, change contrast and raise SAR: check the conditions of an implant',
+      moves: { time: 'falls', snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'A radial scan, or one of turning strips that each hold the centre of k-space',
       who: 'technologist',
-      price: 'Longer for the same resolution; motion then shows as streaks or mild blur; more refocusing pulses raise SAR',
+      price:
+        'Longer for the same resolution; motion then shows as streaks or mild blur; contrast changes; more refocusing pulses raise SAR: check the conditions of an implant',
+      moves: { time: 'rises', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Single-shot acquisition, one slice in one train',
       who: 'technologist',
-      price: 'Less resolution and contrast, blur from decay along the train; SAR rises',
+      price:
+        'A scan of seconds; less SNR, resolution and contrast, blur from decay along the train; SAR rises: check the conditions of an implant',
+      moves: { time: 'falls', snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Navigators or a camera that steer the scan after the patient, where the scanner has them',
       who: 'physicist',
-      price: 'Somewhat longer; to be set up and tested for each protocol',
+      price: 'The scan is somewhat longer; to be set up and tested for each protocol',
+      moves: { time: 'rises' },
     },
     {
       change: 'Sedation under the rule of the site',
       who: 'technologist',
-      price: 'Its risks; needs the physician in charge and monitoring',
+      price: 'Its risks, and the time of waiting and waking; needs the physician in charge and monitoring',
+      moves: { time: 'once' },
     },
   ],
   apply(kspace, { course, onset, linesPerShot, ...size }, { acquisition, random }) {

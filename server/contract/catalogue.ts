@@ -36,10 +36,28 @@ export const sourceSchema = z.object({
   /** `confirmed`: looked up. `from memory`: standard literature, not checked. `common practice`: a fact of the trade. */
   standing: z.enum(['confirmed', 'from memory', 'common practice']),
 });
+/** `changes`: up or down, as it is done. */
+const moveSchema = z.enum(['rises', 'falls', 'changes']);
+
+/** What a remedy moves besides the fault; what is left out stays as it is. */
+export const movesSchema = z.object({
+  /** Of the scan; `once` at the table or for an adjustment, after which the scan is as long as before. */
+  time: z.union([moveSchema, z.literal('once')]).optional(),
+  snr: moveSchema.optional(),
+  contrast: z.literal('changes').optional(),
+  sar: moveSchema.optional(),
+  nerveStimulation: moveSchema.optional(),
+  /** What the implant of a patient was cleared for may no longer hold. */
+  implantConditions: z.literal('changes').optional(),
+});
+export type Moves = z.infer<typeof movesSchema>;
+
 export const remedySchema = z.object({
   change: z.string(),
   who: z.enum(['technologist', 'physicist', 'licensed service']),
+  /** In a sentence: all that `moves` names, how much, and what else is paid. */
   price: z.string(),
+  moves: movesSchema.optional(),
 });
 
 export const causeSchema = z.object({
