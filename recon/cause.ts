@@ -36,7 +36,7 @@ export interface Remedy {
   readonly who: 'technologist' | 'physicist' | 'licensed service';
   /** In a sentence: all that `moves` names, how much, and what else is paid. */
   readonly price: string;
-  readonly moves?: Moves;
+  readonly moves: Moves;
 }
 
 export interface Context {

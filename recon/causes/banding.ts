@@ -67,20 +67,33 @@ export const banding = defineCause({
       change: 'Shorten TR: higher bandwidth, asymmetric echo, coarser matrix along the readout',
       who: 'technologist',
       price:
-        'Less SNR or resolution; gradients switch harder: nerve stimulation and the conditions of an implant; SAR rises as pulses follow faster',
+        'A shorter scan, less SNR or resolution; gradients switch harder, so nerve stimulation rises; SAR rises as pulses follow faster: check the conditions of an implant',
+      moves: { time: 'falls', snr: 'falls', sar: 'rises', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
-    { change: 'Shim again over the region, set the centre frequency there', who: 'technologist', price: 'Seconds to a minute' },
+    {
+      change: 'Shim again over the region, set the centre frequency there',
+      who: 'technologist',
+      price: 'Seconds to a minute',
+      moves: { time: 'once' },
+    },
     {
       change: 'Move the centre frequency by hand, so that the bands leave the organ (a scout at several offsets shows which)',
       who: 'technologist',
-      price: 'One more short scan; the bands go elsewhere',
+      price: 'A scout of seconds to a minute; the bands go elsewhere',
+      moves: { time: 'once' },
     },
     {
       change: 'Two or four scans with other RF phase increments, added up',
       who: 'physicist',
-      price: 'Two or four times as long',
+      price: 'Two or four times as long; SNR rises with the square root',
+      moves: { time: 'rises', snr: 'rises' },
     },
-    { change: 'A spoiled gradient echo instead', who: 'technologist', price: 'Less SNR and other contrast: fluid is no longer bright' },
+    {
+      change: 'A spoiled gradient echo instead',
+      who: 'technologist',
+      price: 'Less SNR and other contrast: fluid is no longer bright; smaller flip angles lower SAR',
+      moves: { snr: 'falls', contrast: 'changes', sar: 'falls' },
+    },
   ],
   apply(object, { fieldRange, offset, increment, repetitionTime, imagingFrequency }, { acquisition, random }) {
     const field = smoothField(object, acquisition, random, fieldRange * imagingFrequency);

@@ -77,23 +77,34 @@ export const chemicalShift = defineCause({
     {
       change: 'Raise the bandwidth per pixel',
       who: 'technologist',
-      price: 'SNR falls with the square root; stronger readout gradient: nerve stimulation and the conditions of an implant',
+      price: 'SNR falls with the square root; stronger readout gradient: nerve stimulation rises, check the conditions of an implant',
+      moves: { snr: 'falls', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Suppress fat, by its frequency or by inversion recovery',
       who: 'technologist',
-      price: 'More RF (SAR rises), longer; inversion costs SNR and must not be used after contrast agent',
+      price:
+        'Longer; more RF, so SAR rises: check the conditions of an implant; inversion costs SNR, changes contrast and must not be used after contrast agent',
+      moves: { time: 'rises', snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Swap phase and frequency encoding, so that the band lies off the organ',
       who: 'technologist',
-      price: 'Motion ghosts and wrap-around turn with it; other gradients work hardest: check the conditions of an implant',
+      price:
+        'Motion ghosts and wrap-around turn with it: oversample, which takes longer, if the long side is now phase encoded; other gradients work hardest: check nerve stimulation and the conditions of an implant',
+      moves: { time: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
-    { change: 'In a gradient echo, take a TE at which fat and water are in phase', who: 'technologist', price: 'Other T2* contrast' },
+    {
+      change: 'In a gradient echo, take a TE at which fat and water are in phase',
+      who: 'technologist',
+      price: 'Other T2* contrast',
+      moves: { contrast: 'changes' },
+    },
     {
       change: 'Separate fat and water from two or three echoes',
       who: 'physicist',
-      price: 'Longer; fat and water may be exchanged where the field is uneven',
+      price: 'Longer; fat and water may be exchanged where the field is uneven; the added echoes raise SNR',
+      moves: { time: 'rises', snr: 'rises' },
     },
   ],
   apply(object, { difference, towards, fatThreshold: threshold, ...readout }, { acquisition }) {

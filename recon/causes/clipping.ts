@@ -41,11 +41,32 @@ export const clipping = defineCause({
       change: 'Repeat the automatic adjustment with the patient and coil as they are now',
       who: 'technologist',
       price: 'Seconds to a minute',
+      moves: { time: 'once' },
     },
-    { change: 'Lower the receiver gain by hand', who: 'technologist', price: 'A little more noise if it is too low' },
-    { change: 'Saturate or suppress fat where it is what is too bright', who: 'technologist', price: 'Longer, and SAR rises' },
-    { change: 'Check the automatic adjustment on a bright phantom', who: 'physicist', price: 'Half an hour of scanner time' },
-    { change: 'Check receiver gain stages and converter', who: 'licensed service', price: 'Scanner out of use' },
+    {
+      change: 'Lower the receiver gain by hand',
+      who: 'technologist',
+      price: 'A minute; a little more noise if it is too low',
+      moves: { time: 'once', snr: 'falls' },
+    },
+    {
+      change: 'Saturate or suppress fat where it is what is too bright',
+      who: 'technologist',
+      price: 'Longer; SAR rises: check the conditions of an implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
+    },
+    {
+      change: 'Check the automatic adjustment on a bright phantom',
+      who: 'physicist',
+      price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Check receiver gain stages and converter',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { level }) {
     const limit = level * largestModulus(kspace);

@@ -114,20 +114,29 @@ export const crossTalk = defineCause({
     {
       change: 'A gap of 10 to 30 % between slices',
       who: 'technologist',
-      price: 'Tissue in the gap is not seen; fewer slices cover as much',
+      price: 'Tissue in the gap is not seen; fewer slices cover as much; SNR rises as neighbours saturate less',
+      moves: { snr: 'rises' },
     },
     {
       change: 'Interleave the slices: first every second one, then the others',
       who: 'technologist',
-      price: 'None in time; motion between the two halves shows as steps across the stack',
+      price: 'No longer, where TR has room; motion between the two halves shows as steps across the stack',
+      moves: {},
     },
-    { change: 'Two passes, odd slices and even slices apart', who: 'technologist', price: 'Twice the time' },
+    { change: 'Two passes, odd slices and even slices apart', who: 'technologist', price: 'Twice the time', moves: { time: 'rises' } },
     {
       change: 'Turn crossing stacks so that they meet outside the region that matters, or scan them apart',
       who: 'technologist',
-      price: 'Angles follow the anatomy less well, or longer',
+      price: 'Angles follow the anatomy less well, or the scan is longer',
+      moves: { time: 'changes' },
     },
-    { change: 'Pulses with a sharper profile', who: 'physicist', price: 'Longer pulses, longer shortest TE; SAR may rise' },
+    {
+      change: 'Pulses with a sharper profile',
+      who: 'physicist',
+      price:
+        'Longer pulses, longer shortest TE, and contrast with it; SAR rises or falls with the pulse: check the conditions of an implant',
+      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
+    },
   ],
   apply(object, { stack, gap, effective, repetitionTime, longitudinalRelaxation, ...band }, { acquisition }) {
     const lost = 1 - saturationRatio(effective, repetitionTime, longitudinalRelaxation);

@@ -136,26 +136,33 @@ export const cuspArtefact = defineCause({
       change: 'Switch off coil elements that reach beyond the anatomy, or seat the coil so that they do not',
       who: 'technologist',
       price: 'A minute at the table; signal falls at the edge of the coil',
+      moves: { time: 'once', snr: 'falls' },
     },
     {
       change: 'Swap phase and frequency encoding: the streak turns and may leave the organ',
       who: 'technologist',
-      price: 'Motion ghosts and wrap-around turn with it; other gradients work hardest: check the conditions of an implant',
+      price:
+        'Motion ghosts and wrap-around turn with it: oversample, which takes longer, if the long side is now phase encoded; other gradients work hardest: check nerve stimulation and the conditions of an implant',
+      moves: { time: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Change the field of view or oversample along the phase encoding, so that the spot folds elsewhere',
       who: 'technologist',
-      price: 'Longer, or coarser pixels',
+      price: 'Longer, or coarser pixels; SNR rises with either',
+      moves: { time: 'changes', snr: 'rises' },
     },
     {
       change: 'Saturation band over the far tissue, or a screening cloth where the site has an approved one',
       who: 'technologist',
-      price: 'More RF (SAR rises); a cloth may heat if it is damaged: follow the local rule',
+      price:
+        'More RF and a longer minimum TR: SAR rises, check the conditions of an implant; a cloth may heat if it is damaged: follow the local rule',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Tilt the excited slice against the refocused one, where the sequence offers it',
       who: 'physicist',
-      price: 'A little signal in the slice',
+      price: 'A little SNR: less of the slice is refocused',
+      moves: { snr: 'falls' },
     },
   ],
   apply(kspace, { strength, readoutPlace, phasePlace, tail, echoTrainLength, order }, { acquisition, random }) {

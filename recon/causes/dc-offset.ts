@@ -42,9 +42,20 @@ export const dcOffset = defineCause({
       change: 'Two averages with the RF phase reversed, which cancel the offset',
       who: 'technologist',
       price: 'Twice the time; SNR rises with the square root',
+      moves: { time: 'rises', snr: 'rises' },
     },
-    { change: 'Move the part off the centre of the field of view, clear of the dot', who: 'technologist', price: 'Nothing but a minute' },
-    { change: 'Calibrate the offset of the receiver, or replace it', who: 'licensed service', price: 'Scanner out of use' },
+    {
+      change: 'Move the part off the centre of the field of view, clear of the dot',
+      who: 'technologist',
+      price: 'Nothing but a minute',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Calibrate the offset of the receiver, or replace it',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { brightness, drift, phase }, { acquisition }) {
     const { nLines, samplesPerLine, lineStride, sampleStride } = linesOf(kspace, acquisition);

@@ -45,10 +45,30 @@ export const deadCoilElement = defineCause({
     { citation: 'Gaussian sensitivities on a ring', standing: 'common practice' },
   ],
   remedies: [
-    { change: 'Seat the connector of the coil again and look at the element list', who: 'technologist', price: 'A minute, and a repeat' },
-    { change: 'Change to another coil, or to the body coil', who: 'technologist', price: 'A new set-up; less SNR with the body coil' },
-    { change: 'Test every element on a phantom, its SNR against the record', who: 'physicist', price: 'The coil is out of use meanwhile' },
-    { change: 'Repair the element, its preamplifier or cable', who: 'licensed service', price: 'Coil away' },
+    {
+      change: 'Seat the connector of the coil again and look at the element list',
+      who: 'technologist',
+      price: 'A minute, and a repeat',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Change to another coil, or to the body coil',
+      who: 'technologist',
+      price: 'Minutes for a new set-up; less SNR with the body coil',
+      moves: { time: 'once', snr: 'falls' },
+    },
+    {
+      change: 'Test every element on a phantom, its SNR against the record',
+      who: 'physicist',
+      price: 'Minutes for each element; the coil is out of use meanwhile',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Repair the element, its preamplifier or cable',
+      who: 'licensed service',
+      price: 'Days in which the coil is away',
+      moves: { time: 'once' },
+    },
   ],
   apply(object, { elements, remaining, position, radius, width }) {
     const ring = { elements, radius, width, firstAngle: fromDegrees(position) };

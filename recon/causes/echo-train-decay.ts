@@ -72,21 +72,29 @@ export const echoTrainDecay = defineCause({
     },
   ],
   remedies: [
-    { change: 'Shorten the echo train', who: 'technologist', price: 'Longer in proportion, or fewer slices; more trains at a long TR' },
+    {
+      change: 'Shorten the echo train',
+      who: 'technologist',
+      price: 'Longer in proportion, or fewer slices; less T2 blur also means other contrast; fewer pulses in a TR lower SAR',
+      moves: { time: 'rises', contrast: 'changes', sar: 'falls' },
+    },
     {
       change: 'Shorten the echo spacing with a higher bandwidth',
       who: 'technologist',
-      price: 'SNR falls with the square root; gradients work harder: nerve stimulation and the conditions of an implant',
+      price: 'SNR falls with the square root; gradients work harder: nerve stimulation rises, check the conditions of an implant',
+      moves: { snr: 'falls', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Parallel imaging, so that fewer echoes fill k-space',
       who: 'technologist',
-      price: 'SNR falls with the square root of the factor, and by the geometry of the coil',
+      price: 'Shorter; SNR falls with the square root of the factor, and by the geometry of the coil',
+      moves: { time: 'falls', snr: 'falls' },
     },
     {
       change: 'Refocusing angles that vary along the train',
       who: 'physicist',
       price: 'Contrast changes; SAR falls or rises with the angles: check the conditions of an implant',
+      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
     },
   ],
   apply(kspace, { echoTrainLength, echoSpacing, transverseRelaxation, order }, { acquisition }) {

@@ -39,11 +39,17 @@ export const ellipticalCoverage = defineCause({
     },
   ],
   remedies: [
-    { change: 'Switch elliptical coverage off', who: 'technologist', price: 'About a quarter longer (4/π); SNR rises a little' },
+    {
+      change: 'Switch elliptical coverage off',
+      who: 'technologist',
+      price: 'About a quarter longer (4/π); SNR rises a little',
+      moves: { time: 'rises', snr: 'rises' },
+    },
     {
       change: 'Raise the matrix along both phase encodings and keep the ellipse',
       who: 'technologist',
       price: 'Longer in proportion; SNR of a voxel falls',
+      moves: { time: 'rises', snr: 'falls' },
     },
   ],
   apply(kspace, { size }) {

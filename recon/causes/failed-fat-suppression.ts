@@ -55,23 +55,32 @@ export const failedFatSuppression = defineCause({
     { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'confirmed' },
   ],
   remedies: [
-    { change: 'Shim over the region and check the centre frequency on the spectrum', who: 'technologist', price: 'A minute or two' },
+    {
+      change: 'Shim over the region and check the centre frequency on the spectrum',
+      who: 'technologist',
+      price: 'A minute or two',
+      moves: { time: 'once' },
+    },
     {
       change: 'Inversion recovery instead of a frequency-selective pulse',
       who: 'technologist',
-      price: 'Less SNR, longer, SAR rises; not after contrast agent, which it suppresses too',
+      price:
+        'Longer; less SNR, other contrast; SAR rises: check the conditions of an implant; not after contrast agent, which it suppresses too',
+      moves: { time: 'rises', snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Separate fat and water from two or three echoes',
       who: 'technologist',
-      price: 'Longer; fat and water may be exchanged in a region',
+      price: 'Longer; fat and water may be exchanged in a region; the added echoes raise SNR',
+      moves: { time: 'rises', snr: 'rises' },
     },
     {
       change: 'Bring the region to the middle of the magnet; take metal off; pads against the skin where air and skin meet at an angle',
       who: 'technologist',
-      price: 'A new set-up of the patient',
+      price: 'Minutes for a new set-up of the patient',
+      moves: { time: 'once' },
     },
-    { change: 'Check the shim on a phantom', who: 'licensed service', price: 'Hours of the scanner' },
+    { change: 'Check the shim on a phantom', who: 'licensed service', price: 'Hours of the scanner', moves: { time: 'once' } },
   ],
   apply(object, { fieldRange, offset, halfWidth, suppression, fatThreshold: threshold }, { acquisition, random }) {
     const field = smoothField(object, acquisition, random, fieldRange);

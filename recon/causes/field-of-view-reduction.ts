@@ -56,26 +56,32 @@ export const fieldOfViewReduction = defineCause({
       change: 'Make the phase field of view larger than the anatomy',
       who: 'technologist',
       price: 'Longer, or coarser pixels, in proportion; SNR rises with either',
+      moves: { time: 'changes', snr: 'rises' },
     },
     {
       change: 'Oversample along the phase encoding',
       who: 'technologist',
-      price: 'Longer in proportion, unless averages are cut by as much; SNR then stays',
+      price: 'Longer in proportion, and SNR rises with the square root; or as long as before with fewer averages, and SNR stays',
+      moves: { time: 'changes', snr: 'changes' },
     },
     {
       change: 'Swap phase and frequency encoding, so that the short side of the anatomy is phase encoded',
       who: 'technologist',
-      price: 'Motion ghosts and chemical shift turn with it; other gradients work hardest: check the conditions of an implant',
+      price:
+        'Motion ghosts and chemical shift turn with it; as long as before, or shorter, as fewer lines are enough for the short side; other gradients work hardest: check nerve stimulation and the conditions of an implant',
+      moves: { time: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Saturation bands over the anatomy outside the field of view',
       who: 'technologist',
-      price: 'More RF (SAR rises) and a longer minimum TR',
+      price: 'More RF and a longer minimum TR: SAR rises, check the conditions of an implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Arms out of the plane; switch off coil elements that only see the outside',
       who: 'technologist',
       price: 'A minute at the table; signal falls at the edge of the coil',
+      moves: { time: 'once', snr: 'falls' },
     },
   ],
   apply(kspace, { fraction, offCentre }, { acquisition }): Encoded {

@@ -88,15 +88,31 @@ export const gradientNonLinearity = defineCause({
     },
   ],
   remedies: [
-    { change: 'Bring the part to the isocentre', who: 'technologist', price: 'A new set-up of the patient' },
+    {
+      change: 'Bring the part to the isocentre',
+      who: 'technologist',
+      price: 'Minutes for a new set-up of the patient',
+      moves: { time: 'once' },
+    },
     {
       change: 'Switch the distortion correction on, in three dimensions where offered',
       who: 'technologist',
-      price: 'None to the scan; a little blur',
+      price: 'Nothing in the scan; a little blur',
+      moves: {},
     },
-    { change: 'Take two smaller fields of view in place of one large', who: 'technologist', price: 'About twice the time' },
-    { change: 'Measure distances on a grid phantom', who: 'physicist', price: 'Half an hour of scanner time' },
-    { change: 'Check the gradient coil and the coefficients of its correction', who: 'licensed service', price: 'Scanner out of use' },
+    {
+      change: 'Take two smaller fields of view in place of one large',
+      who: 'technologist',
+      price: 'About twice the time',
+      moves: { time: 'rises' },
+    },
+    { change: 'Measure distances on a grid phantom', who: 'physicist', price: 'Half an hour of scanner time', moves: { time: 'once' } },
+    {
+      change: 'Check the gradient coil and the coefficients of its correction',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(object, { displacement }) {
     const { rows, columns, spacing } = object;

@@ -66,21 +66,29 @@ export const lineDropOut = defineCause({
     { citation: 'One line of the inverse discrete Fourier transform, left out', standing: 'common practice' },
   ],
   remedies: [
-    { change: 'Repeat the scan: what came once does not come again at the same line', who: 'technologist', price: 'The time of the scan' },
+    {
+      change: 'Repeat the scan: what came once does not come again at the same line',
+      who: 'technologist',
+      price: 'The time of the scan',
+      moves: { time: 'once' },
+    },
     {
       change: 'Save the raw data before it is overwritten, and note the time',
       who: 'technologist',
       price: 'A minute; the next patient waits',
+      moves: { time: 'once' },
     },
     {
       change: 'Look through the logs for time-outs of the receiver or the reconstruction and for gradient or RF trips',
       who: 'physicist',
-      price: 'An hour at the desk',
+      price: 'An hour at the desk; the scanner goes on',
+      moves: { time: 'once' },
     },
     {
       change: 'Check the receive path and its cables, gradient and RF amplifiers',
       who: 'licensed service',
-      price: 'The scanner is out of use meanwhile',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
     },
   ],
   apply(kspace, { count, gain, pattern, position }, { acquisition, random }) {

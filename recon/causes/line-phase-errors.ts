@@ -59,23 +59,32 @@ export const linePhaseErrors = defineCause({
       change: 'Repeat the scan, then on a phantom: an instability stays without a patient',
       who: 'technologist',
       price: 'Minutes on the scanner',
+      moves: { time: 'once' },
     },
     {
       change: 'Trigger the scan to the mains, or choose TR a whole number of its periods',
       who: 'technologist',
-      price: 'TR in steps of 20 ms (50 Hz) or 16.7 ms (60 Hz)',
+      price: 'TR in steps of 20 ms (50 Hz) or 16.7 ms (60 Hz): a little longer or shorter, and contrast with it',
+      moves: { time: 'changes', contrast: 'changes' },
     },
-    { change: 'Shorten TE, or take a spin echo', who: 'technologist', price: 'Other contrast; a refocusing pulse raises SAR' },
+    {
+      change: 'Shorten TE, or take a spin echo',
+      who: 'technologist',
+      price: 'Other contrast; a refocusing pulse raises SAR: check the conditions of an implant; SNR rises with a shorter TE',
+      moves: { snr: 'rises', contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
+    },
     {
       change: 'Track the frequency over half an hour on a phantom, with heavy gradients before: drift shows as a slope',
       who: 'physicist',
       price: 'An hour on the scanner',
+      moves: { time: 'once' },
     },
     {
       change:
         'Check gradient amplifiers, frequency synthesiser and eddy-current compensation; try with the cold head off for a few minutes',
       who: 'licensed service',
-      price: 'The scanner is out of use; helium is not to be put at risk',
+      price: 'Hours in which the scanner is out of use; helium is not to be put at risk',
+      moves: { time: 'once' },
     },
   ],
   apply(kspace, { instability, hum, mains, drift, bend }, { acquisition, random }) {

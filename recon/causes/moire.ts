@@ -45,20 +45,28 @@ export const moire = defineCause({
     {
       change: 'Make the phase field of view larger than the anatomy, or oversample along the phase encoding',
       who: 'technologist',
-      price: 'Longer, or coarser pixels, in proportion',
+      price: 'Longer, or coarser pixels, in proportion; SNR rises with either',
+      moves: { time: 'changes', snr: 'rises' },
     },
-    { change: 'Arms out of the plane, or above the head', who: 'technologist', price: 'A new set-up; padding where skin would touch skin' },
+    {
+      change: 'Arms out of the plane, or above the head',
+      who: 'technologist',
+      price: 'Minutes for a new set-up; padding where skin would touch skin',
+      moves: { time: 'once' },
+    },
     {
       change: 'Spin echo instead of gradient echo, or a shorter TE',
       who: 'technologist',
-      price: 'Other contrast; refocusing pulses raise SAR',
+      price: 'Other contrast; refocusing pulses raise SAR: check the conditions of an implant',
+      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Choose the elements of a surface coil that see only the region',
       who: 'technologist',
-      price: 'Signal falls towards the edge',
+      price: 'A minute at the console; signal falls towards the edge',
+      moves: { time: 'once', snr: 'falls' },
     },
-    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute' },
+    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
   ],
   apply(object, { fraction, cycles }, { acquisition }) {
     const { nLines, samplesPerLine, centre, lineStride, sampleStride } = linesOf(object, acquisition);

@@ -116,14 +116,46 @@ export const noise = defineCause({
     {
       change: 'Use a coil that fits, close to the part, seated and with the right elements',
       who: 'technologist',
-      price: 'A new set-up of the patient',
+      price: 'Minutes for a new set-up of the patient',
+      moves: { time: 'once' },
     },
-    { change: 'More averages', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root; SAR dose rises' },
-    { change: 'Thicker slice or larger pixels', who: 'technologist', price: 'Coarser detail, more partial volume' },
-    { change: 'Lower the bandwidth', who: 'technologist', price: 'Larger chemical shift and distortion, longer shortest TE' },
-    { change: 'Shorten TE, or lower the acceleration', who: 'technologist', price: 'Other contrast; or longer in proportion' },
-    { change: 'Measure SNR on a phantom against the record of the coil', who: 'physicist', price: 'Half an hour of scanner time' },
-    { change: 'Check preamplifiers and noise figure', who: 'licensed service', price: 'Coil or scanner out of use' },
+    {
+      change: 'More averages',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR rises with the square root; the absorbed energy rises with the time',
+      moves: { time: 'rises', snr: 'rises' },
+    },
+    {
+      change: 'Thicker slice or larger pixels',
+      who: 'technologist',
+      price: 'Coarser detail, more partial volume; SNR rises with the volume of a voxel',
+      moves: { snr: 'rises' },
+    },
+    {
+      change: 'Lower the bandwidth',
+      who: 'technologist',
+      price:
+        'Larger chemical shift and distortion, longer shortest TE and other contrast; SNR rises with the square root; a weaker readout gradient: nerve stimulation falls',
+      moves: { snr: 'rises', contrast: 'changes', nerveStimulation: 'falls' },
+    },
+    {
+      change: 'Shorten TE, or lower the acceleration',
+      who: 'technologist',
+      price: 'Other contrast with TE; longer in proportion with less acceleration; SNR rises with either',
+      moves: { time: 'changes', snr: 'rises', contrast: 'changes' },
+    },
+    {
+      change: 'Measure SNR on a phantom against the record of the coil',
+      who: 'physicist',
+      price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Check preamplifiers and noise figure',
+      who: 'licensed service',
+      price: 'Hours to days in which coil or scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { snr, coils }, { random }) {
     const sigma = objectLevel(kspace).mean / snr;

@@ -61,28 +61,38 @@ export const offResonance = defineCause({
     },
   ],
   remedies: [
-    { change: 'Shim again over the region that matters', who: 'technologist', price: 'Seconds to a minute' },
+    { change: 'Shim again over the region that matters', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
     {
       change: 'Raise the bandwidth per pixel',
       who: 'technologist',
-      price: 'SNR falls with the square root; stronger readout gradient: nerve stimulation and the conditions of an implant',
+      price: 'SNR falls with the square root; stronger readout gradient: nerve stimulation rises, check the conditions of an implant',
+      moves: { snr: 'falls', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Echo-planar: accelerate, or read in several shots or segments, so that a step through k-space takes less time',
       who: 'technologist',
       price: 'Less SNR, or longer and open to motion between shots',
+      moves: { time: 'changes', snr: 'falls' },
     },
     {
       change: 'Spin echo, or a shorter TE; thinner slices',
       who: 'technologist',
-      price: 'Other contrast, a refocusing pulse raises SAR; thinner slices cost SNR',
+      price:
+        'Other contrast; a refocusing pulse raises SAR; thinner slices cost SNR and take a stronger gradient, so that nerve stimulation rises: check the conditions of an implant',
+      moves: { snr: 'falls', contrast: 'changes', sar: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Take a field map, or the scan with reversed phase encoding, and correct the distortion',
       who: 'physicist',
       price: 'Some minutes; signal that is piled up is not told apart again',
+      moves: { time: 'once' },
     },
-    { change: 'Check the shim of the magnet on a phantom', who: 'licensed service', price: 'Hours of the scanner' },
+    {
+      change: 'Check the shim of the magnet on a phantom',
+      who: 'licensed service',
+      price: 'Hours of the scanner',
+      moves: { time: 'once' },
+    },
   ],
   apply(object, { fieldRange, offset, acrossSlice, ...readout }, { acquisition, random }) {
     const hertz = smoothField(object, acquisition, random, fieldRange * readout.imagingFrequency);

@@ -141,30 +141,48 @@ export const periodicMotion = defineCause({
     {
       change: 'Breath-hold, or coach quiet breathing with a belt',
       who: 'technologist',
-      price: 'The scan must fit one breath; the patient must be able to',
+      price: 'A shorter scan that fits one breath, with less SNR or detail; the patient must be able to',
+      moves: { time: 'falls', snr: 'falls' },
     },
     {
       change: 'Trigger or gate on breathing or pulse, or use a navigator',
       who: 'technologist',
       price: 'Longer, often twice; TR follows the patient, and contrast with it',
+      moves: { time: 'rises', contrast: 'changes' },
     },
     {
       change: 'Saturation band over the moving tissue, or fat saturation',
       who: 'technologist',
-      price: 'More RF (SAR rises) and a longer minimum TR',
+      price: 'More RF and a longer minimum TR: SAR rises, check the conditions of an implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Flow compensation',
       who: 'technologist',
-      price: 'Longer shortest TE; gradients switch harder: nerve stimulation and the conditions of an implant',
+      price:
+        'Longer shortest TE, and contrast with it; gradients switch harder: nerve stimulation rises, check the conditions of an implant',
+      moves: { contrast: 'changes', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
-    { change: 'More averages', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
+    {
+      change: 'More averages',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR rises with the square root; the absorbed energy rises with the time',
+      moves: { time: 'rises', snr: 'rises' },
+    },
     {
       change: 'Swap phase and frequency encoding: the ghosts then run the other way, clear of the organ',
       who: 'technologist',
-      price: 'Wrap-around turns with them; oversample if the long side is now phase encoded',
+      price:
+        'Wrap-around turns with them: oversample, which takes longer, if the long side is now phase encoded; other gradients work hardest: check nerve stimulation and the conditions of an implant',
+      moves: { time: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
-    { change: 'Change TR so that the ghost falls outside the organ', who: 'physicist', price: 'Contrast changes with TR' },
+    {
+      change: 'Change TR so that the ghost falls outside the organ',
+      who: 'physicist',
+      price:
+        'Longer or shorter, SNR and contrast with it; a shorter TR raises SAR, a longer one lowers it: check the conditions of an implant',
+      moves: { time: 'changes', snr: 'changes', contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
+    },
   ],
   apply(kspace, { moves, phaseSwing, displacement, modulation, ...course }, { acquisition }) {
     const lines = linesOf(kspace, acquisition);

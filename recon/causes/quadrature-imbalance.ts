@@ -36,9 +36,24 @@ export const quadratureImbalance = defineCause({
     },
   ],
   remedies: [
-    { change: 'Averages with the RF phase cycled', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
-    { change: 'Scan an off-centre phantom, to tell this ghost from others', who: 'physicist', price: 'Half an hour of scanner time' },
-    { change: 'Balance or replace the receiver', who: 'licensed service', price: 'Scanner out of use' },
+    {
+      change: 'Averages with the RF phase cycled',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR rises with the square root',
+      moves: { time: 'rises', snr: 'rises' },
+    },
+    {
+      change: 'Scan an off-centre phantom, to tell this ghost from others',
+      who: 'physicist',
+      price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Balance or replace the receiver',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { gain: g, angle }) {
     const cosine = g * Math.cos(fromDegrees(angle));

@@ -122,8 +122,9 @@ export const radialUndersampling = defineCause({
     {
       change: 'A coarser matrix, or a smaller field of view, at the same number of spokes',
       who: 'physicist',
-      price: 'Detail, or room around the object; SNR rises with larger pixels, falls with a smaller field of view',
-      moves: { snr: 'changes' },
+      price:
+        'Detail, or room around the object; SNR rises with larger pixels; it falls with a smaller field of view, whose gradients work harder: check nerve stimulation and the conditions of an implant',
+      moves: { snr: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
   ],
   apply(kspace, { spokes }) {

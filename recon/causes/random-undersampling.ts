@@ -79,18 +79,30 @@ export const randomUndersampling = defineCause({
     },
   ],
   remedies: [
-    { change: 'Lower the acceleration factor', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
+    {
+      change: 'Lower the acceleration factor',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR rises with the square root',
+      moves: { time: 'rises', snr: 'rises' },
+    },
     {
       change: 'Strengthen or lengthen the iterative reconstruction, where the protocol offers it',
       who: 'technologist',
-      price: 'Slower reconstruction; too strong a setting smooths fine detail away or invents it',
+      price: 'Slower reconstruction, the scan itself stays as it is; too strong a setting smooths fine detail away or invents it',
+      moves: {},
     },
     {
       change: 'Acquire the calibration again after the patient has settled, with the elements that see the anatomy',
       who: 'technologist',
       price: 'Seconds to a minute',
+      moves: { time: 'once' },
     },
-    { change: 'Compare with a fully sampled scan of a phantom', who: 'physicist', price: 'Minutes on the scanner' },
+    {
+      change: 'Compare with a fully sampled scan of a phantom',
+      who: 'physicist',
+      price: 'Minutes on the scanner',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { accelerationFactor, density, calibrationLines }, { acquisition, random }) {
     const lines = linesOf(kspace, acquisition);

@@ -55,24 +55,33 @@ export const readoutWrap = defineCause({
     {
       change: 'Switch the readout filter or readout oversampling on, where the protocol has it off',
       who: 'technologist',
-      price: 'None in time; more samples are handled',
+      price: 'No longer; more samples are handled',
+      moves: {},
     },
     {
       change: 'Make the field of view along the readout larger than the anatomy',
       who: 'technologist',
-      price: 'Coarser pixels, or a larger readout matrix and with it a longer readout',
+      price: 'Coarser pixels, and SNR rises with them; or a larger readout matrix, longer TE and other contrast',
+      moves: { snr: 'rises', contrast: 'changes' },
     },
     {
       change: 'Switch off coil elements that only see the outside; arms out of the plane',
       who: 'technologist',
       price: 'A minute at the table; signal falls at the edge of the coil',
+      moves: { time: 'once', snr: 'falls' },
     },
     {
       change: 'Test on a phantom larger than the field of view: a fold-in along the readout is a fault of the filter',
       who: 'physicist',
       price: 'Minutes on the scanner',
+      moves: { time: 'once' },
     },
-    { change: 'Check the receiver filter', who: 'licensed service', price: 'The scanner is out of use meanwhile' },
+    {
+      change: 'Check the receiver filter',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { fraction, passed, offCentre }, { acquisition }): Encoded {
     const axis = phaseEncodeAxis(acquisition.phaseEncode) === 0 ? 1 : 0;

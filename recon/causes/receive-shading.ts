@@ -41,15 +41,36 @@ export const receiveShading = defineCause({
     },
   ],
   remedies: [
-    { change: 'Seat the coil and its connectors again, centre the part in it', who: 'technologist', price: 'A new set-up of the patient' },
-    { change: 'Select the elements that cover the part', who: 'technologist', price: 'None, or a little more noise from distant elements' },
+    {
+      change: 'Seat the coil and its connectors again, centre the part in it',
+      who: 'technologist',
+      price: 'Minutes for a new set-up of the patient',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Select the elements that cover the part',
+      who: 'technologist',
+      price: 'A minute at the console; SNR rises, as distant elements add noise only',
+      moves: { time: 'once', snr: 'rises' },
+    },
     {
       change: 'Use the receive-sensitivity normalisation of the console',
       who: 'technologist',
-      price: 'A short calibration; noise becomes uneven instead: it is raised where the coil hears little',
+      price: 'A calibration of seconds; noise becomes uneven instead: it is raised where the coil hears little',
+      moves: { time: 'once' },
     },
-    { change: 'Measure uniformity and SNR of each element on a phantom', who: 'physicist', price: 'The coil is out of use meanwhile' },
-    { change: 'Repair the coil where the phantom fails', who: 'licensed service', price: 'Coil away' },
+    {
+      change: 'Measure uniformity and SNR of each element on a phantom',
+      who: 'physicist',
+      price: 'Minutes for each element; the coil is out of use meanwhile',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Repair the coil where the phantom fails',
+      who: 'licensed service',
+      price: 'Days in which the coil is away',
+      moves: { time: 'once' },
+    },
   ],
   apply(object, { sideRatio: T, steepening: S, centreRatio: C, direction }) {
     const { rows, columns } = object;

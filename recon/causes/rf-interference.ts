@@ -132,27 +132,43 @@ export const rfInterference = defineCause({
     },
   ],
   remedies: [
-    { change: 'Close the door of the room and look at its seal', who: 'technologist', price: 'Nothing but a minute' },
+    {
+      change: 'Close the door of the room and look at its seal',
+      who: 'technologist',
+      price: 'Nothing but a minute',
+      moves: { time: 'once' },
+    },
     {
       change: 'Take monitors, pumps and lamps that the patient does not need out of the room',
       who: 'technologist',
-      price: 'What watches the patient must stay watched',
+      price: 'A minute or two; what watches the patient must stay watched',
+      moves: { time: 'once' },
     },
     {
       change: 'Repeat with another bandwidth: a real tone stays at its frequency, a line of the sequence does not',
       who: 'technologist',
-      price: 'The time of the scan; SNR and chemical shift change',
+      price:
+        'The time of the scan once more; SNR and chemical shift change; with a higher bandwidth nerve stimulation rises: check the conditions of an implant',
+      moves: { time: 'once', snr: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Free induction: raise the refocusing angle, or the crushers, by another protocol',
       who: 'physicist',
-      price: 'SAR rises, or the shortest TE',
+      price:
+        'SAR rises with the angle: check the conditions of an implant; crushers lengthen the shortest TE, and contrast changes; nerve stimulation rises with them',
+      moves: { contrast: 'changes', sar: 'rises', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
-    { change: 'Scan noise with RF off over the whole receiver band', who: 'physicist', price: 'Half an hour of scanner time' },
+    {
+      change: 'Scan noise with RF off over the whole receiver band',
+      who: 'physicist',
+      price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
+    },
     {
       change: 'Measure the shielding of the room, check filter plate and waveguides',
       who: 'licensed service',
-      price: 'Scanner out of use',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
     },
   ],
   apply(kspace, { kind, brightness, offset, drift, bandwidth, phaseStep }, { acquisition, random }) {

@@ -101,7 +101,7 @@ export const rigidMotion = defineCause({
     {
       change: 'Shorten the scan: fewer averages, acceleration, longer echo trains',
       who: 'technologist',
-      price: 'Less SNR; longer trains blur more, change contrast and raise SAR: check the conditions of an implant',
+      price: 'A shorter scan with less SNR; longer trains blur more, change contrast and raise SAR: check the conditions of an implant',
       moves: { time: 'falls', snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {

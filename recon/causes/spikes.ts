@@ -94,23 +94,36 @@ export const spikes = defineCause({
     },
   ],
   remedies: [
-    { change: 'Repeat the scan', who: 'technologist', price: 'The time of the scan; often the next one is free of it' },
+    {
+      change: 'Repeat the scan',
+      who: 'technologist',
+      price: 'The time of the scan; often the next one is free of it',
+      moves: { time: 'once' },
+    },
     {
       change: 'Keep the room at 40 to 60 % humidity, and blankets of wool or synthetics out',
       who: 'technologist',
       price: 'Nothing but a minute',
+      moves: { time: 'once' },
     },
     {
       change: 'Take loose metal, lamps and leads out of the bore, and seat connectors of coils again',
       who: 'technologist',
       price: 'A few minutes',
+      moves: { time: 'once' },
     },
     {
       change: 'Run the spike test with and without the coil, and with the sequence that showed it',
       who: 'physicist',
       price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
     },
-    { change: 'Tighten gradient cables, screws and filter plate; replace lamps', who: 'licensed service', price: 'Scanner out of use' },
+    {
+      change: 'Tighten gradient cables, screws and filter plate; replace lamps',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { place, amplitude, count, burst, kReadout, kPhaseEncode, phase }, { acquisition, random }) {
     const lines = linesOf(kspace, acquisition);

@@ -127,27 +127,38 @@ export const susceptibility = defineCause({
         'An unexpected void is a question of safety first: stop, take the patient out, look for metal on and in the patient, screen again',
       who: 'technologist',
       price: 'Minutes; no scan goes on before it is answered',
+      moves: { time: 'once' },
     },
-    { change: 'Take off what can be taken off: clips, jewellery, clothing with metal', who: 'technologist', price: 'A minute or two' },
+    {
+      change: 'Take off what can be taken off: clips, jewellery, clothing with metal',
+      who: 'technologist',
+      price: 'A minute or two',
+      moves: { time: 'once' },
+    },
     {
       change: 'Spin echo or turbo spin echo instead of gradient echo or echo-planar',
       who: 'technologist',
-      price: 'Longer; refocusing pulses raise SAR, which may leave the conditions of an implant',
+      price: 'Longer; other contrast; refocusing pulses raise SAR, which may leave the conditions of an implant',
+      moves: { time: 'rises', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Highest bandwidth, thin slices, short echo spacing',
       who: 'technologist',
-      price: 'SNR falls; stronger gradients: nerve stimulation and the conditions of an implant',
+      price:
+        'SNR falls; stronger gradients: nerve stimulation rises, check the conditions of an implant; thin slices need more of them, and longer',
+      moves: { time: 'changes', snr: 'falls', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Suppress fat by inversion recovery, not by frequency',
       who: 'technologist',
-      price: 'Longer, less SNR, SAR rises; not after contrast agent',
+      price: 'Longer, less SNR, other contrast; SAR rises: check the conditions of an implant; not after contrast agent',
+      moves: { time: 'rises', snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Sequences made for metal: view-angle tilting, or several spectral bins, where the scanner has them',
       who: 'physicist',
-      price: 'Much longer, SAR rises, blur; to be set up within the conditions of the implant',
+      price: 'Much longer, blur; SAR rises: to be set up within the conditions of the implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
   ],
   apply(object, { shape, difference, toNormal, inPlane, sliceThickness, ...rest }, { acquisition }) {

@@ -112,20 +112,38 @@ export const transmitInhomogeneity = defineCause({
     },
   ],
   remedies: [
-    { change: 'Lay a dielectric pad between body and coil', who: 'technologist', price: 'A new set-up; the pad may show on long TE scans' },
-    { change: 'Repeat the transmit calibration with the volume over the part', who: 'technologist', price: 'Seconds; SAR may rise' },
+    {
+      change: 'Lay a dielectric pad between body and coil',
+      who: 'technologist',
+      price: 'Minutes for a new set-up; the pad may show on long TE scans',
+      moves: { time: 'once' },
+    },
+    {
+      change: 'Repeat the transmit calibration with the volume over the part',
+      who: 'technologist',
+      price: 'Seconds; SAR rises or falls with what it finds: check the conditions of an implant',
+      moves: { time: 'once', sar: 'changes', implantConditions: 'changes' },
+    },
     {
       change: 'Use the transmit shimming that the scanner offers',
       who: 'technologist',
-      price: 'Seconds to a minute; local SAR limits, and the conditions of an implant, may forbid it',
+      price: 'Seconds to a minute; SAR changes, and its local limits or the conditions of an implant may forbid it',
+      moves: { time: 'once', sar: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Scan at 1.5 T',
       who: 'technologist',
-      price: 'Half the SNR; the conditions of an implant differ from field to field',
+      price:
+        'Another scanner: a new set-up and an hour; half the SNR, other contrast, lower SAR; the conditions of an implant differ from field to field',
+      moves: { time: 'once', snr: 'falls', contrast: 'changes', sar: 'falls', implantConditions: 'changes' },
     },
-    { change: 'Map the transmit field on a phantom', who: 'physicist', price: 'Half an hour of scanner time' },
-    { change: 'Check transmit chain and body coil', who: 'licensed service', price: 'Scanner out of use' },
+    { change: 'Map the transmit field on a phantom', who: 'physicist', price: 'Half an hour of scanner time', moves: { time: 'once' } },
+    {
+      change: 'Check transmit chain and body coil',
+      who: 'licensed service',
+      price: 'Hours to days in which the scanner is out of use',
+      moves: { time: 'once' },
+    },
   ],
   apply(object, { sequence, centre, edge, wavelength: lambda, flipAngle, t1 }, { acquisition }) {
     const b = transmitField(object, fromPercent(centre), fromPercent(edge), lambda / centimetresPerMetre);

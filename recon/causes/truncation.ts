@@ -68,23 +68,34 @@ export const truncation = defineCause({
       change: 'Take more lines: a larger matrix along the direction of the ringing',
       who: 'technologist',
       price: 'Longer in proportion along the phase encoding; SNR of a pixel falls',
+      moves: { time: 'rises', snr: 'falls' },
     },
     {
       change: 'Make the field of view smaller, with oversampling, at the same matrix',
       who: 'technologist',
-      price: 'SNR falls with the size of the pixel; gradients work harder: nerve stimulation and the conditions of an implant',
+      price:
+        'SNR falls with the size of the pixel; oversampling takes longer; gradients work harder: nerve stimulation rises, check the conditions of an implant',
+      moves: { time: 'rises', snr: 'falls', nerveStimulation: 'rises', implantConditions: 'changes' },
     },
     {
       change: 'Swap phase and frequency encoding, where only the phase matrix is coarse',
       who: 'technologist',
-      price: 'Motion ghosts and wrap-around turn with it',
+      price:
+        'Motion ghosts and wrap-around turn with it; longer if the long side is now phase encoded; other gradients work hardest: check nerve stimulation and the conditions of an implant',
+      moves: { time: 'changes', nerveStimulation: 'changes', implantConditions: 'changes' },
     },
     {
       change: 'Saturate the fat beside the edge, so that the jump is smaller',
       who: 'technologist',
-      price: 'More RF (SAR rises), a longer minimum TR',
+      price: 'More RF and a longer minimum TR: SAR rises, check the conditions of an implant',
+      moves: { time: 'rises', sar: 'rises', implantConditions: 'changes' },
     },
-    { change: 'A stronger k-space filter', who: 'physicist', price: 'Blur: edges up to twice as wide' },
+    {
+      change: 'A stronger k-space filter',
+      who: 'physicist',
+      price: 'Blur: edges up to twice as wide; SNR rises with it',
+      moves: { snr: 'rises' },
+    },
   ],
   apply(kspace, { fraction, direction }, { acquisition }) {
     const along = (one: EncodingDirection): Lines => linesAlong(kspace, acquisition, one);

@@ -46,19 +46,31 @@ export const uniformUndersampling = defineCause({
     { citation: 'Deshmane A et al. Parallel MR imaging. J Magn Reson Imaging 36:55', year: 2012, standing: 'confirmed' },
   ],
   remedies: [
-    { change: 'Lower the acceleration factor', who: 'technologist', price: 'Longer in proportion; SNR rises with the square root' },
+    {
+      change: 'Lower the acceleration factor',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR rises with the square root',
+      moves: { time: 'rises', snr: 'rises' },
+    },
     {
       change: 'Acquire the calibration again, after the patient has settled, with the field of view of the scan',
       who: 'technologist',
       price: 'Seconds to a minute',
+      moves: { time: 'once' },
     },
-    { change: 'Take more reference lines', who: 'technologist', price: 'A little longer' },
+    { change: 'Take more reference lines', who: 'technologist', price: 'A little longer', moves: { time: 'rises' } },
     {
       change: 'Use a coil with more elements along the phase encoding, all of them selected and seated',
       who: 'technologist',
-      price: 'A new set-up of the patient',
+      price: 'Minutes for a new set-up of the patient; SNR rises with the geometry of the coil',
+      moves: { time: 'once', snr: 'rises' },
     },
-    { change: 'Check every element of the coil on a phantom', who: 'physicist', price: 'The coil is out of use meanwhile' },
+    {
+      change: 'Check every element of the coil on a phantom',
+      who: 'physicist',
+      price: 'Minutes for each element; the coil is out of use meanwhile',
+      moves: { time: 'once' },
+    },
   ],
   apply(kspace, { accelerationFactor, calibrationLines }, { acquisition }) {
     const lines = linesOf(kspace, acquisition);

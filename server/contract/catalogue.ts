@@ -57,7 +57,7 @@ export const remedySchema = z.object({
   who: z.enum(['technologist', 'physicist', 'licensed service']),
   /** In a sentence: all that `moves` names, how much, and what else is paid. */
   price: z.string(),
-  moves: movesSchema.optional(),
+  moves: movesSchema,
 });
 
 export const causeSchema = z.object({

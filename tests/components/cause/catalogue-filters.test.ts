@@ -8,7 +8,7 @@ const motion = causeWith({
   seen: ['ghosts'],
   runsAlong: 'phase-encode',
   drivers: [{ fact: 'TR', does: 'sets the distance of the ghosts' }],
-  remedies: [{ change: 'Use respiratory gating', who: 'technologist', price: 'Longer' }],
+  remedies: [{ change: 'Use respiratory gating', who: 'technologist', price: 'Longer', moves: {} }],
 });
 const wrap = causeWith({
   id: 'wrap',
@@ -16,14 +16,14 @@ const wrap = causeWith({
   seen: ['fold-in', 'ghosts'],
   runsAlong: 'phase-encode',
   looks: { image: 'Anatomy of one side on the other', kspace: '' },
-  remedies: [{ change: 'Larger field of view', who: 'technologist', price: 'Resolution' }],
+  remedies: [{ change: 'Larger field of view', who: 'technologist', price: 'Resolution', moves: {} }],
 });
 const spike = causeWith({
   id: 'spike',
   title: 'Spike',
   seen: ['lines'],
   runsAlong: 'both',
-  remedies: [{ change: 'Find the loose part', who: 'licensed service', price: 'Downtime' }],
+  remedies: [{ change: 'Find the loose part', who: 'licensed service', price: 'Downtime', moves: {} }],
 });
 const causes = [motion, wrap, spike];
 const any = readFilters({});
