@@ -17,4 +17,6 @@ export interface Dependencies {
   readonly workers: WorkerPool;
   /** Key of the session tokens, 32 bytes or more. */
   readonly sessionKey: Uint8Array;
+  /** Key of the hashes that stand for unique identifiers, 32 bytes or more. Another key, and slices of a series no longer find each other. */
+  readonly identityKey: Uint8Array;
 }

@@ -21,6 +21,8 @@ const variables = z.object({
   PICKGLASS_DATA: z.string().min(1).default('.pickglass'),
   /** Signs session cookies. Left out, one is drawn at the first start and kept in the data folder. */
   SESSION_SECRET: z.string().min(32).optional(),
+  /** Hashes the unique identifiers of images. Left out, one is drawn at the first start and kept in the data folder. */
+  IDENTITY_SECRET: z.string().min(32).optional(),
   /** Where browsers see the server, when that is not the address it listens on (a proxy, the development server). */
   PUBLIC_ORIGIN: origin.optional(),
   UPLOAD_FILE_MIB: wholeNumber(1, 1024).default(64),
@@ -33,7 +35,7 @@ const variables = z.object({
 });
 
 /** Values of these are never repeated in a message. */
-const secrets = new Set(['DATABASE_URL', 'SESSION_SECRET']);
+const secrets = new Set(['DATABASE_URL', 'SESSION_SECRET', 'IDENTITY_SECRET']);
 
 export interface Env {
   readonly mode: 'development' | 'test' | 'production';
@@ -42,6 +44,7 @@ export interface Env {
   readonly databaseUrl: string;
   readonly dataFolder: string;
   readonly sessionSecret: string | undefined;
+  readonly identitySecret: string | undefined;
   readonly publicOrigin: string | undefined;
   readonly upload: { readonly fileBytes: number; readonly files: number; readonly totalBytes: number };
   readonly workerThreads: number;
@@ -65,6 +68,7 @@ export function readEnv(source: Readonly<Record<string, string | undefined>>): E
     databaseUrl: values.DATABASE_URL,
     dataFolder: resolve(values.PICKGLASS_DATA),
     sessionSecret: values.SESSION_SECRET,
+    identitySecret: values.IDENTITY_SECRET,
     publicOrigin: values.PUBLIC_ORIGIN,
     upload: {
       fileBytes: values.UPLOAD_FILE_MIB * mebibyte,

@@ -20,7 +20,7 @@ import { readEnv, type Env } from './env';
 import { openLog } from './log';
 import { openDiskObjects } from './storage/disk-objects';
 import { cachedImageValues } from './storage/image-values';
-import { sessionKey } from './storage/session-key';
+import { identityKey, sessionKey } from './storage/kept-keys';
 
 const here = dirname(fileURLToPath(import.meta.url));
 const project = join(here, '..');
@@ -62,6 +62,7 @@ async function openDependencies(env: Env, log: Dependencies['log']) {
     ...{ env, log, version, workers, objects, db: database.db, sql: database.sql },
     values: cachedImageValues(objects),
     sessionKey: await sessionKey(env),
+    identityKey: await identityKey(env),
   };
   const close = async () => {
     await workers.close();

@@ -35,9 +35,9 @@ type Handler<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, O ex
   call: Call<P, Q, B, Who>,
 ) => Promise<Result<O>>;
 
-interface Options<O extends z.ZodType> {
-  /** Middleware between the access rule and the input: a multipart reader. */
-  readonly reader?: RequestHandler;
+interface Options<O extends z.ZodType, Who> {
+  /** Middleware between the access rule and the input: a multipart reader, which may ask whose request it is. */
+  readonly reader?: (callerOf: (request: Request) => Who) => RequestHandler;
   /** Status of a success, where it depends on the output. */
   readonly status?: (output: z.output<O>) => number;
 }
@@ -56,7 +56,7 @@ export function serve<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
   app: App,
   route: Route<P, Q, B, O>,
   handler: Handler<P, Q, B, O, Caller>,
-  options: Options<O> = {},
+  options: Options<O, Caller> = {},
 ): void {
   const { access } = route;
   if (access === 'anyone') throw new Error(`${nameOf(route)} is open to anyone: use serveAnyone`);
@@ -82,7 +82,7 @@ export function serveAnyone<P extends z.ZodType, Q extends z.ZodType, B extends 
 interface Served<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, O extends z.ZodType, Who> {
   readonly admit: (request: Request) => Promise<Who>;
   readonly handler: Handler<P, Q, B, O, Who>;
-  readonly options: Options<O>;
+  readonly options: Options<O, Who>;
 }
 
 function register<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, O extends z.ZodType, Who>(
@@ -92,6 +92,7 @@ function register<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType,
 ): void {
   app.served.add(nameOf(route));
   const callers = new WeakMap<Request, Who>();
+  const callerOf = (request: Request) => callers.get(request) as Who;
 
   const enter: RequestHandler = async (request, _response, next) => {
     callers.set(request, await admit(request));
@@ -103,14 +104,14 @@ function register<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType,
       query: parse(route.query, request.query),
       // A multipart body is not a value to parse: its reader has been over it.
       body: parse(route.body, route.takes === 'multipart' ? {} : (request.body ?? {})),
-      caller: callers.get(request) as Who,
+      caller: callerOf(request),
       request,
       response,
       gone: goneSignal(response),
     };
     send(route, response, await handler(call), options.status);
   };
-  app.express[route.method](route.path, enter, ...(options.reader ? [options.reader] : []), answer);
+  app.express[route.method](route.path, enter, ...(options.reader ? [options.reader(callerOf)] : []), answer);
 }
 
 function parse<S extends z.ZodType>(schema: S, value: unknown): z.output<S> {

@@ -2,7 +2,7 @@
 import type { Acquisition } from '../recon/acquisition';
 import type { Recipe } from '../recon/recipe';
 
-/** One frame of a stored image: float32 values, [row, column], from `frame` · rows · columns on. */
+/** One frame of a stored image: float32 values, [frame, row, column], where `isComplex` re and im in turn. */
 export interface ImageSource {
   readonly imageId: string;
   readonly frame: number;
@@ -10,6 +10,7 @@ export interface ImageSource {
   readonly columns: number;
   /** Row, column; null where the header is silent, and then 1 mm is assumed. */
   readonly spacingMm: readonly [number, number] | null;
+  readonly isComplex: boolean;
   readonly values: SharedArrayBuffer;
 }
 
@@ -95,7 +96,7 @@ export interface ThumbnailResult {
   readonly bytes: Uint8Array;
 }
 
-/** A small PNG of a cause on the head phantom. `strength` 0 mild to 1 strong; `side` in pixels, and samples of the phantom. */
+/** A small PNG of a cause on the phantom that shows it best. `strength` 0 mild to 1 strong; `side` in pixels, and samples of the phantom. */
 export interface SwatchJob {
   readonly kind: 'swatch';
   readonly causeId: string;

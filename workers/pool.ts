@@ -22,6 +22,7 @@ import type {
   TrialJob,
   TrialResult,
 } from './job';
+import type { ReadDicomJob } from './read-dicom.worker';
 
 export interface WorkerFiles {
   readonly simulate: string;
@@ -45,7 +46,7 @@ export interface WorkerPool {
   swatch(job: SwatchJob, gone?: AbortSignal): Promise<ThumbnailResult>;
   measure(job: MeasureJob, gone?: AbortSignal): Promise<MeasureResult>;
   /** Reads one file; `undefined` when it took longer than `limitMs`, whose thread is then stopped. */
-  readDicom(bytes: Uint8Array, limitMs: number): Promise<Read | undefined>;
+  readDicom(job: ReadDicomJob, limitMs: number): Promise<Read | undefined>;
   /** Threads that are up. */
   threads(): number;
   close(): Promise<void>;
@@ -92,18 +93,18 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
  *  and not for waiting behind others. */
 function openReader(pool: Piscina) {
   let last: Promise<unknown> = Promise.resolve();
-  const readNow = async (bytes: Uint8Array, limitMs: number): Promise<Read | undefined> => {
+  const readNow = async (job: ReadDicomJob, limitMs: number): Promise<Read | undefined> => {
     const signal = AbortSignal.timeout(limitMs);
     try {
-      return (await pool.run(bytes, { signal })) as Read;
+      return (await pool.run(job, { signal })) as Read;
     } catch (error) {
       if (signal.aborted) return undefined;
       throw error;
     }
   };
   return {
-    read(bytes: Uint8Array, limitMs: number): Promise<Read | undefined> {
-      const reading = last.then(() => readNow(bytes, limitMs));
+    read(job: ReadDicomJob, limitMs: number): Promise<Read | undefined> {
+      const reading = last.then(() => readNow(job, limitMs));
       // What becomes of one file is told to its own caller; the next one only waits for its end.
       last = reading.then(
         () => undefined,

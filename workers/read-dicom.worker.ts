@@ -1,11 +1,21 @@
-/** Reads one DICOM file on a worker thread. Message in: the bytes of a file; out: `Read`, its values transferred, not copied. */
+/** Reads one DICOM file on a worker thread. Message in: the bytes of a file and a key; out: `Read`, its values transferred, not copied. */
 import { move, transferableSymbol, valueSymbol } from 'piscina';
 import { readDicom, type Read } from '../server/dicom/read';
 
-/** A result whose buffer piscina hands over instead of copying it. */
-const handedOver = (read: Read, buffer: ArrayBuffer) => move({ [transferableSymbol]: buffer, [valueSymbol]: read });
+export interface ReadDicomJob {
+  readonly bytes: Uint8Array;
+  /** The department's, for unique identifiers. */
+  readonly key: Uint8Array;
+}
 
-export default function readDicomTask(bytes: Uint8Array): ReturnType<typeof handedOver> | Read {
-  const read = readDicom(bytes);
-  return 'refused' in read ? read : handedOver(read, read.accepted.values.buffer);
+/** A result whose buffers piscina hands over instead of copying them. */
+const handedOver = (read: Read, buffers: ArrayBuffer[]) => move({ [transferableSymbol]: buffers, [valueSymbol]: read });
+
+export default function readDicomTask({ bytes, key }: ReadDicomJob): ReturnType<typeof handedOver> | Read {
+  const read = readDicom(bytes, key);
+  if ('refused' in read) return read;
+  return handedOver(
+    read,
+    read.accepted.map(({ values }) => values.buffer),
+  );
 }

@@ -6,6 +6,10 @@ import { pgEnum } from 'drizzle-orm/pg-core';
 
 export const roleWord = pgEnum('role', ['technologist', 'lead-technologist', 'physicist', 'administrator']);
 export const componentWord = pgEnum('component', ['magnitude', 'phase', 'real', 'imaginary', 'complex']);
+export const imageUseWord = pgEnum('image_use', ['measured', 'look-only']);
+export const kspaceOriginWord = pgEnum('kspace_origin', ['derived', 'raw']);
+/** The door that an image came through. */
+export const arrivalWord = pgEnum('arrival', ['upload', 'scanner', 'web-push', 'made-here']);
 export const phaseEncodeWord = pgEnum('phase_encode', ['row', 'column']);
 export const domainWord = pgEnum('domain', ['image', 'kspace']);
 

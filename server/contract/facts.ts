@@ -65,6 +65,9 @@ export const scanFactsSchema = z.object({
   seriesNumber: fact(number),
   instanceNumber: fact(number),
   timeOfDay: fact(text),
+  /** The device that a case is about: its identity is no patient's. */
+  deviceSerial: fact(text).default({ value: null, origin: 'absent' }),
+  stationName: fact(text).default({ value: null, origin: 'absent' }),
 });
 export type ScanFacts = z.infer<typeof scanFactsSchema>;
 export type FactName = keyof ScanFacts;
@@ -80,3 +83,14 @@ export const correctableFactsSchema = z
   })
   .partial();
 export type CorrectableFacts = z.infer<typeof correctableFactsSchema>;
+
+/** What one frame of an image has for itself. Positions in the patient's millimetres (x to the left, y to the back, z to the head). */
+export const frameFactsSchema = z.object({
+  positionMm: z.tuple([number, number, number]).nullable(),
+  timeOfDay: text.nullable(),
+  triggerDelayMs: number.nullable(),
+  echoTimeMs: number.nullable(),
+  /** What tells this frame from its neighbours, where it is not its place: a coil element, an echo, a repetition. */
+  label: text.nullable(),
+});
+export type FrameFacts = z.infer<typeof frameFactsSchema>;

@@ -1,9 +1,15 @@
 /** Images: upload, what is known of one, its pixels and its k-space. */
 import { z } from 'zod';
-import { correctableFactsSchema, scanFactsSchema } from './facts';
+import { correctableFactsSchema, frameFactsSchema, scanFactsSchema } from './facts';
 import { everyMember, identifier, route } from './route';
 
 export const components = ['magnitude', 'phase', 'real', 'imaginary', 'complex'] as const;
+
+/** `measured`: encoded in its own plane, so that its k-space means something. `look-only`: derived, reformatted or captured: it may be looked
+ *  at, and is not analysed as if measured; a warning says why. */
+export const uses = ['measured', 'look-only'] as const;
+/** `derived`: the transform of a stored image, which is not the scanner's raw data. `raw`: the samples themselves. */
+export const kspaceOrigins = ['derived', 'raw'] as const;
 
 export const warningSchema = z.object({ code: z.string(), text: z.string() });
 
@@ -13,11 +19,17 @@ export const imageSchema = z.object({
   columns: z.number().int(),
   frames: z.number().int(),
   component: z.enum(components),
+  use: z.enum(uses),
+  kspace: z.enum(kspaceOrigins),
   /** Row, column; null where the header is silent: millimetres are then unknown, and 1 mm is assumed in planes. */
   spacingMm: z.tuple([z.number(), z.number()]).nullable(),
   /** A robust range of the stored values for the first window: 1st and 99.8th percentile. */
   range: z.tuple([z.number(), z.number()]),
   acquisition: scanFactsSchema,
+  /** One entry a frame. */
+  frameFacts: z.array(frameFactsSchema),
+  /** The same for all images of a series; null where the header names none. */
+  series: z.string().nullable(),
   warnings: z.array(warningSchema),
   /** DICOM tags as `GGGG,EEEE`. Names and values are not repeated: they are gone. */
   deidentification: z.object({ removed: z.array(z.string()), replaced: z.array(z.string()) }),

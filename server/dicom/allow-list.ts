@@ -33,6 +33,12 @@ export const allowList = {
   burnedInAnnotation: checked('x00280301', 'CS'),
   imageType: stored('x00080008', 'CS'),
 
+  // Identifiers, of which only a keyed hash is stored.
+  sopInstance: replaced('x00080018', 'UI'),
+  studyInstance: replaced('x0020000d', 'UI'),
+  seriesInstance: replaced('x0020000e', 'UI'),
+  frameOfReference: replaced('x00200052', 'UI'),
+
   // Time of day.
   acquisitionDateTime: replaced('x0008002a', 'DT'),
   acquisitionTime: replaced('x00080032', 'TM'),
@@ -44,6 +50,9 @@ export const allowList = {
   softwareVersions: stored('x00181020', 'LO'),
   receiveCoil: stored('x00181250', 'SH'),
   transmitCoil: stored('x00181251', 'SH'),
+
+  deviceSerial: stored('x00181000', 'LO'),
+  stationName: stored('x00081010', 'SH'),
 
   // Acquisition.
   bodyPart: stored('x00180015', 'CS'),

@@ -6,10 +6,12 @@
 import type { DataSet, Element } from 'dicom-parser';
 import type { Image } from '../contract/images';
 import { allowList, pixelDataTag, type Attribute } from './allow-list';
+import { deviceNames, screenedDevice } from './facts/device';
 import { namesNames, screenedName } from './facts/names';
 import { timeSource } from './facts/time-of-day';
 import { screenedWords, wordsNames } from './facts/words';
 import type { Header } from './header';
+import { identifierNames } from './unique-identifiers';
 
 export type Deidentification = Image['deidentification'];
 
@@ -37,6 +39,8 @@ function fates(elements: Elements, header: Header): { stored: ReadonlySet<string
   const time = timeSource(header);
   if (time !== undefined) replaced.add(allowList[time].tag);
   for (const name of namesNames) if (screenedName(header, name).withheld) stored.delete(allowList[name].tag);
+  for (const name of deviceNames) if (screenedDevice(header, name).withheld) stored.delete(allowList[name].tag);
+  for (const name of identifierNames) if (header.text(name) !== undefined) replaced.add(allowList[name].tag);
   for (const name of wordsNames) {
     const { kept, nWithheld } = screenedWords(header, name);
     if (nWithheld === 0) continue;

@@ -1,6 +1,7 @@
 /** The facts of a scan, each from the header or worked out or doubtful. Every rule stands in a file of `facts/`. */
 import type { ScanFacts } from '../contract/facts';
 import { bandwidthFact } from './facts/bandwidth';
+import { deviceFact } from './facts/device';
 import * as encoding from './facts/encoding';
 import { quantity } from './facts/fact';
 import { fieldStrengthFact, imagingFrequencyFact } from './facts/field';
@@ -56,5 +57,7 @@ export function factsOf(header: Header): ScanFacts {
     seriesNumber: quantity(header, 'seriesNumber', orderNumber),
     instanceNumber: quantity(header, 'instanceNumber', orderNumber),
     timeOfDay: timeOfDayFact(header),
+    deviceSerial: deviceFact(header, 'deviceSerial'),
+    stationName: deviceFact(header, 'stationName'),
   };
 }

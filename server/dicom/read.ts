@@ -4,7 +4,7 @@
  * tags come out, as the account of what was removed.
  */
 import type { Element } from 'dicom-parser';
-import type { ScanFacts } from '../contract/facts';
+import type { FrameFacts, ScanFacts } from '../contract/facts';
 import type { Image } from '../contract/images';
 import { deidentificationOf } from './deidentification';
 import { factsOf } from './facts';
@@ -14,25 +14,32 @@ import { elementsAfter, parse, type Parsed } from './parse';
 import { readPixels } from './pixels';
 import { isRefused, refuse, type Refused } from './refusal';
 import { uncompressedLittleEndian, whyNotRead } from './transfer-syntax';
+import { replacedUid, type IdentifierName, type UniqueIdentifiers } from './unique-identifiers';
 import { warningsOf } from './warnings';
 
-export interface AcceptedImage extends Pick<Image, 'rows' | 'columns' | 'spacingMm' | 'range' | 'warnings' | 'deidentification'> {
-  readonly frames: 1;
-  readonly component: 'magnitude';
-  /** Rescaled, [row, column]. */
+type Described = 'rows' | 'columns' | 'frames' | 'component' | 'use' | 'kspace' | 'spacingMm' | 'range' | 'frameFacts';
+
+/** One image of a file that was taken. */
+export interface AcceptedImage extends Pick<Image, Described | 'warnings' | 'deidentification'> {
+  /** Rescaled, [frame, row, column]; of a complex image re and im in turn. */
   readonly values: Float32Array<ArrayBuffer>;
   readonly facts: ScanFacts;
+  /** Replaced already: what the file had does not come out of the reader. */
+  readonly identifiers: UniqueIdentifiers;
 }
 
-export type Read = { readonly accepted: AcceptedImage } | Refused;
+export type Read = { readonly accepted: readonly AcceptedImage[] } | Refused;
 
-/** Reads one file. Its name is no input: names of exported files hold names of patients. */
-export function readDicom(bytes: Uint8Array): Read {
-  const read = readImage(bytes);
-  return isRefused(read) ? read : { accepted: read };
+/**
+ * Reads one file: one image or several, where it holds several components. Its name is no input: names of exported files hold names of
+ * patients. `key` is the department's, which replaces unique identifiers.
+ */
+export function readDicom(bytes: Uint8Array, key: Uint8Array): Read {
+  const read = readImage(bytes, key);
+  return isRefused(read) ? read : { accepted: [read] };
 }
 
-function readImage(bytes: Uint8Array): AcceptedImage | Refused {
+function readImage(bytes: Uint8Array, key: Uint8Array): AcceptedImage | Refused {
   const parsed = parse(bytes);
   if (isRefused(parsed)) return parsed;
   const header = headerOf(parsed.dataSet);
@@ -47,12 +54,37 @@ function readImage(bytes: Uint8Array): AcceptedImage | Refused {
     columns,
     frames: 1,
     component: 'magnitude',
+    use: 'measured',
+    kspace: 'derived',
     values,
     range: [...range],
     spacingMm: facts.pixelSpacingMm.value,
     facts,
+    frameFacts: [frameFactsOf(facts)],
+    identifiers: identifiersOf(header, key),
     warnings: warningsOf(header, facts, pixels),
     deidentification: deidentificationOf(parsed.dataSet.elements, elementsAfter(bytes, parsed, pixelData), header),
+  };
+}
+
+const frameFactsOf = ({ imagePositionMm, timeOfDay, echoTimeMs }: ScanFacts): FrameFacts => ({
+  positionMm: imagePositionMm.value,
+  timeOfDay: timeOfDay.value,
+  triggerDelayMs: null,
+  echoTimeMs: echoTimeMs.value,
+  label: null,
+});
+
+function identifiersOf(header: Header, key: Uint8Array): UniqueIdentifiers {
+  const replaced = (name: IdentifierName) => {
+    const uid = header.text(name);
+    return uid === undefined ? null : replacedUid(key, uid);
+  };
+  return {
+    study: replaced('studyInstance'),
+    series: replaced('seriesInstance'),
+    frameOfReference: replaced('frameOfReference'),
+    image: replaced('sopInstance'),
   };
 }
 

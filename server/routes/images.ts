@@ -9,7 +9,7 @@ export function serveImages(app: App): void {
   const { deps } = app;
   const { db } = deps;
   serve(app, contract.uploadImages, ({ caller, request }) => takeUpload(deps, caller, request), {
-    reader: fileReader(deps),
+    reader: (callerOf) => fileReader(deps, callerOf),
     status: ({ images }) => (images.length > 0 ? contract.uploadImages.status : 422),
   });
   serve(app, contract.readImage, ({ caller, params }) => readImage(db, caller, params.imageId));

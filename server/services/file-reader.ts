@@ -7,7 +7,9 @@ import multer, { type StorageEngine } from 'multer';
 import type { Dependencies } from '../dependencies';
 import type { Read } from '../dicom/read';
 import { refuse } from '../dicom/refusal';
+import { departmentKey } from '../dicom/unique-identifiers';
 import { AppError, invalidAt } from '../errors';
+import type { Caller } from './sessions';
 
 /** What became of one file. */
 export interface FileReading {
@@ -32,11 +34,13 @@ const slots = new WeakMap<Request, Slot[]>();
 export const readingsOf = (request: Request): FileReading[] =>
   (slots.get(request) ?? []).flatMap(({ name, outcome }) => (outcome === undefined ? [] : [{ name, outcome }]));
 
-/** Middleware that reads the files of the field `files`. */
-export function fileReader(deps: Pick<Dependencies, 'env' | 'workers'>): RequestHandler {
+type CallerOf = (request: Request) => Pick<Caller, 'departmentId'>;
+
+/** Middleware that reads the files of the field `files` for the department of whoever sent them. */
+export function fileReader(deps: Pick<Dependencies, 'env' | 'workers' | 'identityKey'>, callerOf: CallerOf): RequestHandler {
   const { upload } = deps.env;
   const reader = multer({
-    storage: readingEngine(deps),
+    storage: readingEngine(deps, callerOf),
     limits: { files: upload.files, fields: 16, fieldSize: 1024, parts: upload.files + 16 },
     defParamCharset: 'utf8',
   }).array('files');
@@ -56,7 +60,10 @@ const tooMuch = ({ totalBytes }: Limits) =>
   new AppError('too-large', { detail: `One upload may hold ${totalBytes / mebibyte} MB; send the files in several` });
 
 /** A storage engine of multer that keeps readings instead of files. */
-function readingEngine({ env, workers }: Pick<Dependencies, 'env' | 'workers'>): StorageEngine {
+function readingEngine(
+  { env, workers, identityKey }: Pick<Dependencies, 'env' | 'workers' | 'identityKey'>,
+  callerOf: CallerOf,
+): StorageEngine {
   const received = new WeakMap<Request, number>();
   return {
     _handleFile(request, file, done) {
@@ -77,7 +84,7 @@ function readingEngine({ env, workers }: Pick<Dependencies, 'env' | 'workers'>):
         }
         const slot: Slot = { name: file.originalname.slice(0, longestName) };
         slots.get(request)?.push(slot);
-        readWhole(chunks, size).then((outcome) => {
+        readWhole(chunks, size, departmentKey(identityKey, callerOf(request).departmentId)).then((outcome) => {
           slot.outcome = outcome;
           done(null, {});
         }, done);
@@ -88,11 +95,11 @@ function readingEngine({ env, workers }: Pick<Dependencies, 'env' | 'workers'>):
     },
   };
 
-  async function readWhole(chunks: Buffer[], size: number): Promise<Read> {
+  async function readWhole(chunks: Buffer[], size: number, key: Uint8Array): Promise<Read> {
     const { fileBytes } = env.upload;
     if (size > fileBytes)
       return refuse('too-large', `The file is larger than ${fileBytes / mebibyte} MB, the most that one file may have.`);
-    const outcome = await workers.readDicom(Buffer.concat(chunks), env.readMilliseconds);
+    const outcome = await workers.readDicom({ bytes: Buffer.concat(chunks), key }, env.readMilliseconds);
     return outcome ?? refuse('too-slow', `Reading the file took longer than ${env.readMilliseconds / 1000} s and was stopped.`);
   }
 }

@@ -2,7 +2,7 @@
 import type { Database } from '../../db/client';
 import { findImageOf, type ImageRow } from '../../db/queries/images';
 import type { ImageSource } from '../../workers/job';
-import { correctableFactsSchema, scanFactsSchema, type CorrectableFacts, type ScanFacts } from '../contract/facts';
+import { correctableFactsSchema, frameFactsSchema, scanFactsSchema, type CorrectableFacts, type ScanFacts } from '../contract/facts';
 import type { Image } from '../contract/images';
 import type { Dependencies } from '../dependencies';
 import { AppError, invalidAt } from '../errors';
@@ -31,8 +31,8 @@ export async function sourceOf(
 ): Promise<ImageSource> {
   if (frame >= row.frames)
     throw invalidAt(path, row.frames === 1 ? 'the image has one frame, number 0' : `the last frame is ${row.frames - 1}`);
-  const { id: imageId, rows, columns, spacingMm } = row;
-  return { imageId, frame, rows, columns, spacingMm, values: await values.read(row.valuesDigest) };
+  const { id: imageId, rows, columns, spacingMm, component } = row;
+  return { imageId, frame, rows, columns, spacingMm, isComplex: component === 'complex', values: await values.read(row.valuesDigest) };
 }
 
 /** What members set, over what the header said; the header's value stays beside it. */
@@ -48,9 +48,11 @@ export function currentFacts(row: Pick<ImageRow, 'headerFacts' | 'memberFacts'>)
 
 /** An image as the contract describes it. */
 export function describeImage(row: ImageRow): Image {
-  const { id, rows, columns, frames, component, spacingMm, warnings } = row;
+  const { id, rows, columns, frames, component, use, kspace, spacingMm, warnings } = row;
   return {
-    ...{ id, rows, columns, frames, component, spacingMm, warnings },
+    ...{ id, rows, columns, frames, component, use, kspace, spacingMm, warnings },
+    series: row.seriesKey,
+    frameFacts: frameFactsSchema.array().parse(row.frameFacts),
     range: [row.rangeLow, row.rangeHigh],
     acquisition: currentFacts(row),
     deidentification: { removed: row.removedTags, replaced: row.replacedTags },

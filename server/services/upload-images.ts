@@ -17,7 +17,7 @@ export async function takeUpload(
   const accepted: AcceptedImage[] = [];
   const refused: Refusal[] = [];
   for (const { name, outcome } of readingsOf(request)) {
-    if ('accepted' in outcome) accepted.push(outcome.accepted);
+    if ('accepted' in outcome) accepted.push(...outcome.accepted);
     else refused.push({ ...outcome.refused, name });
   }
   return { images: await storeImages(deps, caller, accepted), refused };
@@ -43,13 +43,19 @@ function rowOf(
   valuesDigest: string,
   { departmentId, memberId }: Pick<Caller, 'memberId' | 'departmentId'>,
 ): NewImage {
-  const { rows, columns, frames, component, spacingMm, range, facts, warnings, deidentification } = image;
+  const { rows, columns, frames, component, use, kspace, spacingMm, range, facts, frameFacts, identifiers, warnings, deidentification } =
+    image;
   return {
-    ...{ departmentId, uploaderId: memberId, rows, columns, frames, component, spacingMm, valuesDigest, warnings },
+    ...{ departmentId, uploaderId: memberId, rows, columns, frames, component, use, kspace, spacingMm, valuesDigest },
+    ...{ frameFacts, warnings },
     rangeLow: range[0],
     rangeHigh: range[1],
     headerFacts: facts,
     removedTags: deidentification.removed,
     replacedTags: deidentification.replaced,
+    studyKey: identifiers.study,
+    seriesKey: identifiers.series,
+    frameOfReferenceKey: identifiers.frameOfReference,
+    imageKey: identifiers.image,
   };
 }

@@ -90,6 +90,7 @@ export async function openApplication({
     ...{ env, log, workers, objects, version: '0.0.0-test', db: client.db, sql: client.sql },
     values: cachedImageValues(objects),
     sessionKey: new TextEncoder().encode(randomUUID()),
+    identityKey: new TextEncoder().encode(randomUUID()),
   };
   const app = createApp(deps);
   const objectPaths = async () => (await readdir(objectFolder, { recursive: true, withFileTypes: true })).filter((entry) => entry.isFile());

@@ -6,7 +6,7 @@ import { join } from 'node:path';
 import { openDiskObjects } from '../../server/storage/disk-objects';
 import { cachedImageValues } from '../../server/storage/image-values';
 import type { ObjectStore } from '../../server/storage/object-store';
-import { sessionKey } from '../../server/storage/session-key';
+import { sessionKey } from '../../server/storage/kept-keys';
 
 let folder: string;
 let objects: ObjectStore;

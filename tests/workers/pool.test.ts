@@ -7,6 +7,8 @@ import { discFile } from '../server/files';
 
 jest.setTimeout(60_000);
 
+const key = new Uint8Array(32);
+
 let workers: WorkerPool;
 beforeAll(() => {
   workers = openWorkers(workersIn(join(__dirname, '../../workers'), '.ts'), 1);
@@ -19,7 +21,7 @@ function job(side: number, imageId = String(side)): SimulateJob {
   new Float32Array(values).fill(1);
   return {
     ...{ kind: 'simulate', acquisition: { phaseEncode: 'column' }, outputs: ['image'], form: 'exact' },
-    source: { imageId, frame: 0, rows: side, columns: side, spacingMm: null, values },
+    source: { imageId, frame: 0, rows: side, columns: side, spacingMm: null, isComplex: false, values },
     recipe: { steps: [], reconstruction: { method: 'zero-filled', parameters: {} }, seed: 1 },
   };
 }
@@ -44,18 +46,18 @@ it('a long job is stopped soon after its caller left, and the next one finds a t
 it('a file that takes too long to read is given up, and the next one is read', async () => {
   const large = discFile({ rows: 4096, columns: 4096 });
   const small = discFile();
-  await expect(workers.readDicom(small, 30_000)).resolves.toMatchObject({ accepted: { rows: 32 } });
+  await expect(workers.readDicom({ bytes: small, key }, 30_000)).resolves.toMatchObject({ accepted: [{ rows: 32 }] });
   // 16.8 million pixels are rescaled and sorted for their percentiles: far more than 5 ms of work anywhere.
-  await expect(workers.readDicom(large, 5)).resolves.toBeUndefined();
-  await expect(workers.readDicom(small, 30_000)).resolves.toMatchObject({ accepted: { rows: 32 } });
+  await expect(workers.readDicom({ bytes: large, key }, 5)).resolves.toBeUndefined();
+  await expect(workers.readDicom({ bytes: small, key }, 30_000)).resolves.toMatchObject({ accepted: [{ rows: 32 }] });
 });
 
 it('the limit for reading a file does not count the time that it waits for others', async () => {
   const large = discFile({ rows: 2048, columns: 2048 });
   const start = performance.now();
-  await workers.readDicom(large, 30_000);
+  await workers.readDicom({ bytes: large, key }, 30_000);
   const one = performance.now() - start;
-  const all = await Promise.all(Array.from({ length: 8 }, () => workers.readDicom(large, Math.ceil(3 * one + 500))));
+  const all = await Promise.all(Array.from({ length: 8 }, () => workers.readDicom({ bytes: large, key }, Math.ceil(3 * one + 500))));
   expect(all.map((read) => read !== undefined && 'accepted' in read)).toEqual(Array(8).fill(true));
 });
 

@@ -4,6 +4,9 @@ import { writeDicom, type Attributes, type ImageToWrite } from '../../../server/
 
 export const side = 16;
 
+/** The key of a department that does not exist. */
+export const key = new TextEncoder().encode('a key for these tests, which is 32 bytes long or more');
+
 /** Values 1 to 256, so that no pixel is zero. */
 export const slope = Uint16Array.from({ length: side * side }, (_, index) => index + 1);
 
@@ -18,13 +21,15 @@ export function readMade(attributes: Attributes, changes: Partial<ImageToWrite> 
 }
 
 export function accepted(bytes: Uint8Array): AcceptedImage {
-  const read = readDicom(bytes);
+  const read = readDicom(bytes, key);
   if ('refused' in read) throw new Error(`refused: ${read.refused.code}, ${read.refused.reason}`);
-  return read.accepted;
+  const [image] = read.accepted;
+  if (image === undefined || read.accepted.length > 1) throw new Error(`${read.accepted.length} images`);
+  return image;
 }
 
 export function refused(bytes: Uint8Array): { code: string; reason: string } {
-  const read = readDicom(bytes);
+  const read = readDicom(bytes, key);
   if ('accepted' in read) throw new Error('accepted');
   return read.refused;
 }
