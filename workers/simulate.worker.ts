@@ -2,7 +2,6 @@
 import { createHash } from 'node:crypto';
 import { performance } from 'node:perf_hooks';
 import { transform } from '../recon/fourier';
-import { asComplex, centredGrid, type Plane } from '../recon/grid';
 import { prepare, simulate, type PreparedObject, type Simulation } from '../recon/simulate';
 import type { Recipe } from '../recon/recipe';
 import { compareNumbers, type Reference } from './compare-numbers';
@@ -25,6 +24,7 @@ import type {
   TrialResult,
 } from './job';
 import { smallPicture } from './small-picture';
+import { objectOf, pictureOf } from './stored-frame';
 import { drawSwatch } from './swatch';
 
 type Job = SimulateJob | TrialJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob;
@@ -46,7 +46,7 @@ export default function runJob(job: Job): SimulateResult | TrialResult | Planes 
     case 'swatch':
       return drawSwatch(job);
     case 'measure':
-      return measure(planeOf(job.source), job);
+      return measure(pictureOf(job.source), job);
   }
 }
 
@@ -74,7 +74,7 @@ function runTrial({ source, recipe, acquisition, compareWith, window }: TrialJob
 }
 
 function readPixels({ source, domain, form }: PixelsJob): Planes {
-  const plane = planeOf(source);
+  const plane = pictureOf(source);
   const named: NamedPlane =
     domain === 'image' ? { name: 'image', domain, plane } : { name: 'kspace', domain, plane: preparedObject(source, undefined).kspace() };
   const planes = encodePlanes([named], form);
@@ -82,9 +82,9 @@ function readPixels({ source, domain, form }: PixelsJob): Planes {
 }
 
 function drawThumbnail({ source, domain, window }: ThumbnailJob): ThumbnailResult {
-  const plane = planeOf(source);
+  const plane = pictureOf(source);
   if (domain === 'image') return { bytes: smallPicture({ values: plane.values, grid: plane, window }) };
-  const values = logMagnitude(transform(asComplex(plane)));
+  const values = logMagnitude(transform(objectOf(source)));
   return { bytes: smallPicture({ values, grid: { ...plane, spacing: [1, 1] }, window: kspaceWindow }) };
 }
 
@@ -93,21 +93,13 @@ function namedPlane({ image, kspace, kspaceOfImage }: Simulation, name: PlaneNam
   return { name, domain: 'kspace', plane: name === 'kspace' ? kspace : kspaceOfImage() };
 }
 
-/** The stored values on their grid in metres. Where the header gives no spacing, 1 mm is assumed, as the contract says. */
-function planeOf({ values, frame, rows, columns, spacingMm }: ImageSource): Plane {
-  const [rowMm, columnMm] = spacingMm ?? [1, 1];
-  const n = rows * columns;
-  const stored = new Float32Array(values, frame * n * Float32Array.BYTES_PER_ELEMENT, n);
-  return { ...centredGrid(rows, columns, [rowMm / 1000, columnMm / 1000]), values: Float64Array.from(stored) };
-}
-
-const referenceOf = (source: ImageSource): Reference => ({ key: `${source.imageId} ${source.frame}`, plane: () => planeOf(source) });
+const referenceOf = (source: ImageSource): Reference => ({ key: `${source.imageId} ${source.frame}`, plane: () => pictureOf(source) });
 
 /** The object of a recipe, from the few that were used last. */
 function preparedObject(source: ImageSource, recipe: Pick<Recipe, 'objectPhase'> | undefined): PreparedObject {
   const phase = recipe?.objectPhase;
   const key = [source.imageId, source.frame, phase?.range, phase?.seed].join(' ');
-  const object = prepared.get(key) ?? prepare(asComplex(planeOf(source)), phase);
+  const object = prepared.get(key) ?? prepare(objectOf(source), phase);
   prepared.delete(key);
   prepared.set(key, object);
   const [oldest] = prepared.keys();

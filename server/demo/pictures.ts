@@ -2,7 +2,7 @@
  * Pictures of the demo cases: the analytic head, noise added in k-space, put through our own models where one is to be bad, and
  * written as DICOM with an invented header. They are then read through the same door as every upload.
  */
-import { randomUUID } from 'node:crypto';
+import { randomBytes, randomUUID } from 'node:crypto';
 import type { Acquisition, PhaseEncode } from '../../recon/acquisition';
 import { asComplex, type ComplexPlane, type Plane } from '../../recon/grid';
 import type { Ellipse } from '../../recon/phantoms/ellipse';
@@ -42,9 +42,12 @@ export function demoPicture({ seed, withArm = false, fault, acquisition, header 
   const object = withNoise(asComplex(shapeImage(shapes, headGrid(matrix))), seed);
   const recipe: Recipe = { steps: [], ...fault, reconstruction: { method: 'zero-filled', parameters: {} }, seed };
   const { image } = simulate(object, recipe, acquisition);
-  const read = readDicom(asFile(image, { ...header, ...phaseEncodeHeader(acquisition.phaseEncode, image) }));
+  const file = asFile(image, { ...header, ...phaseEncodeHeader(acquisition.phaseEncode, image) });
+  const read = readDicom(file, randomBytes(32));
   if ('refused' in read) throw new Error(`a demo picture was refused: ${read.refused.reason}`);
-  return read.accepted;
+  const [accepted] = read.accepted;
+  if (accepted === undefined) throw new Error('a demo picture holds no image');
+  return accepted;
 }
 
 /** Complex white noise: of independent samples it is the same in the image as in k-space. */
