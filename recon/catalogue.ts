@@ -3,7 +3,7 @@ import type { Acquisition } from './acquisition';
 import type { Cause, Driver, Reconstruction, Remedy, Sighting, Source } from './cause';
 import { initialOf } from './initial';
 import type { Parameter, Parameters } from './parameter';
-import { strengthOf } from './swatch';
+import { strengthOf, swatchPhantom } from './swatch';
 
 export type DescribedParameter =
   | {
@@ -34,6 +34,8 @@ export interface DescribedCause extends DescribedReconstruction {
   formula: string;
   drivers: Driver[];
   needsObjectPhase: boolean;
+  /** What the swatch is of. */
+  phantom: { title: string; fieldOfViewMm: number };
   strength: Record<string, [mild: number, strong: number]>;
   remedies: Remedy[];
 }
@@ -52,6 +54,11 @@ function describeParameter(id: string, parameter: Parameter, acquisition?: Acqui
 const describeParameters = (parameters: Parameters, acquisition?: Acquisition): DescribedParameter[] =>
   Object.entries(parameters).map(([id, parameter]) => describeParameter(id, parameter, acquisition));
 
+function describePhantom(cause: Cause): DescribedCause['phantom'] {
+  const { title, fieldOfView } = swatchPhantom(cause);
+  return { title, fieldOfViewMm: Math.round(1000 * fieldOfView) };
+}
+
 /** A cause; with `acquisition`, initial values come from the scan facts where they say one. */
 export const describeCause = (cause: Cause, acquisition?: Acquisition): DescribedCause => ({
   id: cause.id,
@@ -64,7 +71,12 @@ export const describeCause = (cause: Cause, acquisition?: Acquisition): Describe
   parameters: describeParameters(cause.parameters, acquisition),
   looks: { ...cause.looks },
   needsObjectPhase: cause.needsObjectPhase === true,
-  strength: Object.fromEntries(Object.entries(strengthOf(cause)).map(([id, [mild, strong]]) => [id, [mild, strong]])),
+  phantom: describePhantom(cause),
+  strength: Object.fromEntries(
+    Object.entries(strengthOf(cause))
+      .filter(([, [mild, strong]]) => mild !== strong)
+      .map(([id, [mild, strong]]) => [id, [mild, strong]]),
+  ),
   remedies: cause.remedies.map((remedy) => ({ ...remedy })),
   sources: cause.sources.map((source) => ({ ...source })),
 });

@@ -5,6 +5,7 @@
 import type { Acquisition } from './acquisition';
 import type { ComplexPlane } from './grid';
 import type { Parameters, ValuesOf } from './parameter';
+import type { PhantomId } from './phantoms/phantom';
 import type { Random } from './random';
 
 export interface Source {
@@ -83,7 +84,10 @@ interface CauseBase<P extends Parameters> extends Described<P> {
   readonly changesMatrix?: boolean;
   /** Parameter values at which the cause does nothing, where there are such. */
   readonly identity?: ValuesOf<P>;
-  /** Quantities that the swatch moves, each [mild, strong], where the line from identity through the initial value does not suit. */
+  /** The phantom on which the swatch shows it best. Left out: the head. */
+  readonly phantom?: PhantomId;
+  /** Quantities that the swatch moves, each [mild, strong], where the line from identity through the initial value does not suit. Two equal
+   *  ends hold a quantity at another value than its initial one. */
   readonly strength?: { readonly [K in keyof P]?: readonly [mild: number, strong: number] };
 }
 

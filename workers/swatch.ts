@@ -1,16 +1,15 @@
 /**
- * The picture of a cause in the catalogue: its model runs on the head phantom, and the result is drawn into a square as large as the
+ * The picture of a cause in the catalogue: its model runs on the phantom that shows it best, and the result is drawn into a square as large as the
  * phantom's field of view, or as the part of k-space that a clean scan covers. No strip is burned in: the sample book draws the stitched
  * edge beside each, and says of all of them that they are simulated.
  */
 import { encode } from 'fast-png';
-import { transform } from '../recon/fourier';
 import { asComplex, type ComplexPlane, type Grid } from '../recon/grid';
-import { headGrid, headImage } from '../recon/phantoms/head';
+import { phantomGrid, type Phantom } from '../recon/phantoms/phantom';
 import { causeOf } from '../recon/recipe-check';
 import { randomOf } from '../recon/random';
 import { prepare, simulate, type PreparedObject } from '../recon/simulate';
-import { swatchAcquisition, swatchRecipe } from '../recon/swatch';
+import { swatchAcquisition, swatchObject, swatchPhantom, swatchRecipe } from '../recon/swatch';
 import { kspaceWindow, logMagnitude } from './encode-planes';
 import type { SwatchJob, ThumbnailResult } from './job';
 
@@ -20,7 +19,7 @@ const imageWindow = [0, 1.1] as const;
 /** Noise of each channel over the brightest tissue: a clean head scan (common practice: signal to noise of 40 to 100). */
 const noise = 0.01;
 
-/** The phantom at each size, with and without a phase. */
+/** Each phantom at each size, with and without a phase. */
 const objects = new Map<string, PreparedObject>();
 
 /** Pictures that were drawn last, about 10 kB each: everybody opens the same book. */
@@ -41,20 +40,21 @@ function encodeSwatch({ causeId, strength, domain, side }: SwatchJob): Uint8Arra
   const cause = causeOf(causeId);
   if (cause === undefined) throw new RangeError(`causeId must be in the catalogue, got ${causeId}`);
   const recipe = swatchRecipe(cause, strength);
-  const { image, kspace } = simulate(phantom(side, recipe.objectPhase), recipe, swatchAcquisition);
+  const phantom = swatchPhantom(cause);
+  const { image, kspace } = simulate(objectOf(phantom, side, recipe.objectPhase), recipe, swatchAcquisition);
   const drawn = {
-    image: () => draw({ values: image.values, grid: image, window: imageWindow }, headGrid(side), side),
-    kspace: () => draw({ values: logMagnitude(kspace), grid: kspace, window: kspaceWindow }, transform(phantom(side).object), side),
+    image: () => draw({ values: image.values, grid: image, window: imageWindow }, phantomGrid(phantom, side), side),
+    kspace: () => draw({ values: logMagnitude(kspace), grid: kspace, window: kspaceWindow }, objectOf(phantom, side).kspace(), side),
   };
   const data = domain === 'half' ? halves(drawn.image(), drawn.kspace(), side) : drawn[domain]();
   return encode({ width: side, height: side, data, channels: 1, depth: 8 });
 }
 
-function phantom(side: number, phase?: PreparedObject['phase']): PreparedObject {
-  const key = `${side} ${phase?.range} ${phase?.seed}`;
+function objectOf(phantom: Phantom, side: number, phase?: PreparedObject['phase']): PreparedObject {
+  const key = `${phantom.id} ${side} ${phase?.range} ${phase?.seed}`;
   const known = objects.get(key);
   if (known) return known;
-  const object = prepare(withNoise(asComplex(headImage(headGrid(side)))), phase);
+  const object = prepare(withNoise(asComplex(swatchObject(phantom, side))), phase);
   objects.set(key, object);
   return object;
 }

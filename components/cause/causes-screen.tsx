@@ -29,7 +29,7 @@ interface CausesScreenProps {
   onParams: (params: Record<string, string | undefined>) => void;
 }
 
-const computed = 'computed on the demo phantom, every one SIMULATED · NOT FOR DIAGNOSIS';
+const computed = 'computed on phantoms, every one SIMULATED · NOT FOR DIAGNOSIS';
 
 /** The foot of the book. */
 function BookFoot() {

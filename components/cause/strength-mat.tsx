@@ -1,5 +1,5 @@
 /**
- * The cause at work: picture and k-space of the head phantom, and one slider from mild to strong. What the slider moves stands under
+ * The cause at work: picture and k-space of the phantom that shows it best, and one slider from mild to strong. What the slider moves stands under
  * it with its value.
  */
 import { useState } from 'react';
@@ -33,6 +33,7 @@ export function StrengthMat({ cause, gutters }: StrengthMatProps) {
   const [room, setRoom] = useState(0);
   const [percent, setPercent] = useState(startPercent);
   const strength = percent / 100;
+  const named = `the ${cause.phantom.title.toLowerCase()} phantom`;
   const figure = { lines: side, phaseEncode: 'row', simulated: true, role: simulated, size: pictureSide(room) } as const;
   const source = (domain: 'image' | 'kspace'): string => swatchOf(cause.id, { strength, domain, side: String(side) as '256' });
   return (
@@ -47,21 +48,15 @@ export function StrengthMat({ cause, gutters }: StrengthMatProps) {
               <Figure
                 {...figure}
                 source={source('image')}
-                alt={`${cause.title} on the demo phantom: picture`}
-                note="demo phantom, 240 mm"
+                alt={`${cause.title} on ${named}: picture`}
+                note={`${cause.phantom.title.toLowerCase()} phantom, ${cause.phantom.fieldOfViewMm} mm`}
               />
-              <Figure
-                {...figure}
-                source={source('kspace')}
-                alt={`${cause.title} on the demo phantom: k-space`}
-                edge="lines"
-                note="k-space, log"
-              />
+              <Figure {...figure} source={source('kspace')} alt={`${cause.title} on ${named}: k-space`} edge="lines" note="k-space, log" />
             </>
           ) : null}
         </View>
         <Text variant="caption" tone="matInkSoft" style={{ paddingTop: space(2) }}>
-          computed by the model on the demo phantom: SIMULATED · NOT FOR DIAGNOSIS
+          computed by the model on {named}: SIMULATED · NOT FOR DIAGNOSIS
         </Text>
       </View>
       <View style={{ paddingHorizontal: gutters, paddingTop: space(2) }} {...{ dataSet: { screenOnly: 'true' } }}>

@@ -20,6 +20,7 @@ export const banding = defineCause({
   domain: 'image',
   seen: ['lines', 'signal-loss'],
   runsAlong: 'both',
+  phantom: 'resolution',
   formula: String.raw`S' = S \left|\sin\!\left(\pi\, \Delta f\, T_R + \tfrac{1}{2}\beta\right)\right|`,
   drivers: [
     { fact: 'TR', does: 'sets the distance of the bands in frequency, 1/TR; shorter is better' },

@@ -29,6 +29,7 @@ export const chemicalShift = defineCause({
   domain: 'image',
   seen: ['lines', 'distortion'],
   runsAlong: 'readout',
+  phantom: 'abdomen',
   formula: String.raw`I'(\mathbf{r}) = W(\mathbf{r}) + F(\mathbf{r} - \Delta\,\mathbf{e})\, e^{i\varphi},\quad \Delta = \frac{\delta f_0}{\mathrm{BW}},\quad \varphi = 2\pi\, \delta f_0\, T_E`,
   drivers: [
     { fact: 'Bandwidth per pixel', does: 'divides the shift along the readout' },

@@ -13,6 +13,7 @@ export const clipping = defineCause({
   domain: 'kspace',
   seen: ['shading', 'ghosts', 'other'],
   runsAlong: 'none',
+  phantom: 'abdomen',
   formula: String.raw`\operatorname{Re} K' = \max(-L\hat K, \min(L\hat K, \operatorname{Re} K)),\ \operatorname{Im}\ \text{alike},\quad \hat K = \max |K|`,
   drivers: [
     { fact: 'Receiver gain', does: 'sets the level; it stands in no standard attribute of the header' },

@@ -49,6 +49,7 @@ export const crossTalk = defineCause({
   domain: 'image',
   seen: ['signal-loss', 'shading'],
   runsAlong: 'both',
+  phantom: 'abdomen',
   formula: String.raw`S' = S \left(1 - o \left(1 - \frac{1 - e^{-T_R'/T_1}}{1 - e^{-T_R/T_1}}\right)\right),\quad o = 2\,\mathrm{erfc}\!\left(\sqrt{\ln 2}\,(1 + g)\right)`,
   drivers: [
     { fact: 'Slice thickness and spacing', does: 'give the gap g between slices, in thicknesses' },

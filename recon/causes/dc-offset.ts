@@ -17,6 +17,7 @@ export const dcOffset = defineCause({
   domain: 'kspace',
   seen: ['other', 'lines'],
   runsAlong: 'phase-encode',
+  phantom: 'vials',
   formula: String.raw`K'(k_x, n) = K(k_x, n) + c\left(1 + d\left(\tfrac{n}{N-1} - \tfrac12\right)\right)`,
   drivers: [{ fact: 'Averages', does: 'with the RF phase reversed from one to the next, two of them cancel the offset' }],
   needsObjectPhase: true,

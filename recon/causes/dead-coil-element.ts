@@ -17,6 +17,7 @@ export const deadCoilElement = defineCause({
   domain: 'image',
   seen: ['shading', 'signal-loss'],
   runsAlong: 'none',
+  phantom: 'vials',
   formula: String.raw`I' = I \sqrt{\frac{\sum_i a_i^2 |C_i|^2}{\sum_i |C_i|^2}},\quad |C_i| = e^{-|r - r_i|^2 / 2w^2}`,
   drivers: [
     { fact: 'Elements in use', does: 'say how many elements share the signal, and whether one was left out of the scan' },

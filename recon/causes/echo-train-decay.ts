@@ -18,6 +18,7 @@ export const echoTrainDecay = defineCause({
   domain: 'kspace',
   seen: ['blur', 'ghosts', 'signal-loss'],
   runsAlong: 'phase-encode',
+  phantom: 'vials',
   formula: String.raw`K'(k_x, k_y) = K(k_x, k_y)\, e^{-(e(k_y) - e(0))\, s / T_2}`,
   drivers: [
     { fact: 'Echo train length', does: 'is E; with the echo spacing it sets how long the train lasts' },

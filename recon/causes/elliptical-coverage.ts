@@ -15,6 +15,7 @@ export const ellipticalCoverage = defineCause({
   domain: 'kspace',
   seen: ['blur'],
   runsAlong: 'both',
+  phantom: 'resolution',
   formula: String.raw`K'(k_x, k_y) = 0 \quad\text{where}\quad \left(\frac{k_x}{s M / 2}\right)^2 + \left(\frac{k_y}{s N / 2}\right)^2 > 1`,
   drivers: [
     { fact: 'Coverage of k-space', does: 'says elliptical where the corners were left out, and percent sampling then stands near 78.5' },

@@ -28,6 +28,7 @@ export const failedFatSuppression = defineCause({
   domain: 'image',
   seen: ['shading', 'signal-loss'],
   runsAlong: 'both',
+  phantom: 'abdomen',
   formula: String.raw`I' = W \left(1 - s\, p(\Delta f)\right) + F \left(1 - s\, p(\Delta f - \delta)\right)`,
   drivers: [
     { fact: 'Fat suppression by frequency', does: 'is what fails; inversion recovery does not depend on the field' },

@@ -18,6 +18,7 @@ export const fieldOfViewReduction = defineCause({
   domain: 'kspace',
   seen: ['fold-in'],
   runsAlong: 'phase-encode',
+  phantom: 'abdomen',
   formula: String.raw`I'(y) = \sum_m I(y + m\, r N),\quad |y| < r N / 2`,
   drivers: [
     { fact: 'Percent phase field of view', does: 'is the fraction r of the full field of view' },
@@ -31,7 +32,7 @@ export const fieldOfViewReduction = defineCause({
     offCentre: quantity({ label: 'Off-centre', unit: 'of full', min: -0.25, max: 0.25, step: 0.01, initial: 0 }),
   },
   identity: { fraction: 1, offCentre: 0 },
-  strength: { fraction: [0.6, 0.4] },
+  strength: { fraction: [0.85, 0.5] },
   looks: {
     image:
       'What reaches out of the field of view on one side along the phase encoding comes in again on the opposite side, laid over what is there; where the phases of the two differ they subtract.',

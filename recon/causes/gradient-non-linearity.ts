@@ -51,6 +51,7 @@ export const gradientNonLinearity = defineCause({
   domain: 'image',
   seen: ['distortion', 'shading'],
   runsAlong: 'none',
+  phantom: 'resolution',
   formula: String.raw`r' = r - \kappa r^3,\quad I'(r') = I(r)\left|\frac{\partial r}{\partial r'}\right|`,
   drivers: [
     { fact: 'Field of view and place of the slice', does: 'set how far from the isocentre the image reaches: displacement grows with r³' },

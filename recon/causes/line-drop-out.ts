@@ -31,6 +31,7 @@ export const lineDropOut = defineCause({
   domain: 'kspace',
   seen: ['lines', 'shading'],
   runsAlong: 'phase-encode',
+  phantom: 'abdomen',
   formula: String.raw`I'(x, y) = I(x, y) - (1 - g) \sum_{k_y \in S} P_{k_y}(x)\, e^{\,i 2\pi k_y y / N}`,
   drivers: [
     { fact: 'Phase-encode axis', does: 'sets the direction across which the stripes run' },

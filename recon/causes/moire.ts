@@ -17,6 +17,7 @@ export const moire = defineCause({
   domain: 'image',
   seen: ['lines', 'fold-in'],
   runsAlong: 'phase-encode',
+  phantom: 'abdomen',
   formula: String.raw`I'(y) = \sum_m I(y + m r L)\, e^{-i 2\pi c\, (2 (y + m r L)/L)^2}`,
   drivers: [
     { fact: 'Percent phase field of view', does: 'is the fraction r that the object is folded to' },

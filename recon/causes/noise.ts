@@ -70,6 +70,7 @@ export const noise = defineCause({
   domain: 'kspace',
   seen: ['noise'],
   runsAlong: 'none',
+  phantom: 'resolution',
   formula: String.raw`K' = K + \sigma\,(g_1 + i g_2),\quad \sigma = \bar S / \mathrm{SNR},\quad M = \sqrt{\textstyle\sum_{c=1}^{n} |I_c + n_c|^2}`,
   drivers: [
     { fact: 'Slice thickness and pixel size', does: 'SNR rises with the volume of a voxel' },

@@ -18,6 +18,7 @@ export const offResonance = defineCause({
   domain: 'image',
   seen: ['distortion', 'signal-loss', 'blur'],
   runsAlong: 'both',
+  phantom: 'resolution',
   formula: String.raw`I'\!\left(x + \frac{\Delta f}{\mathrm{BW}}\right) = \frac{I(x)}{\left|1 + \partial_x \Delta f / \mathrm{BW}\right|}\, \left|\mathrm{sinc}(\delta f\, T_E)\right| e^{-i 2\pi \Delta f\, T_E}`,
   drivers: [
     { fact: 'Bandwidth per pixel', does: 'divides the displacement along the readout' },

@@ -16,6 +16,7 @@ export const partialFourier = defineCause({
   domain: 'kspace',
   seen: ['blur', 'lines', 'signal-loss'],
   runsAlong: 'both',
+  phantom: 'resolution',
   formula: String.raw`K'(k) = \begin{cases} K(k) & k \ge -(2f - 1)\,N/2 \\ 0 & \text{else} \end{cases}`,
   drivers: [
     { fact: 'Partial Fourier fraction', does: 'is f; the band 2f − 1 about the centre is complete on both sides' },

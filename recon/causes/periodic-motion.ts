@@ -83,6 +83,7 @@ export const periodicMotion = defineCause({
   domain: 'kspace',
   seen: ['ghosts'],
   runsAlong: 'phase-encode',
+  phantom: 'abdomen',
   formula: String.raw`K'(k_x, n) = K(k_x, n)\, e^{\,i a \sin(2\pi f T n + \varphi)},\quad T = T_R \, N_{\mathrm{avg}};\quad a = -2\pi k A / N \text{ for a displacement}`,
   drivers: [
     { fact: 'TR × averages', does: 'sets how far apart the copies lie: frac(TR × averages × frequency) of the phase field of view' },

@@ -47,6 +47,7 @@ export const pulsatileFlow = defineCause({
   domain: 'kspace',
   seen: ['ghosts'],
   runsAlong: 'phase-encode',
+  phantom: 'abdomen',
   formula: String.raw`K'(n) = K\{I - v\} + K\{v\}\, (1 + m \cos\omega n)\, e^{\,i(\bar\varphi + a \sin\omega n)},\quad \omega = 2\pi f\, T_R N_{\mathrm{avg}}`,
   drivers: [
     {
@@ -83,6 +84,14 @@ export const pulsatileFlow = defineCause({
     meanPhase: 0,
     brightness: 0,
     start: 0,
+  },
+  // The aorta of the abdomen.
+  strength: {
+    phaseSwing: [0.25, 2.5],
+    brightness: [0.1, 0.75],
+    alongPhaseEncode: [0.02, 0.02],
+    alongReadout: [0.04, 0.04],
+    radius: [0.025, 0.025],
   },
   looks: {
     image:

@@ -14,6 +14,7 @@ export const quadratureImbalance = defineCause({
   domain: 'kspace',
   seen: ['ghosts'],
   runsAlong: 'both',
+  phantom: 'abdomen',
   formula: String.raw`s' = K_1 s + K_2 s^{*},\quad K_1 = \tfrac12(1 + g e^{i\psi}),\quad K_2 = \tfrac12(1 - g e^{-i\psi})`,
   drivers: [{ fact: 'Averages', does: 'with the RF phase stepped through the channels, four of them cancel the imbalance' }],
   needsObjectPhase: true,

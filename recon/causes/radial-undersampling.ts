@@ -71,6 +71,7 @@ export const radialUndersampling = defineCause({
   domain: 'kspace',
   seen: ['lines', 'noise'],
   runsAlong: 'both',
+  phantom: 'abdomen',
   formula: String.raw`I' = I * \frac{\pi}{P} \sum_{p=1}^{P} h(\mathbf{r} \cdot \mathbf{n}_p),\quad h(t) = \int_{-1/2}^{1/2} |k|\, e^{\,i 2\pi k t}\, dk`,
   drivers: [
     { fact: 'Number of spokes', does: 'is P: the clean circle about a bright point is 2P/π pixels across' },

@@ -35,6 +35,7 @@ export const randomUndersampling = defineCause({
   domain: 'kspace',
   seen: ['noise', 'ghosts', 'blur'],
   runsAlong: 'phase-encode',
+  phantom: 'abdomen',
   formula: String.raw`K'(k_y) = m(k_y)\,K(k_y),\quad P\{m = 1\} \propto \left(1 - |k_y| / k_{\max}\right)^q,\quad \sum m = N / R`,
   drivers: [
     { fact: 'Acceleration', does: 'is R: one line in R is taken, drawn at random' },

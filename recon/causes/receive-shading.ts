@@ -16,6 +16,7 @@ export const receiveShading = defineCause({
   domain: 'image',
   seen: ['shading'],
   runsAlong: 'none',
+  phantom: 'resolution',
   formula: String.raw`I' = I\,b,\quad \ln b = \tfrac12 \ln(T)\,u + \tfrac12 \ln(S)\,u^3 - \ln(C)\,\rho^2`,
   drivers: [
     { fact: 'Receive coil and the elements in use', does: 'set how the sensitivity falls off from the elements into the body' },

@@ -45,6 +45,7 @@ export const spikes = defineCause({
   domain: 'kspace',
   seen: ['lines'],
   runsAlong: 'both',
+  phantom: 'abdomen',
   formula: String.raw`K'(k_{x0}, k_{y0}) = K + A e^{i\varphi}\;\Rightarrow\; I' = I + \tfrac{A}{\sqrt{NM}}\, e^{\,i(2\pi (k_{x0} x + k_{y0} y)/N + \varphi)}`,
   drivers: [
     { fact: 'Averages', does: 'divide a spike: it falls into one of them' },

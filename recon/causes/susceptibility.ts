@@ -21,6 +21,7 @@ export const susceptibility = defineCause({
   domain: 'image',
   seen: ['signal-loss', 'distortion'],
   runsAlong: 'readout',
+  phantom: 'resolution',
   formula: String.raw`\frac{\Delta B}{B_0} = \frac{\Delta\chi}{3} \left(\frac{a}{r}\right)^3 \left(3\cos^2\theta - 1\right),\quad u = \frac{\bar\gamma\, \Delta B}{\mathrm{BW}}`,
   drivers: [
     { fact: 'Bandwidth per pixel', does: 'divides the displacement along the readout' },

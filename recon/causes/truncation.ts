@@ -23,6 +23,7 @@ export const truncation = defineCause({
   domain: 'kspace',
   seen: ['lines', 'blur'],
   runsAlong: 'both',
+  phantom: 'resolution',
   formula: String.raw`K'(k) = \begin{cases} K(k) & |k| < \alpha N / 2 \\ 0 & \text{else} \end{cases},\quad I'(x) = I(x) * \frac{\sin \pi \alpha x}{\pi x}`,
   drivers: [
     {

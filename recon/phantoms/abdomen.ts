@@ -1,12 +1,13 @@
 /**
  * A slice through the upper abdomen, our own, seen from the feet: body wall with fat, muscles, ribs, liver with vessels, stomach,
- * spleen, pancreas, kidneys, the great vessels, spine and cord. No two organs overlap, so that every pixel is filled once.
+ * bowel, spleen, pancreas, kidneys, the great vessels, spine and cord. No two organs overlap, so that every pixel is filled once.
  */
 import type { Material } from './material';
 import { closedCurve, disc, mirrored, oval } from './outline';
 import type { Amounts, MaterialShape, Phantom } from './phantom';
 import { replaces } from './phantom';
 import { randomOf } from '../random';
+import { taper } from './stroke';
 import { tissues } from './tissues';
 
 const { skin, fat, muscle, bone, marrow, liver, spleen, pancreas, kidneyCortex, kidneyMedulla, blood, fluid, cord, bile, stomachFluid } =
@@ -105,6 +106,23 @@ const kidneys: readonly MaterialShape[] = [...both(kidney, replaces(kidneyCortex
 /** Gall bladder, in its bed under the liver. */
 const gallBladder = shape(oval([9, 5], [-41, -12], -40), replaces(bile, liver));
 
+/** Loops of bowel between stomach and pancreas: a wall about its content. */
+const bowel: readonly MaterialShape[] = (
+  [
+    [8, 6.6, 30, -45, 0],
+    [9, 5.2, 10, -33, 24],
+  ] as const
+).flatMap(([a, b, x, y, degrees]) => [
+  shape(oval([a, b], [x, y], degrees), replaces(muscle, fat)),
+  shape(oval([a - 2, b - 2], [x, y], degrees), replaces(stomachFluid, muscle, 0.7)),
+]);
+
+/** Crura of the diaphragm on either side of the aorta. */
+const crura: readonly MaterialShape[] = [
+  shape(oval([2.6, 7.5], [-6.3, 18.6], 6), replaces(muscle, fat)),
+  shape(oval([2.4, 7], [20.2, 18.6], -6), replaces(muscle, fat)),
+];
+
 const vessels: readonly MaterialShape[] = [
   shape(disc(10, [7, 16]), replaces(muscle, fat)),
   shape(disc(8.6, [7, 16]), replaces(blood, muscle)),
@@ -113,23 +131,23 @@ const vessels: readonly MaterialShape[] = [
   shape(oval([2.6, 1.9], [62, 14]), replaces(blood, fat)),
 ];
 
-/** Veins of the liver and branches of the portal vein, drawn out towards the hilum. */
-const liverVessels: readonly MaterialShape[] = (
-  [
-    [-52, -30, 11, 3.4, 24],
-    [-74, -30, 12, 2.6, 40],
-    [-84, -4, 13, 3, -12],
-    [-104, 8, 8, 1.8, -30],
-    [-100, -30, 8, 1.8, 60],
-    [-62, -54, 9, 2, 80],
-    [-30, -52, 10, 2.2, -50],
-    [-4, -62, 8, 1.7, -20],
-    [-64, 2, 7, 2.2, -50],
-    [-119, 22, 6, 1.8, -70],
-    [-116, -10, 5, 1.4, 70],
-    [-114, 32, 4, 1.3, 30],
-  ] as const
-).map(([x, y, a, b, degrees]) => shape(oval([a, b], [x, y], degrees), replaces(blood, liver)));
+/** Branches of the portal vein from the hilum, and veins of the liver; each begins beside its parent, so that none overlaps. */
+const liverVessels: readonly MaterialShape[] = [
+  taper([[-46, -27], [-54, -30], [-63, -31]], 3.4, 2.8), // prettier-ignore
+  taper([[-67.5, -34.5], [-77, -45], [-88, -50]], 2.3, 0.9), // prettier-ignore
+  taper([[-69, -28.5], [-82, -24], [-97, -25], [-109, -20]], 2.4, 0.8), // prettier-ignore
+  taper([[-38, -31], [-30, -43], [-15, -55], [3, -63]], 2.4, 0.9), // prettier-ignore
+  taper([[-62, 1], [-78, -6], [-98, -6], [-115, -11]], 2.7, 0.9), // prettier-ignore
+  taper([[-92, 2.5], [-104, 11], [-112, 24], [-116, 37]], 2, 0.8), // prettier-ignore
+  taper([[-57, -45], [-64, -57], [-66, -69]], 2.1, 0.9), // prettier-ignore
+  taper([[-40, -52], [-42, -63], [-39, -73]], 1.8, 0.9), // prettier-ignore
+  disc(1.5, [-101, -38]),
+  disc(1.2, [-91, -36]),
+  disc(1.4, [-121, 4]),
+  disc(1.3, [-19, -69]),
+  disc(1.5, [-80, -15]),
+  disc(1.2, [-83, 1.5]),
+].map((outline) => shape(outline, replaces(blood, liver)));
 
 /** Faint blotches of the liver, a part in fifty. */
 function texture(): MaterialShape[] {
@@ -150,5 +168,18 @@ export const abdomenPhantom: Phantom = {
   id: 'abdomen',
   title: 'Abdomen',
   fieldOfView: 0.38,
-  shapes: [...wall, ...ribs, ...spine, ...organs, ...stomach, ...kidneys, ...vessels, gallBladder, ...liverVessels, ...texture()],
+  shapes: [
+    ...wall,
+    ...ribs,
+    ...spine,
+    ...organs,
+    ...stomach,
+    ...bowel,
+    ...kidneys,
+    ...crura,
+    ...vessels,
+    gallBladder,
+    ...liverVessels,
+    ...texture(),
+  ],
 };

@@ -1,153 +1,133 @@
 /**
- * An axial head of ellipses, our own: skin, scalp fat, the two tables of the skull with marrow between, cerebrospinal fluid,
- * cortex with sulci, white matter, ventricles, deep grey matter, and a comb of fine bars for judging resolution. Amounts of tissue add,
- * so each shape says what gives way to it.
+ * An axial head, our own, at the level of the basal ganglia, seen from the feet: skin, scalp fat with the temporal muscles, the two tables
+ * of the skull with marrow between, cerebrospinal fluid, folded cortex, white matter, ventricles and deep grey matter. At this level no
+ * orbits are cut. Amounts of tissue add, so each shape says what gives way to it.
  */
 import type { ComplexPlane, Grid, Plane } from '../grid';
-import type { Random } from '../random';
 import { randomOf } from '../random';
+import { cortexOutlines } from './cortex';
 import type { Material } from './material';
-import { mirrored, oval } from './outline';
+import { closedCurve, disc, mirrored, oval, type Pair } from './outline';
 import type { Amounts, MaterialShape, Phantom } from './phantom';
 import { phantomGrid, replaces, weighted } from './phantom';
 import { shapeImage, shapeKspace } from './shape';
+import { eggPoint } from './surface';
 import { tissues } from './tissues';
 
-const { skin, fat, bone, marrow, fluid, grey, white, blood } = tissues;
+const { skin, fat, muscle, bone, marrow, fluid, grey, white, blood } = tissues;
 
 /** Brightness of the picture that is drawn without a sequence, between air at 0 and fat at 1. */
 const t1Like: ReadonlyMap<Material, number> = new Map([
   [skin, 0.5],
   [fat, 1],
+  [muscle, 0.45],
   [bone, 0.08],
-  [marrow, 0.46],
+  [marrow, 0.6],
   [fluid, 0.15],
   [grey, 0.5],
   [white, 0.74],
-  [blood, 0.5],
+  [blood, 0.42],
 ]);
 
-const ellipse = (adds: Amounts, ...place: Parameters<typeof oval>): MaterialShape => ({ outline: oval(...place), adds });
+const shape = (outline: MaterialShape['outline'], adds: Amounts): MaterialShape => ({ outline, adds });
+const curve = (points: readonly number[], adds: Amounts): MaterialShape => shape(closedCurve(points), adds);
 
 /** One shape on the right of the picture and its mirror image on the left. */
-function pair(adds: Amounts, ...place: Parameters<typeof oval>): MaterialShape[] {
-  const outline = oval(...place);
-  return [
-    { outline, adds },
-    { outline: mirrored(outline), adds },
-  ];
+const pair = (outline: MaterialShape['outline'], adds: Amounts): MaterialShape[] => [shape(outline, adds), shape(mirrored(outline), adds)];
+
+/** An oval of the head's own form. */
+function egg(axes: Pair, y = 0): MaterialShape['outline'] {
+  const points = Array.from({ length: 40 }, (_, i) => eggPoint(axes, (2 * Math.PI * i) / 40, y));
+  return closedCurve(points.flatMap((point) => [point.x, point.y]));
 }
 
 /** From the skin inwards. The skull is thicker at the back. */
 const shells: readonly MaterialShape[] = [
-  ellipse([[skin, 1]], [75, 95], [0, 0]),
-  ellipse(replaces(fat, skin), [73.4, 93.4], [0, 0]),
-  ellipse(replaces(bone, fat), [69.6, 88.8], [0, -0.2]),
-  ellipse(replaces(marrow, bone), [67.9, 86.9], [0, -0.4]),
-  ellipse(replaces(bone, marrow), [65.3, 83.4], [0, -1]),
-  ellipse(replaces(fluid, bone), [63.6, 81.4], [0, -1.2]),
-  ellipse(replaces(grey, fluid), [62, 79.6], [0, -1.2]),
+  shape(egg([75.5, 95]), [[skin, 1]]),
+  shape(egg([74, 93.4]), replaces(fat, skin)),
+  shape(egg([69.4, 88.6], -0.2), replaces(bone, fat)),
+  shape(egg([68, 87.2], -0.4), replaces(marrow, bone)),
+  shape(egg([65.6, 83.6], -1), replaces(bone, marrow)),
+  shape(egg([64, 81.8], -1.2), replaces(fluid, bone)),
 ];
 
-/** Frontal sinus, and the vein in the fold of the dura behind. */
-const midlineOfSkull: readonly MaterialShape[] = [
-  ellipse(replaces(bone, marrow), [6.5, 1.3], [3, -85.9], 3),
-  ellipse(replaces(blood, fluid), [3.4, 1.9], [0, 77.6]),
+/** A band beneath the skin on the right, between two distances from it, over part of the way round: the temporal muscle. */
+function temporalMuscle(): MaterialShape['outline'] {
+  const [from, to, n] = [0.72, 1.62, 7];
+  const at = (i: number, inset: number): Pair => {
+    const { x, y } = eggPoint([74 - inset, 93.4 - inset], from + (i / n) * (to - from), -0.1);
+    return [x, y];
+  };
+  const along = Array.from({ length: n + 1 }, (_, i) => i);
+  const thick = (i: number): number => 1.35 * Math.sin((Math.PI * (i + 0.4)) / (n + 0.8));
+  const outer = along.map((i) => at(i, 2.5 - thick(i)));
+  const inner = along.map((i) => at(i, 2.5 + thick(i))).reverse();
+  return closedCurve([...outer, ...inner].flat());
+}
+
+/** Veins in the fold of the dura behind and in front, the muscles at the temples, and the suture lines left out. */
+const aroundTheBrain: readonly MaterialShape[] = [
+  ...pair(temporalMuscle(), replaces(muscle, fat)),
+  curve([-3.6, 79.6, 0, 80.2, 3.6, 79.6, 1.6, 77.9, 0, 76.2, -1.6, 77.9], replaces(blood, fluid)),
+  shape(oval([1.8, 0.7], [0, -82.1]), replaces(blood, fluid)),
 ];
 
-/** White matter of both hemispheres; the cortex is what is left between it and the shells. */
-const whiteMatter = { a: 56, b: 73, y: -1.2 } as const;
-
-/** The fold between the hemispheres, before and behind the corpus callosum: cortex on both sides, fluid between. */
-const fissure: readonly MaterialShape[] = [
-  ellipse(replaces(grey, white), [5.2, 23], [0, -54]),
-  ellipse(replaces(fluid, grey), [0.9, 22], [0, -57]),
-  ellipse(replaces(grey, white), [5.4, 20.5], [0, 53.5]),
-  ellipse(replaces(fluid, grey), [0.9, 20], [0, 56]),
-  ...pair(replaces(fluid, grey, 0.57), [5.5, 1.5], [7.5, -45], -20), // cingulate sulci
-  ...pair(replaces(fluid, grey, 0.57), [6, 1.6], [8, 44], 24),
-];
+/** Ventricles with the choroid plexus in them, and the cistern behind the thalami. Right of the picture. */
+const frontalHorn = closedCurve([1.1, -13, 1, -22, 1.8, -30, 6, -36, 12.6, -39.6, 14, -37.4, 11.2, -30, 7.6, -22, 4.4, -15, 2.4, -11.6]);
+const trigone = closedCurve([16, 29.5, 19.4, 26.5, 23.6, 29.4, 26.8, 36.5, 28, 44.5, 26.6, 49, 24.4, 48, 21.6, 42, 18.4, 36]);
+const thirdVentricle = closedCurve([0, -6.5, 1, -2, 1.5, 5, 1.3, 12, 0, 17, -1.3, 12, -1.5, 5, -1, -2]);
 
 const ventricles: readonly MaterialShape[] = [
-  ...pair(replaces(fluid, white), [3.7, 12], [8.6, -17], 20),
-  ...pair(replaces(fluid, white), [4, 13.5], [20.5, 32], -22),
-  ellipse(replaces(fluid, white), [1.5, 9.5], [0, 6]),
-  ...pair(replaces(grey, fluid, 0.34), [1.8, 4], [18.8, 27], -22), // choroid plexus
+  ...pair(frontalHorn, replaces(fluid, white)),
+  ...pair(trigone, replaces(fluid, white)),
+  shape(thirdVentricle, replaces(fluid, white)),
+  ...pair(oval([1.7, 4.2], [21.3, 32.8], -24), replaces(grey, fluid, 0.6)),
+  shape(oval([4.4, 1.5], [0, 20.6]), replaces(fluid, white, 0.9)),
+  shape(disc(1.3, [0, 24.8]), replaces(blood, white)),
 ];
+
+/** Grey matter is paler where fibres run through it: thalamus and pallidum. Right of the picture. */
+const caudate = closedCurve([12.2, -30.5, 15, -36.2, 18, -34, 18.4, -27, 15.6, -19.5, 11, -14, 7.4, -12.4, 6.2, -14.2, 9, -21.5]);
+const thalamus = closedCurve([2.4, -3.5, 5, -6.5, 9.6, -5, 14, 1, 18.6, 8, 20, 15.5, 16.6, 20.5, 10.5, 20.8, 5.2, 17.4, 2.6, 11, 2.4, 3]);
+const putamen = closedCurve([20.8, -24, 25.4, -23.4, 29.6, -15, 31.2, -4, 30.2, 7, 27.2, 15.5, 25.2, 15, 25.6, 7, 25.4, -3, 23.8, -13]);
+const pallidum = closedCurve([21.8, -12.5, 24, -3, 24.2, 7.5, 21.4, 4.5, 17.4, -1, 15.2, -6, 18, -10]);
+const claustrum = closedCurve([31.6, -20, 34.4, -9, 34.9, 0, 33.6, 11, 33, 11, 34.1, 0, 33.6, -9, 31, -19.6]);
 
 const deepGrey: readonly MaterialShape[] = [
-  ...pair(replaces(grey, white, 0.79), [4.6, 9.4], [15.6, -15], 21), // caudate
-  ...pair(replaces(grey, white, 0.62), [7.2, 12.5], [9.6, 8], -22), // thalamus
-  ...pair(replaces(grey, white, 0.75), [5.6, 16.5], [28.2, -2], 10), // putamen
-  ...pair(replaces(white, grey, 0.33), [2.9, 10], [25, 0], 14), // pallidum
-  ...pair(replaces(grey, white), [2.6, 20], [40.5, -2], 5), // insula
-  ...pair(replaces(fluid, white), [1.1, 15], [44.2, -2], 5),
-  ...pair(replaces(grey, white), [8.4, 3.4], [50, 9.5], 14), // Sylvian fissure
-  ...pair(replaces(fluid, grey, 0.7), [7.4, 0.8], [53.4, 10.4], 14),
+  ...pair(caudate, replaces(grey, white)),
+  ...pair(thalamus, replaces(grey, white, 0.75)),
+  ...pair(putamen, replaces(grey, white, 0.95)),
+  ...pair(pallidum, replaces(grey, white, 0.5)),
+  ...pair(claustrum, replaces(grey, white, 0.9)),
 ];
 
-/** One sulcus at `turn` about the white matter: a bent bay of cortex into it, with a slit of fluid from the surface. */
-function sulcus(turn: number, random: Random): MaterialShape[] {
-  const edge = { x: whiteMatter.a * Math.cos(turn), y: whiteMatter.y + whiteMatter.b * Math.sin(turn) };
-  const normal = Math.atan2(whiteMatter.a * Math.sin(turn), whiteMatter.b * Math.cos(turn)) + 0.5 * (random.uniform() - 0.5);
-  const bend = 0.5 * (random.uniform() - 0.5);
-  const depth = 6 + 12 * random.uniform();
-  const width = 2.1 + 0.8 * random.uniform();
-  const inward = (distance: number): [number, number] => [edge.x - distance * Math.cos(normal), edge.y - distance * Math.sin(normal)];
-  const degrees = (normal * 180) / Math.PI;
-  const [kneeX, kneeY] = inward(depth - 1);
-  const tip: [number, number] = [kneeX - 3 * Math.cos(normal + 2 * bend), kneeY - 3 * Math.sin(normal + 2 * bend)];
-  return [
-    ellipse(replaces(grey, white), [depth / 2, width], inward(depth / 2 - 0.8), degrees),
-    ellipse(replaces(grey, white), [3.2, 0.8 * width], tip, degrees + (bend * 360) / Math.PI),
-    ellipse(replaces(fluid, grey, 0.8), [depth / 2 + 1.4, 0.55], inward(depth / 2 - 3.4), degrees),
-  ];
-}
-
-/** Sulci all around, left and right not alike; the Sylvian fissure and the fold in the middle are left free. */
-function sulci(random: Random): MaterialShape[] {
-  const steps = 44;
-  return Array.from({ length: steps }, (_, i) => (360 * (i + 0.3 * (random.uniform() - 0.5))) / steps)
-    .filter((degrees) => Math.abs(((degrees + 90) % 180) - 90) > 5 && Math.abs((degrees % 180) - 90) > 8)
-    .flatMap((degrees) => sulcus((degrees * Math.PI) / 180, random));
-}
-
-/** Faint blotches, so that tissue is not flat: about one part in a hundred. */
-const texture = (random: Random): MaterialShape[] =>
-  Array.from({ length: 150 }, () => {
+/** Faint blotches in the white matter, so that tissue is not flat: under one part in a hundred. */
+function texture(random: ReturnType<typeof randomOf>): MaterialShape[] {
+  return Array.from({ length: 70 }, () => {
     const radius = Math.sqrt(random.uniform());
     const turn = 2 * Math.PI * random.uniform();
-    const size: [number, number] = [1.5 + 5 * random.uniform(), 1.5 + 5 * random.uniform()];
-    return ellipse(
-      [[white, 0.018 * random.normal()]],
-      size,
-      [52 * radius * Math.cos(turn), 69 * radius * Math.sin(turn)],
-      180 * random.uniform(),
-    );
+    const size: Pair = [3 + 7 * random.uniform(), 3 + 7 * random.uniform()];
+    return shape(oval(size, [44 * radius * Math.cos(turn), 60 * radius * Math.sin(turn)], 180 * random.uniform()), [
+      [white, 0.006 * random.normal()],
+    ]);
   });
+}
 
-/** Three groups of four bars, 1.8, 1.3 and 0.9 mm wide, as far apart as they are wide. */
-const comb: readonly MaterialShape[] = [0.9, 0.65, 0.45].flatMap((half, group) =>
-  Array.from({ length: 4 }, (_, bar) => ellipse(replaces(fluid, white, 0.5), [half, 3.4], [18 + 4 * half * bar, -47 + 8 * group])),
-);
+const { surface, whiteMatter } = cortexOutlines(randomOf(5, 'cortex'));
 
-const random = randomOf(5, 'head');
-
-/** 150 mm wide and 190 mm long. */
+/** 151 mm wide and 190 mm long. */
 export const headPhantom: Phantom = {
   id: 'head',
   title: 'Head',
   fieldOfView: 0.24,
   shapes: [
     ...shells,
-    ...midlineOfSkull,
-    ellipse(replaces(white, grey), [whiteMatter.a, whiteMatter.b], [0, whiteMatter.y]),
-    ...fissure,
+    ...aroundTheBrain,
+    shape(surface, replaces(grey, fluid)),
+    shape(whiteMatter, replaces(white, grey)),
     ...ventricles,
     ...deepGrey,
-    ...sulci(random),
-    ...texture(random),
-    ...comb,
+    ...texture(randomOf(5, 'head')),
   ],
 };
 

@@ -2,7 +2,7 @@
 import type { Polygon } from './polygon';
 import type { Outline } from './shape';
 
-type Pair = readonly [number, number];
+export type Pair = readonly [number, number];
 
 const radians = (degrees: number): number => (degrees * Math.PI) / 180;
 const point = (x: number, y: number) => ({ x: x / 1000, y: y / 1000 });
@@ -33,11 +33,11 @@ export function rectangle([width, height]: Pair, [x, y]: Pair, degrees = 0): Omi
 /** Straight edges between the points. */
 export const outlineOf = (points: readonly Pair[]): Outline => ({ vertices: points.map(([x, y]) => point(x, y)) });
 
-/** Edges of a closed curve between two of its points. */
-const edgesPerSpan = 6;
-
-/** A smooth closed curve through points given as x, y, x, y …: Catmull & Rom's spline (1974, from memory), as a polygon. */
-export function closedCurve(coordinates: readonly number[]): Outline {
+/**
+ * A smooth closed curve through points given as x, y, x, y …: Catmull & Rom's spline (1974, from memory), as a polygon with
+ * `edgesPerSpan` edges between two of the points.
+ */
+export function closedCurve(coordinates: readonly number[], edgesPerSpan = 6): Outline {
   const nPoints = coordinates.length / 2;
   const at = (i: number, axis: 0 | 1): number => coordinates[2 * ((i + nPoints) % nPoints) + axis] as number;
   const vertices = Array.from({ length: nPoints * edgesPerSpan }, (_, vertex) => {

@@ -18,8 +18,11 @@ export interface MaterialShape {
   readonly adds: Amounts;
 }
 
+export const phantomIds = ['head', 'abdomen', 'resolution', 'vials'] as const;
+export type PhantomId = (typeof phantomIds)[number];
+
 export interface Phantom {
-  readonly id: string;
+  readonly id: PhantomId;
   readonly title: string;
   /** Metres along both axes in which it stands with air around it. */
   readonly fieldOfView: number;

@@ -45,7 +45,7 @@ function ring(contents: readonly Material[], distance: number, radius: number): 
 /** 200 mm across. */
 export const vialPhantom: Phantom = {
   id: 'vials',
-  title: 'Vials',
+  title: 'Vial',
   fieldOfView: 0.24,
   shapes: [
     { outline: disc(100, [0, 0]), adds: [[glass, 1]] },

@@ -75,6 +75,8 @@ export const causeSchema = z.object({
   looks: z.object({ image: z.string(), kspace: z.string() }),
   /** Whether the bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
   needsObjectPhase: z.boolean(),
+  /** What the swatch is of. */
+  phantom: z.object({ title: z.string(), fieldOfViewMm: z.number() }),
   /** The quantities that a swatch moves with its strength, each at [mild, strong]. */
   strength: z.record(z.string(), z.tuple([z.number(), z.number()])),
   remedies: z.array(remedySchema),
@@ -107,7 +109,7 @@ export const readSwatch = route({
   method: 'get',
   path: '/api/causes/:causeId/swatch',
   summary:
-    'A square PNG of the cause on the head phantom, computed by its own model: phase encoding left and right, strength 0 mild to 1 strong. Simulated, not for diagnosis',
+    'A square PNG of the cause on the phantom that shows it best, computed by its own model: phase encoding left and right, strength 0 mild to 1 strong. Simulated, not for diagnosis',
   access: everyMember,
   params: z.object({ causeId: z.string().max(60) }),
   query: z.object({

@@ -13,6 +13,7 @@ const motion: Cause = {
   parameters: [],
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
+  phantom: { title: 'Head', fieldOfViewMm: 240 },
   strength: {},
   remedies: [],
   sources: [],

@@ -13,6 +13,7 @@ const cause = (id: string, stage: Cause['stage']): Cause => ({
   parameters: [],
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
+  phantom: { title: 'Head', fieldOfViewMm: 240 },
   strength: {},
   remedies: [],
   sources: [],

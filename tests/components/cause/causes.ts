@@ -11,6 +11,7 @@ export const causeWith = (part: Partial<Cause> & { id: string }): Cause => ({
   parameters: [],
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
+  phantom: { title: 'Head', fieldOfViewMm: 240 },
   strength: {},
   remedies: [],
   sources: [],

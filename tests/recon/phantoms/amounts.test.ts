@@ -1,11 +1,9 @@
 /** Shapes that give way to one another must fit together: no organ may take away what is not there. */
-import { abdomenPhantom } from '../../../recon/phantoms/abdomen';
+import { phantoms } from '../../../recon/phantoms';
 import { phantomGrid, weighted } from '../../../recon/phantoms/phantom';
-import { resolutionPhantom } from '../../../recon/phantoms/resolution';
 import { shapeImage } from '../../../recon/phantoms/shape';
-import { vialPhantom } from '../../../recon/phantoms/vials';
 
-describe.each([abdomenPhantom, resolutionPhantom, vialPhantom].map((phantom) => [phantom.id, phantom] as const))('%s', (id, phantom) => {
+describe.each(phantoms.map((phantom) => [phantom.id, phantom] as const))('%s', (id, phantom) => {
   test('holds between none and all of each material in every pixel', () => {
     const materials = [...new Set(phantom.shapes.flatMap(({ adds }) => adds.map(([material]) => material)))];
     // Blotches of the liver are a few parts in a hundred and lie over its vessels too; an edge is right to 1/16 of a pixel's height.
