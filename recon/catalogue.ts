@@ -16,8 +16,9 @@ export type DescribedParameter =
       initial: number;
       /** The scan fact that filled `initial`, in words. */
       fromHeader?: string;
+      when?: Record<string, string[]>;
     }
-  | { id: string; label: string; options: { value: string; label: string }[]; initial: string };
+  | { id: string; label: string; options: { value: string; label: string }[]; initial: string; when?: Record<string, string[]> };
 
 export interface DescribedReconstruction {
   id: string;
@@ -40,14 +41,17 @@ export interface DescribedCause extends DescribedReconstruction {
   remedies: Remedy[];
 }
 
+const describeWhen = ({ when }: Parameter) =>
+  when ? { when: Object.fromEntries(Object.entries(when).map(([id, values]) => [id, [...values]])) } : {};
+
 function describeParameter(id: string, parameter: Parameter, acquisition?: Acquisition): DescribedParameter {
   if (parameter.kind === 'choice') {
     const { label, options, initial } = parameter;
-    return { id, label, options: options.map((option) => ({ ...option })), initial };
+    return { id, label, options: options.map((option) => ({ ...option })), initial, ...describeWhen(parameter) };
   }
   const { label, unit, min, max, step } = parameter;
   const { value, fact } = initialOf(parameter, acquisition);
-  const described = { id, label, unit, min, max, step, initial: Number(value) };
+  const described = { id, label, unit, min, max, step, initial: Number(value), ...describeWhen(parameter) };
   return fact === undefined ? described : { ...described, fromHeader: `${fact} in the header` };
 }
 

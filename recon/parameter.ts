@@ -4,6 +4,10 @@
  */
 import type { Acquisition } from './acquisition';
 
+/** Choices of the same model, each with the values for which a parameter matters; all of them must hold. For other values it is not shown, but
+ *  kept and still checked. */
+export type When = Readonly<Record<string, readonly string[]>>;
+
 /** A number with a unit. `fromHeader` returns what the acquisition says, or undefined; `fact` names it in words. */
 export interface Quantity {
   readonly kind: 'quantity';
@@ -14,6 +18,7 @@ export interface Quantity {
   readonly step: number;
   readonly initial: number;
   readonly fromHeader?: { readonly fact: string; readonly read: (acquisition: Acquisition) => number | undefined };
+  readonly when?: When;
 }
 
 /** One of a few. */
@@ -22,6 +27,7 @@ export interface Choice<Value extends string = string> {
   readonly label: string;
   readonly options: readonly { readonly value: Value; readonly label: string }[];
   readonly initial: Value;
+  readonly when?: When;
 }
 
 export type Parameter = Quantity | Choice;
@@ -38,4 +44,9 @@ export const choice = <Value extends string>(description: {
   label: string;
   options: readonly { readonly value: Value; readonly label: string }[];
   initial: NoInfer<Value>;
+  when?: When;
 }): Choice<Value> => ({ kind: 'choice', ...description });
+
+/** Whether a parameter matters at these values of the others. */
+export const matters = ({ when = {} }: Pick<Parameter, 'when'>, values: Readonly<Record<string, number | string>>): boolean =>
+  Object.entries(when).every(([id, shownAt]) => shownAt.some((value) => value === values[id]));

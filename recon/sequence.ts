@@ -45,6 +45,7 @@ export const readoutParameters = {
     step: 1,
     initial: 200,
     fromHeader: { fact: 'Bandwidth per pixel', read: ({ bandwidthPerPixel }) => bandwidthPerPixel },
+    when: { sequence: ['spin-echo', 'gradient-echo'] },
   }),
   echoTime: quantity({
     label: 'TE',
@@ -54,8 +55,17 @@ export const readoutParameters = {
     step: 0.1,
     initial: 6.7,
     fromHeader: { fact: 'TE', read: ({ echoTime }) => (echoTime === undefined ? undefined : 1000 * echoTime) },
+    when: { sequence: ['gradient-echo'] },
   }),
-  echoSpacing: quantity({ label: 'Echo spacing (echo-planar)', unit: 'ms', min: 0.2, max: 3, step: 0.01, initial: 0.6 }),
+  echoSpacing: quantity({
+    label: 'Echo spacing',
+    unit: 'ms',
+    min: 0.2,
+    max: 3,
+    step: 0.01,
+    initial: 0.6,
+    when: { sequence: ['echo-planar'] },
+  }),
 } as const;
 
 /** The values of `readoutParameters`, in their units. */

@@ -65,7 +65,7 @@ export const crossTalk = defineCause({
       ],
       initial: 'parallel',
     }),
-    gap: quantity({ label: 'Gap', unit: 'of thickness', min: 0, max: 1, step: 0.01, initial: 0 }),
+    gap: quantity({ label: 'Gap', unit: 'of thickness', min: 0, max: 1, step: 0.01, initial: 0, when: { stack: ['parallel'] } }),
     effective: quantity({ label: 'Time since the neighbour', unit: 'of TR', min: 0.02, max: 1, step: 0.01, initial: 0.5 }),
     repetitionTime: quantity({
       label: 'TR',
@@ -78,15 +78,16 @@ export const crossTalk = defineCause({
     }),
     longitudinalRelaxation: quantity({ label: 'T1 of the tissue', unit: 'ms', min: 200, max: 4000, step: 10, initial: 800 }),
     position: quantity({
-      label: 'Crossing: off centre along phase encoding',
+      label: 'Off centre along phase encoding',
       unit: 'of FOV',
       min: -0.5,
       max: 0.5,
       step: 0.01,
       initial: 0.2,
+      when: { stack: ['crossing'] },
     }),
-    width: quantity({ label: 'Crossing: width of the band', unit: 'mm', min: 1, max: 40, step: 0.5, initial: 8 }),
-    angle: quantity({ label: 'Crossing: angle to the readout', unit: '°', min: -90, max: 90, step: 1, initial: 0 }),
+    width: quantity({ label: 'Width of the band', unit: 'mm', min: 1, max: 40, step: 0.5, initial: 8, when: { stack: ['crossing'] } }),
+    angle: quantity({ label: 'Angle to the readout', unit: '°', min: -90, max: 90, step: 1, initial: 0, when: { stack: ['crossing'] } }),
   },
   identity: {
     stack: 'crossing',

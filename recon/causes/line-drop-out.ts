@@ -49,7 +49,15 @@ export const lineDropOut = defineCause({
       ],
       initial: 'neighbouring',
     }),
-    position: quantity({ label: 'Place of the first', unit: 'of k max', min: -1, max: 1, step: 0.01, initial: 0.05 }),
+    position: quantity({
+      label: 'Place of the first',
+      unit: 'of k max',
+      min: -1,
+      max: 1,
+      step: 0.01,
+      initial: 0.05,
+      when: { pattern: ['neighbouring'] },
+    }),
   },
   identity: { count: 1, gain: 1, pattern: 'neighbouring', position: 0 },
   looks: {

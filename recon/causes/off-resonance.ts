@@ -29,7 +29,15 @@ export const offResonance = defineCause({
   parameters: {
     fieldRange: quantity({ label: 'Spread of the field', unit: 'ppm', min: 0, max: 10, step: 0.1, initial: 2 }),
     offset: quantity({ label: 'Centre frequency off by', unit: 'Hz', min: -500, max: 500, step: 1, initial: 0 }),
-    acrossSlice: quantity({ label: 'Change across the slice', unit: 'ppm', min: 0, max: 5, step: 0.05, initial: 0.2 }),
+    acrossSlice: quantity({
+      label: 'Change across the slice',
+      unit: 'ppm',
+      min: 0,
+      max: 5,
+      step: 0.05,
+      initial: 0.2,
+      when: { sequence: ['gradient-echo'] },
+    }),
     ...readoutParameters,
   },
   identity: {

@@ -50,7 +50,7 @@ export const rigidMotion = defineCause({
       label: 'Course',
       options: [
         { value: 'sudden', label: 'Sudden: from one place to another' },
-        { value: 'random-walk', label: 'Random walk: size is its standard deviation at the end' },
+        { value: 'random-walk', label: 'Random walk: size is its SD at the end' },
         { value: 'drift', label: 'Drift: size is the whole way' },
       ],
       initial: 'sudden',
@@ -58,7 +58,7 @@ export const rigidMotion = defineCause({
     alongPhaseEncode: quantity({ label: 'Along phase encoding', unit: 'mm', min: 0, max: 20, step: 0.1, initial: 3 }),
     alongReadout: quantity({ label: 'Along readout', unit: 'mm', min: 0, max: 20, step: 0.1, initial: 0 }),
     rotation: quantity({ label: 'Rotation', unit: '°', min: 0, max: 10, step: 0.1, initial: 2 }),
-    onset: quantity({ label: 'Moment of a sudden movement', unit: 'of scan', min: 0, max: 1, step: 0.01, initial: 0.4 }),
+    onset: quantity({ label: 'Moment', unit: 'of scan', min: 0, max: 1, step: 0.01, initial: 0.4, when: { course: ['sudden'] } }),
     linesPerShot: quantity({
       label: 'Lines in a shot',
       unit: 'lines',

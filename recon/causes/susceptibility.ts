@@ -40,7 +40,7 @@ export const susceptibility = defineCause({
       initial: 'ball',
     }),
     difference: quantity({
-      label: 'Susceptibility difference (air 9.4, titanium 182)',
+      label: 'Susceptibility against tissue',
       unit: 'ppm',
       min: 0,
       max: 7000,
@@ -50,7 +50,7 @@ export const susceptibility = defineCause({
     radius: quantity({ label: 'Radius', unit: 'mm', min: 0, max: 40, step: 0.5, initial: 5 }),
     alongPhaseEncode: quantity({ label: 'Off centre along phase encoding', unit: 'of FOV', min: -0.5, max: 0.5, step: 0.01, initial: 0.1 }),
     alongReadout: quantity({ label: 'Off centre along readout', unit: 'of FOV', min: -0.5, max: 0.5, step: 0.01, initial: 0 }),
-    height: quantity({ label: 'Ball above the slice', unit: 'mm', min: 0, max: 60, step: 0.5, initial: 0 }),
+    height: quantity({ label: 'Above the slice', unit: 'mm', min: 0, max: 60, step: 0.5, initial: 0, when: { shape: ['ball'] } }),
     toNormal: quantity({
       label: 'Main field to the slice normal',
       unit: '°',
@@ -61,7 +61,7 @@ export const susceptibility = defineCause({
       fromHeader: { fact: 'Orientation and patient position', read: angleToNormal },
     }),
     inPlane: quantity({
-      label: 'Main field in the plane, from the phase-encode axis',
+      label: 'Main field to the phase-encode axis',
       unit: '°',
       min: 0,
       max: 180,
@@ -80,6 +80,7 @@ export const susceptibility = defineCause({
         fact: 'Slice thickness',
         read: ({ sliceThickness }) => (sliceThickness === undefined ? undefined : 1000 * sliceThickness),
       },
+      when: { shape: ['ball'], sequence: ['gradient-echo'] },
     }),
     ...readoutParameters,
   },

@@ -80,7 +80,7 @@ export const transmitInhomogeneity = defineCause({
       },
     }),
     flipAngle: quantity({
-      label: 'Flip angle of the gradient echo',
+      label: 'Flip angle',
       unit: '°',
       min: 1,
       max: 120,
@@ -90,8 +90,9 @@ export const transmitInhomogeneity = defineCause({
         fact: 'Flip angle',
         read: ({ flipAngle: alpha }) => (alpha === undefined ? undefined : (alpha * 180) / Math.PI),
       },
+      when: { sequence: ['gradient-echo'] },
     }),
-    t1: quantity({ label: 'T1', unit: 'ms', min: 100, max: 4000, step: 50, initial: 800 }),
+    t1: quantity({ label: 'T1', unit: 'ms', min: 100, max: 4000, step: 50, initial: 800, when: { sequence: ['gradient-echo'] } }),
   },
   identity: { sequence: 'spin-echo', centre: 100, edge: 100, wavelength: 31, flipAngle: 30, t1: 800 },
   looks: {

@@ -36,11 +36,11 @@ export const interpolated = defineReconstruction({
       label: 'Interpolate to',
       options: [
         { value: 'twice', label: 'Twice the matrix' },
-        { value: 'matrix', label: 'A matrix' },
+        { value: 'matrix', label: 'A given matrix' },
       ],
       initial: 'twice',
     }),
-    matrix: quantity({ label: 'Matrix of the longer side', unit: 'px', min: 16, max: 1024, step: 16, initial: 512 }),
+    matrix: quantity({ label: 'Matrix, longer side', unit: 'px', min: 16, max: 1024, step: 16, initial: 512, when: { size: ['matrix'] } }),
   },
   identity: { size: 'matrix', matrix: 16 },
   looks: {

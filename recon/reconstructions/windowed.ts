@@ -59,9 +59,9 @@ export const windowed = defineReconstruction({
       ],
       initial: 'hamming',
     }),
-    taper: quantity({ label: 'Taper (Tukey)', unit: 'of k max', min: 0, max: 1, step: 0.05, initial: 0.5 }),
-    radius: quantity({ label: 'Radius (Fermi)', unit: 'of k max', min: 0.3, max: 1.2, step: 0.05, initial: 0.9 }),
-    width: quantity({ label: 'Width (Fermi)', unit: 'of k max', min: 0.01, max: 0.3, step: 0.01, initial: 0.05 }),
+    taper: quantity({ label: 'Taper', unit: 'of k max', min: 0, max: 1, step: 0.05, initial: 0.5, when: { window: ['tukey'] } }),
+    radius: quantity({ label: 'Radius', unit: 'of k max', min: 0.3, max: 1.2, step: 0.05, initial: 0.9, when: { window: ['fermi'] } }),
+    width: quantity({ label: 'Width', unit: 'of k max', min: 0.01, max: 0.3, step: 0.01, initial: 0.05, when: { window: ['fermi'] } }),
   },
   identity: { window: 'tukey', taper: 0, radius: 0.9, width: 0.05 },
   looks: {

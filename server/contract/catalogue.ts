@@ -3,6 +3,9 @@ import { z } from 'zod';
 import { everyMember, identifier, route } from './route';
 import { sightingSchema } from './sighting';
 
+/** Choices of the same model, each with the values for which a parameter matters; for others a form leaves it out, and its value stays. */
+const whenSchema = z.record(z.string(), z.array(z.string()));
+
 export const parameterSchema = z.union([
   z.object({
     id: z.string(),
@@ -14,12 +17,14 @@ export const parameterSchema = z.union([
     initial: z.number(),
     /** The scan fact that filled `initial`, in words, when an image was named in the query. */
     fromHeader: z.string().optional(),
+    when: whenSchema.optional(),
   }),
   z.object({
     id: z.string(),
     label: z.string(),
     options: z.array(z.object({ value: z.string(), label: z.string() })),
     initial: z.string(),
+    when: whenSchema.optional(),
   }),
 ]);
 export type CatalogueParameter = z.infer<typeof parameterSchema>;

@@ -6,7 +6,7 @@ import { fullyTaken } from '../../recon/lines';
 import type { ParameterValues, Recipe } from '../../recon/recipe';
 import { checkRecipe } from '../../recon/recipe-check';
 import { largestDifference, noisePlane, transposed } from '../recon/planes';
-import { acquisitions, contextOf, corners, initialValues, refused, sizes } from './samples';
+import { acquisitions, contextOf, corners, initialValues, isOneResult, refused, sizes, turns } from './samples';
 
 const recipeOf = (cause: Cause, parameters: ParameterValues): Recipe => ({
   steps: [{ cause: cause.id, parameters }],
@@ -127,6 +127,27 @@ describe.each(causes.map((cause) => [cause.id, cause] as const))('%s', (_id, cau
       }
       const across = act(cause, fullyTaken(transposed(input)), parameters, contextOf({ phaseEncode: 'row' }));
       expect(largestDifference(transposed(across), along)).toBeLessThan(1e-13);
+    }
+  });
+
+  const resultsOf = (input: Encoded, settings: readonly ParameterValues[]) =>
+    settings.map((parameters) => act(cause, input, parameters, contextOf({ phaseEncode: 'row', repetitionTime: 0.7, averages: 2 })));
+
+  test('a parameter that is not shown changes no byte', () => {
+    const input = fullyTaken(noisePlane(12, 15));
+    for (const { id, settings } of turns(cause.parameters, false)) {
+      if (!isOneResult(resultsOf(input, settings))) expect([id, settings]).toEqual('one result');
+    }
+  });
+
+  test('every parameter that is shown changes the result in some setting', () => {
+    // Most show it on few samples; half a side of 48 lines holds the places of spikes.
+    const inputs = [fullyTaken(noisePlane(12, 15)), fullyTaken(noisePlane(96, 96))];
+    const shown = turns(cause.parameters, true);
+    for (const id of Object.keys(cause.parameters)) {
+      const turned = shown.filter((turn) => turn.id === id);
+      const changes = inputs.some((input) => turned.some(({ settings }) => !isOneResult(resultsOf(input, settings))));
+      expect([id, changes]).toEqual([id, true]);
     }
   });
 

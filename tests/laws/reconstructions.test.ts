@@ -3,9 +3,10 @@ import { reconstructions } from '../../recon/reconstructions';
 import { inverse, transform } from '../../recon/fourier';
 import { magnitude } from '../../recon/grid';
 import { fullyTaken, keepLines, linesOf } from '../../recon/lines';
+import type { ParameterValues } from '../../recon/recipe';
 import { checkRecipe } from '../../recon/recipe-check';
 import { largestDifference, noisePlane } from '../recon/planes';
-import { acquisitions, contextOf, corners, initialValues, refused, sizes } from './samples';
+import { acquisitions, contextOf, corners, initialValues, isOneResult, refused, sizes, turns } from './samples';
 
 /** All lines; every second; without the first third; one line alone. */
 const samplings: readonly ((line: number, nLines: number, centre: number) => boolean)[] = [
@@ -49,6 +50,19 @@ describe.each(reconstructions.map((method) => [method.id, method] as const))('%s
       const image = method.reconstruct(fullyTaken(transform(object)), parameters, contextOf(acquisition));
       const expected = magnitude(inverse(transform(object))).values;
       magnitude(image).values.forEach((value, i) => expect(value).toBeCloseTo(expected[i] ?? NaN, 12));
+    }
+  });
+
+  test.each([
+    ['a parameter that is not shown changes no byte', false],
+    ['a parameter that is shown changes the result', true],
+  ])('%s', (_law, isShown) => {
+    const kspace = fullyTaken(noisePlane(12, 20));
+    const lines = linesOf(kspace, { phaseEncode: 'row' });
+    const short = keepLines(kspace, lines, (line) => line >= 8);
+    const resultOf = (values: ParameterValues) => method.reconstruct(short, values, contextOf({ phaseEncode: 'row' }));
+    for (const { id, settings } of turns(method.parameters, isShown)) {
+      expect([id, settings[0], !isOneResult(settings.map(resultOf))]).toEqual([id, settings[0], isShown]);
     }
   });
 
