@@ -6,7 +6,8 @@
 import type { Cause, Context, Encoded } from './cause';
 import { transform } from './fourier';
 import type { ComplexPlane } from './grid';
-import { fullyTaken } from './lines';
+import { allTaken, fullyTaken } from './lines';
+import { copyOfBytes, giveBackPlane } from './spare-arrays';
 import type { ParameterValues } from './recipe';
 
 /** A step that is switched on. Steps of the same `key` on the same plane give the same bytes. */
@@ -37,9 +38,11 @@ export function chainOf(object: ComplexPlane, kspace: () => ComplexPlane): Chain
   let lastKeys: readonly string[] = [];
   let kept: { readonly nSteps: number; readonly state: State } | undefined;
 
+  // Steps leave their input as it was: the transform that is kept may be one.
   const encode = (state: State): Encoded => {
     if (state.domain === 'kspace') return state.plane;
-    return fullyTaken(state.plane === object ? kspace() : transform(state.plane));
+    const plane = state.plane === object ? kspace() : transform(state.plane);
+    return { ...plane, taken: allTaken(plane.re.length) };
   };
   const act = (state: State, { cause, parameters, context }: Action): State => {
     if (cause.domain === 'kspace') return { domain: 'kspace', plane: cause.apply(encode(state), parameters, context()) };
@@ -64,11 +67,15 @@ export function chainOf(object: ComplexPlane, kspace: () => ComplexPlane): Chain
           if (action.cause.domain === 'kspace') state = { domain: 'kspace', plane: encode(state) };
           kept = { nSteps: step, state };
         }
-        state = act(state, action);
+        const before = state;
+        state = act(before, action);
+        // Its input goes to the next one that needs an array, unless it is kept.
+        if (before.plane !== object && before !== kept?.state) giveBackPlane(before.plane);
       }
+      if (state.plane === object) return fullyTaken(kspace());
       const result = encode(state);
       // A step may hand on the record of what was taken as it was.
-      return { ...result, taken: result.taken.slice() };
+      return { ...result, taken: copyOfBytes(result.taken) };
     },
   };
 }

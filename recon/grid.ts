@@ -5,6 +5,8 @@
  * zero frequency of k-space both sit at index floor(N/2) of each axis. Lengths are metres.
  */
 
+import { unwrittenArray } from './spare-arrays';
+
 /** Size and place of a plane. `spacing` [row, column] in metres; `origin` is the position of index [0, 0] in metres, relative to
  *  the centre sample floor(N/2) of the uploaded image, so that planes on different grids can be laid over one another. */
 export interface Grid {
@@ -38,7 +40,7 @@ export function complexZeros({ rows, columns, spacing, origin }: Grid): ComplexP
 /** |z| of every sample. */
 export function magnitude(plane: ComplexPlane): Plane {
   const { rows, columns, spacing, origin, re, im } = plane;
-  const values = new Float64Array(re.length);
+  const values = unwrittenArray(re.length);
   for (let i = 0; i < values.length; i++) {
     const a = re[i] as number;
     const b = im[i] as number;

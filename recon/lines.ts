@@ -6,6 +6,7 @@ import type { Acquisition } from './acquisition';
 import { phaseEncodeAxis } from './acquisition';
 import type { Encoded } from './cause';
 import type { ComplexPlane, Grid } from './grid';
+import { copyOf, copyOfBytes, unwrittenArray, unwrittenBytes } from './spare-arrays';
 
 /** Where the lines of a plane lie in memory. */
 export interface Lines {
@@ -32,9 +33,12 @@ export function linesAlong(grid: Pick<Grid, 'rows' | 'columns'>, { phaseEncode }
   return linesOf(grid, { phaseEncode: direction === 'readout' ? readout : phaseEncode });
 }
 
+/** The record of `length` samples that were all taken. */
+export const allTaken = (length: number): Uint8Array => unwrittenBytes(length).fill(1);
+
 /** k-space with every sample taken; the samples are copied, so that a cached transform stays as it is. */
 export function fullyTaken(kspace: ComplexPlane): Encoded {
-  return { ...kspace, re: kspace.re.slice(), im: kspace.im.slice(), taken: new Uint8Array(kspace.re.length).fill(1) };
+  return { ...kspace, re: copyOf(kspace.re), im: copyOf(kspace.im), taken: allTaken(kspace.re.length) };
 }
 
 /** For each line whether any of its samples was taken. */
@@ -55,11 +59,11 @@ export function takenOrder(kspace: Encoded, lines: Lines): Int32Array {
 
 /** A copy in which the lines that `keep` refuses are zero and not taken. */
 export function keepLines(kspace: Encoded, lines: Lines, keep: (line: number) => boolean): Encoded {
-  const kept = { ...kspace, re: kspace.re.slice(), im: kspace.im.slice(), taken: kspace.taken.slice() };
+  const kept = { ...kspace, re: copyOf(kspace.re), im: copyOf(kspace.im), taken: copyOfBytes(kspace.taken) };
   for (let line = 0; line < lines.nLines; line++) {
     if (keep(line)) continue;
-    for (let sample = 0; sample < lines.samplesPerLine; sample++) {
-      const i = line * lines.lineStride + sample * lines.sampleStride;
+    const end = line * lines.lineStride + lines.samplesPerLine * lines.sampleStride;
+    for (let i = line * lines.lineStride; i < end; i += lines.sampleStride) {
       kept.re[i] = 0;
       kept.im[i] = 0;
       kept.taken[i] = 0;
@@ -70,8 +74,8 @@ export function keepLines(kspace: Encoded, lines: Lines, keep: (line: number) =>
 
 /** A copy in which line n is multiplied by re[n] + i·im[n]. */
 export function weightLines<P extends ComplexPlane>(kspace: P, lines: Lines, weight: { re: Float64Array; im: Float64Array }): P {
-  const re = new Float64Array(kspace.re.length);
-  const im = new Float64Array(kspace.im.length);
+  const re = unwrittenArray(kspace.re.length);
+  const im = unwrittenArray(kspace.im.length);
   for (let line = 0; line < lines.nLines; line++) {
     const wr = weight.re[line] as number;
     const wi = weight.im[line] as number;

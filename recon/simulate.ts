@@ -8,14 +8,15 @@ import type { Encoded } from './cause';
 import type { Action, Chain } from './chain';
 import { chainOf } from './chain';
 import { causes } from './causes/index';
-import { transform } from './fourier';
+import { transform, transformOfReal } from './fourier';
 import type { ComplexPlane, Plane } from './grid';
-import { asComplex, magnitude } from './grid';
+import { magnitude } from './grid';
 import type { ObjectPhase } from './object-phase';
 import { withObjectPhase } from './object-phase';
 import type { Recipe } from './recipe';
 import { causeOf, checkRecipe, completeRecipe, reconstructionOf } from './recipe-check';
 import { randomOf } from './random';
+import { giveBack, giveBackBytes, giveBackPlane } from './spare-arrays';
 
 /** An object with its phase; its transform is worked out once, when it is first asked for, and kept with it, and so is one plane between
  *  the steps of the last recipe. */
@@ -34,6 +35,8 @@ export interface Simulation {
   readonly image: Plane;
   /** The transform of `image`: the only one to hold against the k-space of a stored magnitude image. */
   kspaceOfImage(): ComplexPlane;
+  /** Hands the arrays of `kspace` and `image` on to the next simulation. Nobody may read them after this. */
+  giveBack(): void;
 }
 
 /** What a caller keeps between simulations of one object, so that its transform is not repeated while a slider moves. */
@@ -87,6 +90,17 @@ export function simulate(object: ComplexPlane | PreparedObject, recipe: Recipe, 
   const prepared = withPhaseOf(object, complete);
   const kspace = prepared.chain.run(actionsOf(complete, acquisition));
   const context = { acquisition, random: randomOf(complete.seed, method.id) };
-  const image = magnitude(method.reconstruct(kspace, complete.reconstruction.parameters, context));
-  return { kspace, image, kspaceOfImage: () => transform(asComplex(image)) };
+  const reconstructed = method.reconstruct(kspace, complete.reconstruction.parameters, context);
+  const image = magnitude(reconstructed);
+  giveBackPlane(reconstructed);
+  return {
+    kspace,
+    image,
+    kspaceOfImage: () => transformOfReal(image),
+    giveBack() {
+      giveBackPlane(kspace);
+      giveBackBytes(kspace.taken);
+      giveBack(image.values);
+    },
+  };
 }

@@ -5,6 +5,7 @@
 import { defineCause } from '../cause';
 import { largestModulus } from '../levels';
 import { quantity } from '../parameter';
+import { unwrittenArray } from '../spare-arrays';
 
 export const clipping = defineCause({
   id: 'clipping',
@@ -71,7 +72,11 @@ export const clipping = defineCause({
   ],
   apply(kspace, { level }) {
     const limit = level * largestModulus(kspace);
-    const clip = (values: Float64Array): Float64Array => values.map((value) => Math.max(-limit, Math.min(limit, value)));
+    const clip = (values: Float64Array): Float64Array => {
+      const clipped = unwrittenArray(values.length);
+      for (let i = 0; i < values.length; i++) clipped[i] = Math.max(-limit, Math.min(limit, values[i] as number));
+      return clipped;
+    };
     return { ...kspace, re: clip(kspace.re), im: clip(kspace.im) };
   },
 });

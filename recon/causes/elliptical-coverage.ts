@@ -7,6 +7,7 @@
  */
 import { defineCause } from '../cause';
 import { quantity } from '../parameter';
+import { copyOf, copyOfBytes } from '../spare-arrays';
 
 export const ellipticalCoverage = defineCause({
   id: 'elliptical-coverage',
@@ -55,7 +56,7 @@ export const ellipticalCoverage = defineCause({
   ],
   apply(kspace, { size }) {
     const { rows, columns } = kspace;
-    const cut = { ...kspace, re: kspace.re.slice(), im: kspace.im.slice(), taken: kspace.taken.slice() };
+    const cut = { ...kspace, re: copyOf(kspace.re), im: copyOf(kspace.im), taken: copyOfBytes(kspace.taken) };
     for (let row = 0; row < rows; row++) {
       const y = (row - Math.floor(rows / 2)) / ((size * rows) / 2);
       for (let column = 0; column < columns; column++) {

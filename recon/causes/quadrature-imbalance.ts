@@ -5,6 +5,7 @@
  */
 import { defineCause } from '../cause';
 import { quantity } from '../parameter';
+import { copyOf, unwrittenArray } from '../spare-arrays';
 import { fromDegrees } from '../units';
 
 export const quadratureImbalance = defineCause({
@@ -59,8 +60,8 @@ export const quadratureImbalance = defineCause({
   apply(kspace, { gain: g, angle }) {
     const cosine = g * Math.cos(fromDegrees(angle));
     const sine = g * Math.sin(fromDegrees(angle));
-    const im = new Float64Array(kspace.im.length);
+    const im = unwrittenArray(kspace.im.length);
     for (let i = 0; i < im.length; i++) im[i] = cosine * (kspace.im[i] as number) + sine * (kspace.re[i] as number);
-    return { ...kspace, re: kspace.re.slice(), im };
+    return { ...kspace, re: copyOf(kspace.re), im };
   },
 });

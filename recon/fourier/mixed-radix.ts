@@ -1,11 +1,21 @@
-/** Stockham transform of a length whose prime factors are small: passes of radix 4, then 2, 3, 5, 7, 11 and 13. */
+/** Stockham transform of a length whose prime factors are small: passes of radix 8, at most one of 4 or 2, then 3, 5, 7, 11 and 13. */
 import type { Butterfly } from './butterflies';
 import { radix2, radix4 } from './butterflies';
 import type { Lanes, LineTransform } from './lanes';
 import { rootsOfUnity } from './lanes';
 import { oddRadix } from './odd-radix';
+import { radix3, radix5 } from './radix-three-five';
+import { radix8 } from './radix-eight';
 
-const radices = [4, 2, 3, 5, 7, 11, 13] as const;
+const radices = [8, 4, 2, 3, 5, 7, 11, 13] as const;
+
+const writtenOut = new Map<number, Butterfly>([
+  [2, radix2],
+  [3, radix3],
+  [4, radix4],
+  [5, radix5],
+  [8, radix8],
+]);
 
 /** The passes that make up `length`, or undefined where a larger prime is left over. */
 export function smallFactors(length: number): readonly number[] | undefined {
@@ -20,10 +30,7 @@ export function smallFactors(length: number): readonly number[] | undefined {
   return rest === 1 ? factors : undefined;
 }
 
-function butterflyOf(radix: number): Butterfly {
-  if (radix === 4) return radix4;
-  return radix === 2 ? radix2 : oddRadix(radix);
-}
+const butterflyOf = (radix: number): Butterfly => writtenOut.get(radix) ?? oddRadix(radix);
 
 export function mixedRadix(length: number, factors: readonly number[]): LineTransform {
   const roots = rootsOfUnity(length);

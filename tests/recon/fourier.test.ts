@@ -1,8 +1,9 @@
 /** The transform against its definition, against an independent package, and by the theorems that it must obey. */
 import { assert, integer, property, tuple } from 'fast-check';
 import { fft } from 'fft-js';
-import { inverse, inverseAlong, transform, transformAlong } from '../../recon/fourier';
+import { inverse, inverseAlong, transform, transformAlong, transformOfReal } from '../../recon/fourier';
 import { centredGrid, complexZeros } from '../../recon/grid';
+import { giveBackPlane } from '../../recon/spare-arrays';
 import { explicitTransform } from './explicit-transform';
 import { absolute, energy, largestDifference, noisePlane } from './planes';
 
@@ -10,12 +11,13 @@ import { absolute, energy, largestDifference, noisePlane } from './planes';
 const rounding = 1e-13;
 
 describe('The transform equals the explicit sum', () => {
-  // 16: radix 4. 12 × 18: 2, 3, 4. 15 × 21: odd, 3, 5, 7. 22 × 13: 11, 13. 17 × 34 and 1 × 19: primes that need the chirp.
+  // 16: radix 4. 12 × 18: 2, 3, 4. 15 × 21: odd, 3, 5, 7. 22 × 13: 11, 13. 40 × 6: 8 and 5, 2 and 3. 17 × 34 and 1 × 19: primes that need the chirp.
   const sizes = [
     [16, 16],
     [12, 18],
     [15, 21],
     [22, 13],
+    [40, 6],
     [17, 34],
     [1, 19],
     [5, 1],
@@ -43,6 +45,38 @@ describe('The transform equals fft-js', () => {
       expect(result.re[i]).toBeCloseTo(re / Math.sqrt(n), 12);
       expect(result.im[i]).toBeCloseTo(im / Math.sqrt(n), 12);
     });
+  });
+});
+
+describe('What is passed over would have been the same', () => {
+  // Even and odd on either axis, a single row and a single column.
+  test.each([
+    [16, 18],
+    [15, 21],
+    [12, 17],
+    [13, 10],
+    [1, 9],
+    [8, 1],
+  ])('A real plane of %i rows and %i columns has the explicit sum as its transform too', (rows, columns) => {
+    const { re: values, im: _, ...grid } = noisePlane(rows, columns);
+    const expected = explicitTransform({ ...grid, re: values, im: new Float64Array(values.length) }, 'forward');
+    expect(largestDifference(transformOfReal({ ...grid, values }), { ...grid, ...expected })).toBeLessThan(rounding);
+  });
+
+  test.each(['rows', 'columns'])('Empty %s of k-space, on either side of the centre and through it', (emptied) => {
+    const plane = noisePlane(20, 18);
+    plane.re.forEach((_, i) => {
+      const line = emptied === 'rows' ? Math.floor(i / 18) : i % 18;
+      if (line % 3 !== 0) return;
+      plane.re[i] = 0;
+      plane.im[i] = 0;
+    });
+    expect(largestDifference(inverse(plane), { ...plane, ...explicitTransform(plane, 'inverse') })).toBeLessThan(rounding);
+  });
+
+  test('Nothing at all has nothing as its transform, whatever was transformed before', () => {
+    giveBackPlane(transform(noisePlane(8, 6)));
+    expect(energy(transform(complexZeros(centredGrid(8, 6, [1, 1]))))).toBe(0);
   });
 });
 

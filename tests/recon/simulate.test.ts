@@ -24,7 +24,8 @@ describe('A simulation', () => {
     const { image, kspace, kspaceOfImage } = simulate(object, recipeOf([]), acquisition);
     magnitude(object).values.forEach((value, i) => expect(image.values[i]).toBeCloseTo(value, 12));
     expect(largestDifference(kspace, transform(object))).toBe(0);
-    expect(largestDifference(kspaceOfImage(), transform(asComplex(image)))).toBe(0);
+    // By the symmetry of a real image, with other roundings: those of fourier.test.ts.
+    expect(largestDifference(kspaceOfImage(), transform(asComplex(image)))).toBeLessThan(1e-13);
   });
 
   test('acts in the order of the signal chain, whatever the order of the recipe', () => {
