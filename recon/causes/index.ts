@@ -8,6 +8,7 @@ import { cuspArtefact } from './cusp-artefact';
 import { dcOffset } from './dc-offset';
 import { deadCoilElement } from './dead-coil-element';
 import { echoTrainDecay } from './echo-train-decay';
+import { eddyCurrents } from './eddy-currents';
 import { ellipticalCoverage } from './elliptical-coverage';
 import { failedFatSuppression } from './failed-fat-suppression';
 import { fieldOfViewReduction } from './field-of-view-reduction';
@@ -15,9 +16,11 @@ import { gradientNonLinearity } from './gradient-non-linearity';
 import { halfFieldGhost } from './half-field-ghost';
 import { lineDropOut } from './line-drop-out';
 import { linePhaseErrors } from './line-phase-errors';
+import { magicAngle } from './magic-angle';
 import { moire } from './moire';
 import { noise } from './noise';
 import { offResonance } from './off-resonance';
+import { parallelImagingResidual } from './parallel-imaging-residual';
 import { partialFourier } from './partial-fourier';
 import { periodicMotion } from './periodic-motion';
 import { pulsatileFlow } from './pulsatile-flow';
@@ -35,6 +38,7 @@ import { truncation } from './truncation';
 import { uniformUndersampling } from './uniform-undersampling';
 
 export const causes: readonly Cause[] = [
+  magicAngle,
   failedFatSuppression,
   transmitInhomogeneity,
   crossTalk,
@@ -42,9 +46,11 @@ export const causes: readonly Cause[] = [
   chemicalShift,
   offResonance,
   susceptibility,
+  eddyCurrents,
   gradientNonLinearity,
   receiveShading,
   deadCoilElement,
+  parallelImagingResidual,
   moire,
   fieldOfViewReduction,
   readoutWrap,

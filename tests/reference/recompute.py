@@ -158,6 +158,14 @@ def quadrature(gain, angle):
     return abs((1 - gain * turn.conjugate()) / (1 + gain * turn))
 
 
+def geometry_factor(sensitivities):
+    maps = np.array([[complex(*place) for place in element] for element in sensitivities])
+    normal = maps.conj().T @ maps
+    factors = np.sqrt(np.real(np.diag(np.linalg.inv(normal)) * np.diag(normal)))
+    assert np.allclose(factors, factors[0])
+    return factors[0]
+
+
 def fat_water(field):
     hertz = fat_ppm * gamma_bar * field
     return {'hertz': hertz, 'opposedMs': 500 / hertz, 'inPhaseMs': 1000 / hertz}
@@ -244,9 +252,13 @@ def recomputed(stored):
         'sliceOverlap': [[gap, slice_overlap(gap)] for gap in (0, 0.1, 0.25, 0.5, 1)],
         'saturationRatio': saturation,
         'innerLoopAttenuation': abs(sin(4 * inner) / (4 * sin(inner))),
+        'magicAngleDegrees': degrees(acos(1 / sqrt(3))),
         'brightnessGhost': ghost_ratio(lambda n: 1 + 0.2 * np.cos(2 * pi * 16 * n / 128), 16),
     }
+    sensitivities = stored['unfolding']['unfoldingReference']['sensitivities']
+    unfolding = {'geometryFactor': {name: geometry_factor(maps) for name, maps in sensitivities.items()}}
     return {
+        'unfolding': {'unfoldingReference': unfolding},
         'values': {'reference': values},
         'encoding-values': {'encodingReference': encoding},
         'object': {'objectReference': objects},
