@@ -48,3 +48,13 @@ test('Only a TR that such a sequence can have is taken from the header', () => {
   expect(initial(0.0042)).toBe(4.2);
   expect(initial(0.5)).toBe(5);
 });
+
+test('With a quarter turn of the RF phase the null lies on one side only: at −1/(4TR), not at 1/(4TR)', () => {
+  expect(signal({ increment: 90, offset: -50 })).toBeCloseTo(0, 12);
+  expect(signal({ increment: 90, offset: 50 })).toBeCloseTo(1, 12);
+});
+
+test('The change of phase from band to band is left out: what is positive stays so', () => {
+  const { kspace } = simulate(even, bands({ offset: 200 }), acquisition);
+  expect(kspace.re[24 * 48 + 24]).toBeCloseTo(48, 9);
+});

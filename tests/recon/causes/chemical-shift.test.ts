@@ -120,3 +120,21 @@ test('The form takes imaging frequency, bandwidth and TE from the header, the fr
   expect(initial({ ...acquisition, bandwidthPerPixel: 390 }, 'bandwidth')).toBe(390);
   expect(initial({ ...acquisition, echoTime: 0.0046 }, 'echoTime')).toBe(4.6);
 });
+
+test('At a gradient echo fat, which lies below water, is ahead in the phase −2πΔf·TE: +90° after a quarter of its cycle', () => {
+  if (chemicalShift.domain !== 'image') throw Error('it acts on the image');
+  const initial = Object.fromEntries(Object.entries(chemicalShift.parameters).map(([id, parameter]) => [id, parameter.initial]));
+  const values = {
+    ...initial,
+    sequence: 'gradient-echo',
+    imagingFrequency: at1T5,
+    bandwidth: 5000,
+    echoTime: objectReference.firstInPhase / 4,
+  };
+  const random = { uniform: () => 0, normal: () => 0 };
+  const { re, im } = chemicalShift.apply(box(16, [0, 16], [0, 16]), values, { acquisition, random });
+  re.forEach((value, i) => {
+    expect(value).toBeCloseTo(0, 5);
+    expect(im[i]).toBeCloseTo(1, 5);
+  });
+});

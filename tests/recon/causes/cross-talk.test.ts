@@ -1,5 +1,5 @@
 /** Cross-talk: overlap of Gaussian slices and what is lost there, against values made outside, and the band of a crossing slice. */
-import { neighbourOverlap, saturationRatio } from '../../../recon/causes/cross-talk';
+import { crossTalk as crossTalkCause, neighbourOverlap, saturationRatio } from '../../../recon/causes/cross-talk';
 import { complementaryError } from '../../../recon/error-function';
 import { simulate } from '../../../recon/simulate';
 import { objectReference } from '../../reference/object';
@@ -64,4 +64,25 @@ test.each([
 test('Series and fraction of erfc meet at the crossover', () => {
   // The slope there is 2/√π·e⁻⁴ = 0.021: a step of 1e-9 may differ by 2.1e-11.
   expect(Math.abs(complementaryError(2 - 1e-9) - complementaryError(2) - 2.0666985e-11)).toBeLessThan(1e-14);
+});
+
+test('An angle turns the band from the readout towards smaller lines, in millimetres where pixels are not square', () => {
+  if (crossTalkCause.domain !== 'image') throw Error('it acts on the image');
+  const object = { ...even, spacing: [2e-3, 1e-3] as const };
+  const initial = Object.fromEntries(Object.entries(crossTalkCause.parameters).map(([id, parameter]) => [id, parameter.initial]));
+  const values = { ...initial, stack: 'crossing', position: 0, width: 8, angle: 45, repetitionTime: 500, longitudinalRelaxation: 800 };
+  const random = { uniform: () => 0, normal: () => 0 };
+  for (const phaseEncode of ['column', 'row'] as const) {
+    const { re } = crossTalkCause.apply({ ...object, spacing: phaseEncode === 'column' ? [2e-3, 1e-3] : [1e-3, 2e-3] }, values, {
+      acquisition: { phaseEncode },
+      random,
+    });
+    // Lines of 2 mm, samples of 1 mm: 45° through the centre is two samples a line, both growing together.
+    const at = (line: number, sample: number) => re[phaseEncode === 'column' ? line * 48 + sample : sample * 48 + line] ?? NaN;
+    for (const line of [-6, 5, 9]) {
+      expect(1 - at(24 + line, 24 + 2 * line)).toBeCloseTo(1 - objectReference.saturationRatio, 9);
+      // The band's full width at half maximum is 8 mm across: 12 lines along the phase encoding lie beyond it by far.
+      expect(1 - at(24 + line, 24 - 2 * line)).toBeLessThan(0.2);
+    }
+  }
 });

@@ -1,9 +1,10 @@
 /** The cusp: where the spot lies, how bright it is, how echoes spread it. The model is ours; its closed forms are checked. */
 import { cuspArtefact } from '../../../recon/causes/cusp-artefact';
+import { uniformUndersampling } from '../../../recon/causes/uniform-undersampling';
 import { inverse } from '../../../recon/fourier';
 import type { ComplexPlane } from '../../../recon/grid';
 import type { ParameterValues } from '../../../recon/recipe';
-import { actOnObject } from '../act-on-kspace';
+import { actOnKspace, actOnObject } from '../act-on-kspace';
 import { absolute, box, energy, noisePlane } from '../planes';
 
 const place: ParameterValues = { readoutPlace: 0.25, phasePlace: -0.25, tail: 1, echoTrainLength: 1, order: 'linear', strength: 3 };
@@ -61,5 +62,40 @@ describe('The cusp artefact', () => {
     const one = inverse(actOnObject(cuspArtefact, noisePlane(32, 32), {}, undefined, 1));
     const other = inverse(actOnObject(cuspArtefact, noisePlane(32, 32), {}, undefined, 2));
     expect(one.re).not.toEqual(other.re);
+  });
+});
+
+describe('Where the field of view is not square', () => {
+  const wide = { ...noisePlane(32, 48) };
+  wide.re.fill(1);
+  wide.im.fill(0);
+
+  test('each place is a part of its own direction', () => {
+    const spot = added(wide, {});
+    expect(absolute(spot, 16 - 8, 24 + 12)).toBeCloseTo(3, 9);
+  });
+
+  test('all of the tail has one phase', () => {
+    const spot = added(wide, { tail: 6 });
+    const phase = (column: number) => Math.atan2(spot.im[8 * 48 + column] ?? NaN, spot.re[8 * 48 + column] ?? NaN);
+    for (let j = 1; j < 6; j++) expect(Math.cos(phase(36 - j) - phase(36))).toBeCloseTo(1, 9);
+  });
+});
+
+test('Strength is relative to the brightest hundredth of the object, not to its mean', () => {
+  const twoLevels = { ...object, re: object.re.map((value, i) => (i % 64 < 8 ? 3 * value : value)) };
+  expect(absolute(added(twoLevels, {}), 16, 48)).toBeCloseTo(9, 9);
+});
+
+test('Phases from all around leave of a spot with an echo for every line no more than chance does', () => {
+  // Of 64 random phases the sum is √64 on average: an eighth of the spot; three times that.
+  expect(absolute(added(object, { echoTrainLength: 64 }), 16, 48)).toBeLessThan((3 * 3) / 8);
+});
+
+test('Nothing is added to lines that are not taken', () => {
+  const skipped = actOnObject(uniformUndersampling, object, { accelerationFactor: 2 });
+  const { re, im, taken } = actOnKspace(cuspArtefact, skipped, place);
+  taken.forEach((isTaken, i) => {
+    if (isTaken === 0) expect([re[i], im[i]]).toEqual([0, 0]);
   });
 });

@@ -89,3 +89,11 @@ test('Lines that are not taken hold no offset', () => {
   // at the rank between them, a little less, and is set right for the lines that were skipped.
   expect((image.values[32 * 64 + 32] ?? NaN) / (image.values[32] ?? NaN)).toBeCloseTo(1, 9);
 });
+
+test('The dot is relative to the brightest hundredth of the object, not to its mean', () => {
+  const object = uniform(64);
+  object.re.fill(4, 0, 8 * 64);
+  const steps = [{ cause: 'dc-offset', parameters: { brightness: 2, drift: 0, phase: 0 } }];
+  const { image } = simulate(object, { steps, reconstruction: { method: 'zero-filled', parameters: {} }, seed: 1 }, { phaseEncode: 'row' });
+  expect(image.values[32 * 64 + 32]).toBeCloseTo(1 + 2 * 4, 10);
+});

@@ -68,3 +68,7 @@ describe('Decay along the echo train', () => {
     expect(absolute(image, 32 + 3, 0)).toBeCloseTo(0, 10);
   });
 });
+
+test('Lines that do not fill the last train leave it short: ten lines in trains of four are groups of three', () => {
+  expect(echoesAfterCentre({ echoTrainLength: 4, order: 'linear' }, 10)).toEqual([-1, -1, -1, 0, 0, 0, 1, 1, 1, 2]);
+});

@@ -94,3 +94,14 @@ describe('The cubic warp', () => {
     expect(cubicCoefficient(5e-3) * 0.1 ** 3).toBeLessThan(1e-3);
   });
 });
+
+test('Distances are metres along both axes: a uniform region of oblong pixels is brighter by its distance alone', () => {
+  const oblong = { ...disc(96, 47, 5e-3), spacing: [5e-3, 2.5e-3] as const };
+  const image = warped(oblong, 10);
+  const kappa = cubicCoefficient(10e-3);
+  const r = 0.075 * (sourceOf(kappa * 0.075 ** 2)?.scale ?? NaN);
+  const expected = 1 / ((1 - kappa * r * r) * (1 - 3 * kappa * r * r));
+  // 7.5 cm to the right are 30 columns of 2.5 mm; downwards, 15 rows of 5 mm.
+  expect(image.values[48 * 96 + 78]).toBeCloseTo(expected, 9);
+  expect(image.values[63 * 96 + 48]).toBeCloseTo(expected, 9);
+});

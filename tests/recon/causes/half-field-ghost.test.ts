@@ -1,5 +1,6 @@
 /** The half-field ghost: closed form, numpy, and the published distance of ghosts of more shots. */
 import type { Acquisition } from '../../../recon/acquisition';
+import { ellipticalCoverage } from '../../../recon/causes/elliptical-coverage';
 import { halfFieldGhost } from '../../../recon/causes/half-field-ghost';
 import { uniformUndersampling } from '../../../recon/causes/uniform-undersampling';
 import { inverse, transform } from '../../../recon/fourier';
@@ -83,5 +84,26 @@ describe('Several shots', () => {
     const image = inverse(actOnKspace(halfFieldGhost, undersampled, { ...none, phase: 0.1 }));
     expect(absolute(image, 32 + 16, 30)).toBeCloseTo(Math.sin(0.1) / 2, 10);
     expect(absolute(image, 32, 30)).toBeCloseTo(Math.cos(0.1) / 2, 10);
+  });
+});
+
+test('A difference in amplitude and a phase act together: each line times (1 + s·ε/2)·exp(i·s·φ)', () => {
+  const object = noisePlane(12, 7);
+  const before = transform(object);
+  const after = actOnObject(halfFieldGhost, object, { ...none, phase: 0.3, imbalance: 0.2 });
+  for (let line = 0; line < 12; line++) {
+    const s = line % 2 === 0 ? 1 : -1;
+    const [re, im] = [(1 + s * 0.1) * Math.cos(0.3), (1 + s * 0.1) * s * Math.sin(0.3)];
+    const [a, b] = [before.re[line * 7 + 2] ?? NaN, before.im[line * 7 + 2] ?? NaN];
+    expect(after.re[line * 7 + 2]).toBeCloseTo(a * re - b * im, 12);
+    expect(after.im[line * 7 + 2]).toBeCloseTo(a * im + b * re, 12);
+  }
+});
+
+test('Samples that were not taken stay empty where only a part of a line was taken', () => {
+  const corners = actOnObject(ellipticalCoverage, noisePlane(20, 20), { size: 0.8 });
+  const { re, im, taken } = actOnKspace(halfFieldGhost, corners, { ...none, shift: 0.7 });
+  taken.forEach((isTaken, i) => {
+    if (isTaken === 0) expect([re[i], im[i]]).toEqual([0, 0]);
   });
 });

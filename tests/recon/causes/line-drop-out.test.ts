@@ -73,3 +73,15 @@ describe('More lines', () => {
     expect(new Set(lostOf({ count: 10, pattern: 'scattered' })).size).toBe(10);
   });
 });
+
+test('Scattered lines are others for another seed, from all over k-space', () => {
+  const ones = fullyTaken(complexZeros({ ...noisePlane(40, 1) }));
+  ones.re.fill(1);
+  const counts = new Float64Array(40);
+  for (let seed = 0; seed < 400; seed++) {
+    const { re } = actOnKspace(lineDropOut, ones, { count: 5, pattern: 'scattered' }, undefined, seed);
+    re.forEach((value, line) => (counts[line] = (counts[line] ?? NaN) + 1 - value));
+  }
+  // 50 times each of 40 lines, binomial: standard deviation 6.6; four and a half of them.
+  counts.forEach((count) => expect(Math.abs(count - 50)).toBeLessThan(30));
+});

@@ -1,6 +1,7 @@
 /** Phase errors from line to line: haze, mains ghosts, shift and blur, each against its closed form. */
 import { jv } from 'cephes';
 import { linePhaseErrors } from '../../../recon/causes/line-phase-errors';
+import { uniformUndersampling } from '../../../recon/causes/uniform-undersampling';
 import { inverse } from '../../../recon/fourier';
 import type { ComplexPlane } from '../../../recon/grid';
 import type { ParameterValues } from '../../../recon/recipe';
@@ -74,4 +75,42 @@ test('The magnitude of k-space stays', () => {
   const before = actOnObject(linePhaseErrors, object, none);
   const after = actOnObject(linePhaseErrors, object, { instability: 1, hum: 1, mains: '60', drift: 9, bend: -4 });
   after.re.forEach((_, i) => expect(absolute(after, 0, i)).toBeCloseTo(absolute(before, 0, i), 12));
+});
+
+describe('Line by line', () => {
+  const a = 2 * Math.PI * 60 * 0.033;
+
+  test('ε_n = a·sin(2πf·T·n) + D·n/N + B·(2n/N − 1)², n from the first line', () => {
+    const { re, im } = actOnKspace(linePhaseErrors, column(10, () => 1), { ...none, hum: 0.4, mains: '60', drift: 1.5, bend: 0.7 }, { ...columnEncoded, repetitionTime: 0.033 }); // prettier-ignore
+    for (let n = 0; n < 10; n++) {
+      const error = 0.4 * Math.sin(a * n) + 0.15 * n + 0.7 * (n / 5 - 1) ** 2;
+      expect(re[n]).toBeCloseTo(Math.cos(error), 12);
+      expect(im[n]).toBeCloseTo(Math.sin(error), 12);
+    }
+  });
+
+  test('averages lengthen the time from line to line', () => {
+    const of = (repetitionTime: number, averages: number) =>
+      actOnKspace(
+        linePhaseErrors,
+        column(16, () => 1),
+        { ...none, hum: 0.4 },
+        { ...columnEncoded, repetitionTime, averages },
+      );
+    expect(of(0.013, 3)).toEqual(of(0.039, 1));
+  });
+
+  test('n and N count the lines that are taken: skipped lines take no time', () => {
+    const skipped = actOnKspace(
+      uniformUndersampling,
+      column(16, () => 1),
+      { accelerationFactor: 2 },
+    );
+    const { re, im } = actOnKspace(linePhaseErrors, skipped, { ...none, drift: 2, bend: -0.6 });
+    for (let n = 0; n < 8; n++) {
+      const error = (2 * n) / 8 - 0.6 * (n / 4 - 1) ** 2;
+      expect(re[2 * n]).toBeCloseTo(Math.cos(error), 12);
+      expect(im[2 * n]).toBeCloseTo(Math.sin(error), 12);
+    }
+  });
 });

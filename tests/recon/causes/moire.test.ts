@@ -47,3 +47,7 @@ test('Fringes run across the phase encoding, whichever axis it is', () => {
   const upright = simulate(even, moire({ fraction: 0.75, cycles: 4 }), { phaseEncode: 'column' }).image;
   for (let k = 0; k < 72; k++) expect(image.values[45 * 72 + k]).toBeCloseTo(upright.values[k * 96 + 45] ?? NaN, 10);
 });
+
+test('The folded field of view is rounded to the nearest whole line', () => {
+  expect(simulate(even, moire({ fraction: 0.76, cycles: 1 }), { phaseEncode: 'column' }).image.rows).toBe(73);
+});

@@ -1,6 +1,6 @@
 /** Noise to a wanted SNR: its size, and the distribution of its magnitude from one coil and from several. */
 import { gammaVariate } from '../../../recon/causes/noise';
-import { transform } from '../../../recon/fourier';
+import { inverse, transform } from '../../../recon/fourier';
 import type { ComplexPlane, Plane } from '../../../recon/grid';
 import { randomOf } from '../../../recon/random';
 import { simulate } from '../../../recon/simulate';
@@ -144,4 +144,27 @@ test('A gamma variate of shape a has mean a and variance a', () => {
 test('The same seed gives the same grain, another seed another', () => {
   expect(noisy(half, 10, 4, 7).values).toEqual(noisy(half, 10, 4, 7).values);
   expect(noisy(half, 10, 4, 7).values).not.toEqual(noisy(half, 10, 4, 8).values);
+});
+
+test('The SNR is that of the mean of the object, not of its brightest part', () => {
+  // 1 in three quarters and 3 in a quarter of the object: mean 1.5.
+  const object = box(128, [0, 128], [32, 96]);
+  object.re.forEach((value, i) => (object.re[i] = i % 128 < 48 ? 3 * value : value));
+  const air = inAir(noisy(object, 15));
+  expect(Math.abs(air.standardDeviation / reference.rician[0].standardDeviation / 0.1 - 1)).toBeLessThan(ofDeviation);
+});
+
+test('Of several coils, the noise of the others is as strong as the samples taken make it', () => {
+  const steps = [{ cause: 'uniform-undersampling', parameters: { accelerationFactor: 2, calibrationLines: 0 } }];
+  const full = recipe(20, 8);
+  const { kspace } = simulate(box(128, [0, 128], [40, 72]), { ...full, steps: [...steps, ...full.steps] }, { phaseEncode: 'row' });
+  const image = inverse(kspace);
+  const square = moments(
+    Array.from(image.re, (re, i) => re ** 2 + (image.im[i] ?? NaN) ** 2).filter((_, i) => i % 128 >= 76 && i % 128 < 92),
+  );
+  // Half of the samples are taken: each coil has σ²/2 in each part of the zero-filled image, and the combined one the mean square 2nσ²/2. It
+  // repeats after half the field of view but for its grain, 1/(4n) of it, half of which goes with the lines that are left out.
+  const power = (2 * 8 * 0.05 ** 2) / 2;
+  expect(square.mean).toBeGreaterThan(0.9 * power);
+  expect(square.mean).toBeLessThan(1.1 * power);
 });

@@ -210,3 +210,14 @@ describe('Averages', () => {
     expect(first({ averaging: 'left-over', start: 0 }, four)[0]).toBeCloseTo(0.3, 12);
   });
 });
+
+test('Passes of the outer loop last as long as the lines that are taken', () => {
+  const undersampling = { cause: 'uniform-undersampling', parameters: { accelerationFactor: 2, calibrationLines: 0 } };
+  const swinging = { moves: 'amplitude', modulation: 0.3, frequency: 0.25, averaging: 'outer-loop', start: 0 };
+  const point = complexZeros(centredGrid(12, 1, [1e-3, 1e-3]));
+  point.re[6] = 1;
+  const recipe = recipeOf(undersampling, { cause: 'periodic-motion', parameters: swinging });
+  const { kspace } = simulate(point, recipe, { ...acquisition, averages: 2 });
+  // Six of twelve lines are taken, so that the second pass begins after 3 s, three quarters of a cycle: cos 0 and cos 270° on the first.
+  expect((kspace.re[0] ?? NaN) * Math.sqrt(12)).toBeCloseTo(1 + (0.3 * (1 + Math.cos(1.5 * Math.PI))) / 2, 12);
+});

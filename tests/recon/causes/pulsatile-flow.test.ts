@@ -1,7 +1,7 @@
 /** Pulsatile flow: a row of vessel-sized ghosts (Perman et al. 1986), their places (Wood & Henkelman 1985) and brightness (Jacobi–Anger). */
 import { jv } from 'cephes';
 import type { Acquisition } from '../../../recon/acquisition';
-import { transform } from '../../../recon/fourier';
+import { inverse, transform } from '../../../recon/fourier';
 import { simulate } from '../../../recon/simulate';
 import { absolute, box, largestDifference, noisePlane } from '../planes';
 
@@ -63,4 +63,10 @@ test('A cycle that starts at 0° has the vessel brightest at the first line and 
   const { kspace } = simulate(vesselAlone, flow({ brightness: 0.4 }), acquisition);
   expect(absolute(kspace, 0, 48) / absolute(before, 0, 48)).toBeCloseTo(1.4, 9);
   expect(absolute(kspace, 4, 48) / absolute(before, 4, 48)).toBeCloseTo(0.6, 9);
+});
+
+test('The mean phase is that of the blood: its pixels turn by it, and nothing else does', () => {
+  const image = inverse(simulate(object, flow({ meanPhase: 0.5 }), acquisition).kspace);
+  expect(Math.atan2(image.im[48 * 96 + 63] ?? NaN, image.re[48 * 96 + 63] ?? NaN)).toBeCloseTo(0.5, 10);
+  expect(image.im[48 * 96 + 20]).toBeCloseTo(0, 10);
 });

@@ -1,6 +1,7 @@
 /** Interference: where its line falls, how bright it is, which way it runs. */
 import type { Acquisition } from '../../../recon/acquisition';
 import { inverse, transform } from '../../../recon/fourier';
+import { centredGrid, complexZeros } from '../../../recon/grid';
 import type { ComplexPlane } from '../../../recon/grid';
 import { simulate } from '../../../recon/simulate';
 import { reference } from '../../reference/values';
@@ -133,3 +134,20 @@ describe('Free induction', () => {
     expect(strongestOutside(plane, (y) => y === 0)).toBeLessThan(1e-12);
   });
 });
+
+test.each(['out-of-step', 'free-induction'])(
+  '%s: as bright as asked where the picture is not square, relative to its brightest hundredth',
+  (kind) => {
+    const object = complexZeros(centredGrid(48, 80, [1e-3, 1e-3]));
+    object.re.fill(1).fill(3, 0, 6 * 80);
+    const step = { cause: 'rf-interference', parameters: { ...quiet, kind, offset: 1600 } };
+    const { kspace } = simulate(object, { steps: [step], reconstruction: { method: 'zero-filled', parameters: {} }, seed: 4 }, acquisition);
+    const clean = transform(object);
+    const added = inverse({
+      ...kspace,
+      re: kspace.re.map((re, i) => re - (clean.re[i] ?? NaN)),
+      im: kspace.im.map((im, i) => im - (clean.im[i] ?? NaN)),
+    });
+    expect(rootMeanSquare(kind === 'free-induction' ? row(added, 24) : column(added, 40 + 8))).toBeCloseTo(0.5 * 3, 9);
+  },
+);
