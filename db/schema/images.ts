@@ -2,7 +2,7 @@
  * Images as they are after the door: geometry, scan facts, and where the values lie in the object store. There is no column for
  * a name, a date of the exam, a file name or an identifier of the hospital, so none can be stored.
  */
-import { doublePrecision, index, integer, jsonb, pgTable, text, timestamp, uuid } from 'drizzle-orm/pg-core';
+import { boolean, doublePrecision, index, integer, jsonb, pgTable, text, timestamp, uuid } from 'drizzle-orm/pg-core';
 import { departments, members } from './people';
 import { scanners } from './scanners';
 import { arrivalWord, componentWord, imageUseWord, kspaceOriginWord } from './words';
@@ -25,6 +25,8 @@ export const images = pgTable(
     component: componentWord().notNull(),
     use: imageUseWord().notNull().default('measured'),
     kspace: kspaceOriginWord().notNull().default('derived'),
+    /** A secondary capture may show a name: false until whoever sent it has looked, then true; null where nobody need look. */
+    confirmedNoText: boolean('confirmed_no_text'),
     /** Row, column; null where the header is silent. */
     spacingMm: jsonb('spacing_mm').$type<[number, number]>(),
     rangeLow: doublePrecision('range_low').notNull(),

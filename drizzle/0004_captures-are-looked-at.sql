@@ -1,0 +1,1 @@
+ALTER TABLE "images" ADD COLUMN "confirmed_no_text" boolean;
