@@ -35,7 +35,7 @@ export interface Simulation {
   readonly image: Plane;
   /** The transform of `image`: the only one to hold against the k-space of a stored magnitude image. */
   kspaceOfImage(): ComplexPlane;
-  /** Hands the arrays of `kspace` and `image` on to the next simulation. Nobody may read them after this. */
+  /** Hands all its arrays on to the next simulation. Nobody may read them after this. */
   giveBack(): void;
 }
 
@@ -93,11 +93,13 @@ export function simulate(object: ComplexPlane | PreparedObject, recipe: Recipe, 
   const reconstructed = method.reconstruct(kspace, complete.reconstruction.parameters, context);
   const image = magnitude(reconstructed);
   giveBackPlane(reconstructed);
+  let ofImage: ComplexPlane | undefined;
   return {
     kspace,
     image,
-    kspaceOfImage: () => transformOfReal(image),
+    kspaceOfImage: () => (ofImage ??= transformOfReal(image)),
     giveBack() {
+      if (ofImage) giveBackPlane(ofImage);
       giveBackPlane(kspace);
       giveBackBytes(kspace.taken);
       giveBack(image.values);

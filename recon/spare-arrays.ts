@@ -37,7 +37,7 @@ export const unwrittenArray = (length: number): Float64Array => spareSamples.tak
 export const unwrittenBytes = (length: number): Uint8Array => spareBytes.take(length) ?? new Uint8Array(length);
 
 /** A copy that is its own. */
-export function copyOf(array: Float64Array): Float64Array {
+export function copyOf(array: ArrayLike<number>): Float64Array {
   const copy = unwrittenArray(array.length);
   copy.set(array);
   return copy;

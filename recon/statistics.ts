@@ -3,6 +3,7 @@ import ndarray from 'ndarray';
 import { assign, inf, norm2squared, subs, sum, sup } from 'ndarray-ops';
 import type { Plane } from './grid';
 import type { Place } from './profile';
+import { copyOf, giveBack } from './spare-arrays';
 
 export interface Statistics {
   readonly n: number;
@@ -42,13 +43,13 @@ function selectRank(values: Float64Array, k: number): number {
 export function percentile(values: ArrayLike<number>, p: number): number {
   if (values.length === 0) throw RangeError('percentile needs at least one value, got none');
   if (!(p >= 0 && p <= 100)) throw RangeError(`p must be 0 to 100, got ${p}`);
-  const ranked = Float64Array.from(values);
+  const ranked = copyOf(values);
   const rank = (p / 100) * (ranked.length - 1);
   const k = Math.floor(rank);
   const below = selectRank(ranked, k);
-  if (rank === k) return below;
-  let above = Infinity;
-  for (let i = k + 1; i < ranked.length; i++) if ((ranked[i] as number) < above) above = ranked[i] as number;
+  let above = rank === k ? below : Infinity;
+  for (let i = k + 1; rank > k && i < ranked.length; i++) if ((ranked[i] as number) < above) above = ranked[i] as number;
+  giveBack(ranked);
   return below + (above - below) * (rank - k);
 }
 

@@ -4,66 +4,77 @@
  * over its maximum, not below −8) and `<name>.phase` (−π to π). Nothing pads: a plane may begin at an odd multiple of two bytes.
  */
 import type { ComplexPlane, Grid, Plane } from '../recon/grid';
+import { logFloor, writeLevels, writeLogLevels, writePhaseLevels } from './display-levels';
 import type { PlaneDescription, PlaneForm, Planes } from './job';
 
 export type NamedPlane = { readonly name: string } & (
   { readonly domain: 'image'; readonly plane: Plane } | { readonly domain: 'kspace'; readonly plane: ComplexPlane }
 );
 
-interface Encoded {
+/** Part of an answer: what it is, how many bytes it takes, and how they are written. */
+interface Part {
   readonly description: PlaneDescription;
-  readonly samples: Float32Array | Uint16Array;
+  readonly byteLength: number;
+  readonly write: (buffer: ArrayBuffer, offset: number) => void;
 }
 
-export const logFloor = -8;
-const fullScale = 65_535;
-
-/** Encodes `planes` in their order. */
+/** Encodes `planes` in their order, each sample once, where it travels. */
 export function encodePlanes(planes: readonly NamedPlane[], form: PlaneForm): Planes {
-  const encoded = planes.flatMap((plane) => (form === 'exact' ? [exact(plane)] : display(plane)));
-  const bytes = new Uint8Array(encoded.reduce((sum, { samples }) => sum + samples.byteLength, 0));
+  const parts = planes.flatMap((plane) => (form === 'exact' ? [exact(plane)] : display(plane)));
+  const buffer = new ArrayBuffer(parts.reduce((sum, { byteLength }) => sum + byteLength, 0));
   let offset = 0;
-  for (const { samples } of encoded) {
-    bytes.set(new Uint8Array(samples.buffer, samples.byteOffset, samples.byteLength), offset);
-    offset += samples.byteLength;
+  for (const { write, byteLength } of parts) {
+    write(buffer, offset);
+    offset += byteLength;
   }
-  return { planes: encoded.map(({ description }) => description), bytes };
+  return { planes: parts.map(({ description }) => description), bytes: new Uint8Array(buffer) };
 }
 
-function exact(named: NamedPlane): Encoded {
+function exact(named: NamedPlane): Part {
+  const n = named.plane.rows * named.plane.columns;
   if (named.domain === 'image') {
-    return { description: { ...describe(named), type: 'float32' }, samples: Float32Array.from(named.plane.values) };
+    return {
+      description: { ...describe(named), type: 'float32' },
+      byteLength: n * Float32Array.BYTES_PER_ELEMENT,
+      write: (buffer, offset) => new Float32Array(buffer, offset, n).set(named.plane.values),
+    };
   }
-  const { re, im } = named.plane;
-  const samples = new Float32Array(2 * re.length);
+  return {
+    description: { ...describe(named), type: 'complex64' },
+    byteLength: 2 * n * Float32Array.BYTES_PER_ELEMENT,
+    write: (buffer, offset) => interleave(named.plane, new Float32Array(buffer, offset, 2 * n)),
+  };
+}
+
+function interleave({ re, im }: ComplexPlane, samples: Float32Array): void {
   for (let i = 0; i < re.length; i++) {
     samples[2 * i] = re[i] as number;
     samples[2 * i + 1] = im[i] as number;
   }
-  return { description: { ...describe(named), type: 'complex64' }, samples };
 }
 
-function display(named: NamedPlane): Encoded[] {
+function display(named: NamedPlane): Part[] {
   if (named.domain === 'image') {
-    const [low, high] = extremes(named.plane.values);
-    return [scaled(named, named.name, named.plane.values, low, high)];
+    const { values } = named.plane;
+    const [low, most] = extremes(values);
+    // A flat plane is all zeros with high above low.
+    const high = most > low ? most : low + 1;
+    return [inLevels(named, named.name, [low, high], (levels) => writeLevels(values, [low, high], levels))];
   }
+  const { name, plane } = named;
   return [
-    scaled(named, `${named.name}.log`, logMagnitude(named.plane), logFloor, 0),
-    scaled(named, `${named.name}.phase`, phase(named.plane), -Math.PI, Math.PI),
+    inLevels(named, `${name}.log`, [logFloor, 0], (levels) => writeLogLevels(plane, levels)),
+    inLevels(named, `${name}.phase`, [-Math.PI, Math.PI], (levels) => writePhaseLevels(plane, levels)),
   ];
 }
 
-/** Values between low and high as 0 to 65535; those beyond are clamped. A flat plane is all zeros with high above low. */
-function scaled(named: NamedPlane, name: string, values: Float64Array, low: number, high: number): Encoded {
-  const top = high > low ? high : low + 1;
-  const factor = fullScale / (top - low);
-  const samples = new Uint16Array(values.length);
-  for (let i = 0; i < values.length; i++) {
-    const level = ((values[i] as number) - low) * factor + 0.5;
-    samples[i] = level < 0 ? 0 : level > fullScale ? fullScale : level;
-  }
-  return { description: { ...describe(named), name, type: 'uint16', low, high: top }, samples };
+function inLevels(named: NamedPlane, name: string, [low, high]: readonly [number, number], write: (levels: Uint16Array) => void): Part {
+  const n = named.plane.rows * named.plane.columns;
+  return {
+    description: { ...describe(named), name, type: 'uint16', low, high },
+    byteLength: n * Uint16Array.BYTES_PER_ELEMENT,
+    write: (buffer, offset) => write(new Uint16Array(buffer, offset, n)),
+  };
 }
 
 /** Log magnitudes drawn black and white in a small picture of k-space: four decades. */
@@ -87,16 +98,11 @@ export function logMagnitude({ re, im }: ComplexPlane): Float64Array {
   return values;
 }
 
-function phase({ re, im }: ComplexPlane): Float64Array {
-  const values = new Float64Array(re.length);
-  for (let i = 0; i < values.length; i++) values[i] = Math.atan2(im[i] as number, re[i] as number);
-  return values;
-}
-
 function extremes(values: Float64Array): [number, number] {
   let low = Infinity;
   let high = -Infinity;
-  for (const value of values) {
+  for (let i = 0; i < values.length; i++) {
+    const value = values[i] as number;
     if (value < low) low = value;
     if (value > high) high = value;
   }

@@ -58,6 +58,7 @@ function runSimulation({ source, recipe, acquisition, outputs, compareWith, form
     outputs.map((name) => namedPlane(simulation, name)),
     form,
   );
+  simulation.giveBack();
   return handBack({ ...planes, numbers: { ...numbers, computedInMs: performance.now() - start } }, [planes.bytes.buffer]);
 }
 

@@ -6,6 +6,7 @@
 import type { PhaseEncode } from '../acquisition';
 import { phaseEncodeAxis } from '../acquisition';
 import type { Plane } from '../grid';
+import { giveBackBytes, unwrittenBytes } from '../spare-arrays';
 import { percentile } from '../statistics';
 
 export interface RegionMean {
@@ -29,12 +30,15 @@ const leastPixels = 200;
 /** Scanners that blank the air leave exact zeros in it; noise and ghosts do not. */
 const mostZeros = 0.25;
 
+/** Pixels that were reached, in their order; kept, as it is as large as the image. */
+let reached = new Int32Array(0);
+
 /** I > 0.15·P99, and everything that it encloses: what cannot be reached from the border over fainter pixels. */
 export function objectMask({ rows, columns, values }: Plane): Uint8Array {
   const threshold = objectThreshold * percentile(values, 99);
-  const mask = new Uint8Array(values.length).fill(1);
+  const mask = unwrittenBytes(values.length).fill(1);
   // Every pixel is reached once at most.
-  const reached = new Int32Array(values.length);
+  if (reached.length < values.length) reached = new Int32Array(values.length);
   let nReached = 0;
   const reach = (i: number): void => {
     if (mask[i] === 0 || (values[i] as number) > threshold) return;
@@ -45,32 +49,33 @@ export function objectMask({ rows, columns, values }: Plane): Uint8Array {
   for (let column = 0; column < columns; column++) for (const row of [0, rows - 1]) reach(row * columns + column);
   for (let next = 0; next < nReached; next++) {
     const i = reached[next] as number;
-    const column = i % columns;
     if (i >= columns) reach(i - columns);
     if (i < values.length - columns) reach(i + columns);
-    if (column > 0) reach(i - 1);
-    if (column < columns - 1) reach(i + 1);
+    // Beyond the end of a row lies a pixel of the border, at which the search began: it is not reached again.
+    if (i > 0) reach(i - 1);
+    if (i < values.length - 1) reach(i + 1);
   }
   return mask;
 }
 
+/** 1 where the mask has a pixel within `guard` along one strand; how many there are follows from what enters and what leaves. */
+function grownAlong(mask: Uint8Array, grown: Uint8Array, { start, stride, n }: { start: number; stride: number; n: number }): void {
+  let within = 0;
+  for (let j = 0; j < Math.min(guard, n); j++) within += mask[start + j * stride] as number;
+  for (let j = 0; j < n; j++) {
+    if (j + guard < n) within += mask[start + (j + guard) * stride] as number;
+    if (j > guard) within -= mask[start + (j - guard - 1) * stride] as number;
+    grown[start + j * stride] = within > 0 ? 1 : 0;
+  }
+}
+
 /** The mask and all pixels within `guard` of it along rows or columns: a square, grown along one axis after the other. */
 function dilated(mask: Uint8Array, rows: number, columns: number): Uint8Array {
-  const along = new Uint8Array(mask.length);
-  for (let row = 0; row < rows; row++) {
-    const start = row * columns;
-    for (let column = 0; column < columns; column++) {
-      if (mask[start + column] === 1) along.fill(1, start + Math.max(0, column - guard), start + Math.min(columns, column + guard + 1));
-    }
-  }
-  const grown = new Uint8Array(mask.length);
-  for (let row = 0; row < rows; row++) {
-    for (let r = Math.max(0, row - guard); r <= Math.min(rows - 1, row + guard); r++) {
-      for (let column = 0; column < columns; column++) {
-        if (along[r * columns + column] === 1) grown[row * columns + column] = 1;
-      }
-    }
-  }
+  const along = unwrittenBytes(mask.length);
+  for (let row = 0; row < rows; row++) grownAlong(mask, along, { start: row * columns, stride: 1, n: columns });
+  const grown = unwrittenBytes(mask.length);
+  for (let column = 0; column < columns; column++) grownAlong(along, grown, { start: column, stride: columns, n: rows });
+  giveBackBytes(along);
   return grown;
 }
 
@@ -114,6 +119,8 @@ function tally(image: Plane, axis: 0 | 1): Record<'object' | 'ghost' | 'otherAir
       else if (nearObject[i] === 0) count(air, values[i] as number);
     }
   }
+  giveBackBytes(object);
+  giveBackBytes(nearObject);
   return tallies;
 }
 

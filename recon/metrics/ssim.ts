@@ -1,5 +1,6 @@
 /** Structural similarity of a simulated image and a bad one, by separable windows: fast enough to follow a slider. */
 import type { Plane } from '../grid';
+import { giveBack, unwrittenArray } from '../spare-arrays';
 import { percentile } from '../statistics';
 import { leastSquaresGain } from './nrmse';
 
@@ -27,24 +28,29 @@ function weightedMean(samples: Float64Array, i: number, stride: number): number 
   return sum + w5 * ((samples[i] as number) + (samples[i + 10 * stride] as number));
 }
 
-/** Local means where the window fits wholly: (rows − 10) × (columns − 10), the window applied along rows, then along columns. */
+/** Local means where the window fits wholly: (rows − 10) × (columns − 10) at the start of the array, the window applied along rows, then
+ *  along columns. */
 function localMean(values: Float64Array, rows: number, columns: number): Float64Array {
   const innerRows = rows - windowSize + 1;
   const innerColumns = columns - windowSize + 1;
-  const along = new Float64Array(rows * innerColumns);
+  const along = unwrittenArray(values.length);
   for (let row = 0; row < rows; row++) {
     for (let column = 0; column < innerColumns; column++)
       along[row * innerColumns + column] = weightedMean(values, row * columns + column, 1);
   }
-  const means = new Float64Array(innerRows * innerColumns);
-  for (let i = 0; i < means.length; i++) means[i] = weightedMean(along, i, innerColumns);
+  const means = unwrittenArray(values.length);
+  for (let i = 0; i < innerRows * innerColumns; i++) means[i] = weightedMean(along, i, innerColumns);
+  giveBack(along);
   return means;
 }
 
-function product(a: Float64Array, b: Float64Array): Float64Array {
-  const result = new Float64Array(a.length);
-  for (let i = 0; i < result.length; i++) result[i] = (a[i] as number) * (b[i] as number);
-  return result;
+/** Local means of a·b. */
+function localMeanOfProduct(a: Float64Array, b: Float64Array, rows: number, columns: number): Float64Array {
+  const product = unwrittenArray(a.length);
+  for (let i = 0; i < product.length; i++) product[i] = (a[i] as number) * (b[i] as number);
+  const means = localMean(product, rows, columns);
+  giveBack(product);
+  return means;
 }
 
 /** What SSIM needs of the image to compare with: it stays while a slider moves. */
@@ -56,14 +62,17 @@ export interface SsimReference {
   readonly variance: Float64Array;
 }
 
+/** Places where the window fits. */
+const nPlaces = ({ rows, columns }: Plane): number => (rows - windowSize + 1) * (columns - windowSize + 1);
+
 /** Throws where a side is shorter than the window. */
 export function ssimReference(plane: Plane): SsimReference {
   const { rows, columns, values } = plane;
   if (Math.min(rows, columns) < windowSize) throw RangeError(`ssim needs at least ${windowSize} rows and columns, got ${rows}×${columns}`);
   const L = percentile(values, 99.9);
   const mean = localMean(values, rows, columns);
-  const variance = localMean(product(values, values), rows, columns);
-  for (let i = 0; i < mean.length; i++) variance[i] = (variance[i] as number) - (mean[i] as number) ** 2;
+  const variance = localMeanOfProduct(values, values, rows, columns);
+  for (let i = 0; i < nPlaces(plane); i++) variance[i] = (variance[i] as number) - (mean[i] as number) ** 2;
   return { plane, c1: (0.01 * L) ** 2, c2: (0.03 * L) ** 2, mean, variance };
 }
 
@@ -78,15 +87,16 @@ export function ssim(s: Plane, b: Plane | SsimReference): number {
   const g = leastSquaresGain(s, plane);
   const { rows, columns } = plane;
   const meanS = localMean(s.values, rows, columns);
-  const meanSS = localMean(product(s.values, s.values), rows, columns);
-  const meanSB = localMean(product(s.values, plane.values), rows, columns);
+  const meanSS = localMeanOfProduct(s.values, s.values, rows, columns);
+  const meanSB = localMeanOfProduct(s.values, plane.values, rows, columns);
   let sum = 0;
-  for (let i = 0; i < mean.length; i++) {
+  for (let i = 0; i < nPlaces(plane); i++) {
     const ms = g * (meanS[i] as number);
     const mb = mean[i] as number;
     const varianceS = g * g * (meanSS[i] as number) - ms * ms;
     const covariance = g * (meanSB[i] as number) - ms * mb;
     sum += ((2 * ms * mb + c1) * (2 * covariance + c2)) / ((ms * ms + mb * mb + c1) * (varianceS + (variance[i] as number) + c2));
   }
-  return sum / mean.length;
+  for (const means of [meanS, meanSS, meanSB]) giveBack(means);
+  return sum / nPlaces(plane);
 }
