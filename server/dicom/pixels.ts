@@ -1,8 +1,6 @@
 /**
- * Pixel data to values: bits masked and sign-extended, padding made zero, rescaled. Sizes are checked against the bytes that are
- * there before anything is allocated. Sources: DICOM PS3.3 C.7.6.3 and C.11.1, PS3.5 section 8.
+ * A frame to values: bits masked and sign-extended, padding made zero, rescaled. Sources: DICOM PS3.3 C.7.6.3 and C.11.1, PS3.5 section 8.
  */
-import type { Element } from 'dicom-parser';
 import type { Header } from './header';
 import type { Warning } from './warnings';
 import { count, refuse, type Refused } from './refusal';
@@ -26,7 +24,8 @@ const largestSide = 4096;
 const largestRescale = 1e12;
 const rangePercentiles = [0.01, 0.998] as const;
 
-interface Layout {
+/** How the pixels of a frame are written. */
+export interface Layout {
   readonly rows: number;
   readonly columns: number;
   readonly bytesPerPixel: 1 | 2;
@@ -35,19 +34,11 @@ interface Layout {
   readonly signed: boolean;
 }
 
-export function readPixels(bytes: Uint8Array, header: Header, element: Element): Pixels | Refused {
-  const layout = layoutOf(header);
-  if ('refused' in layout) return layout;
-  const expected = layout.rows * layout.columns * layout.bytesPerPixel;
-  // An odd number of bytes is padded to an even one.
-  if (element.length < expected || element.length > expected + 1) {
-    const claim = `${layout.columns} × ${layout.rows} pixels of ${layout.bytesPerPixel * 8} bits need ${expected} bytes`;
-    return refuse('size', `The header and the pixels disagree: ${claim}, and the file holds ${element.length}. Export it again.`);
-  }
-  return rescaled(storedValues(bytes, element.dataOffset, layout), layout, header);
-}
+/** `frame` as it comes from `framesOf`. */
+export const readPixels = (frame: Uint8Array, layout: Layout, header: Header): Pixels =>
+  rescaled(storedValues(frame, layout), layout, header);
 
-function layoutOf(header: Header): Layout | Refused {
+export function layoutOf(header: Header): Layout | Refused {
   const rows = header.number('rows');
   const columns = header.number('columns');
   if (rows === undefined || columns === undefined) return refuse('size', 'The header does not say how many rows and columns there are.');
@@ -74,8 +65,8 @@ function layoutOf(header: Header): Layout | Refused {
 }
 
 /** Stored values as the integers they stand for. Bits outside BitsStored, where old files kept overlays, are masked away. */
-function storedValues(bytes: Uint8Array, offset: number, { rows, columns, bytesPerPixel, bitsStored, shift, signed }: Layout): Int32Array {
-  const view = new DataView(bytes.buffer, bytes.byteOffset + offset, rows * columns * bytesPerPixel);
+function storedValues(frame: Uint8Array, { rows, columns, bytesPerPixel, bitsStored, shift, signed }: Layout): Int32Array {
+  const view = new DataView(frame.buffer, frame.byteOffset, frame.byteLength);
   const stored = new Int32Array(rows * columns);
   const unused = 32 - bitsStored;
   for (let i = 0; i < stored.length; i++) {

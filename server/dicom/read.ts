@@ -1,19 +1,19 @@
 /**
  * The door for DICOM files: bytes in, an image with its facts out, or the reason why not. Pure and synchronous; it runs in a
- * worker thread. Here: uncompressed little endian, one frame, MR magnitude. Of everything else in a file only the names of the
- * tags come out, as the account of what was removed.
+ * worker thread. Here: one frame, MR magnitude. Of everything else in a file only the names of the tags come out, as the account of
+ * what was removed.
  */
-import type { Element } from 'dicom-parser';
 import type { FrameFacts, ScanFacts } from '../contract/facts';
 import type { Image } from '../contract/images';
+import { noDecoders, type Decoders } from './codecs/decoders';
 import { deidentificationOf } from './deidentification';
 import { factsOf } from './facts';
+import { framesOf, noPixels } from './frames';
 import { headerOf, type Header } from './header';
 import { refuseKindOfImage } from './kind-of-image';
 import { elementsAfter, parse, type Parsed } from './parse';
-import { readPixels } from './pixels';
-import { isRefused, refuse, type Refused } from './refusal';
-import { uncompressedLittleEndian, whyNotRead } from './transfer-syntax';
+import { layoutOf, readPixels } from './pixels';
+import { isRefused, type Refused } from './refusal';
 import { replacedUid, type IdentifierName, type UniqueIdentifiers } from './unique-identifiers';
 import { warningsOf } from './warnings';
 
@@ -32,21 +32,26 @@ export type Read = { readonly accepted: readonly AcceptedImage[] } | Refused;
 
 /**
  * Reads one file: one image or several, where it holds several components. Its name is no input: names of exported files hold names of
- * patients. `key` is the department's, which replaces unique identifiers.
+ * patients. `key` is the department's, which replaces unique identifiers. Compressed frames need decoders.
  */
-export function readDicom(bytes: Uint8Array, key: Uint8Array): Read {
-  const read = readImage(bytes, key);
+export function readDicom(bytes: Uint8Array, key: Uint8Array, decoders: Decoders = noDecoders): Read {
+  const read = readImage(bytes, key, decoders);
   return isRefused(read) ? read : { accepted: [read] };
 }
 
-function readImage(bytes: Uint8Array, key: Uint8Array): AcceptedImage | Refused {
+function readImage(bytes: Uint8Array, key: Uint8Array, decoders: Decoders): AcceptedImage | Refused {
   const parsed = parse(bytes);
   if (isRefused(parsed)) return parsed;
   const header = headerOf(parsed.dataSet);
-  const pixelData = pixelDataOf(parsed, header);
-  if (isRefused(pixelData)) return pixelData;
-  const pixels = readPixels(bytes, header, pixelData);
-  if (isRefused(pixels)) return pixels;
+  const unfit = whyNotTaken(parsed, header);
+  if (unfit !== undefined) return unfit;
+  const layout = layoutOf(header);
+  if (isRefused(layout)) return layout;
+  const frames = framesOf(parsed, layout, 1, decoders);
+  if (isRefused(frames)) return frames;
+  const [frame] = frames;
+  if (frame === undefined) return noPixels;
+  const pixels = readPixels(frame, layout, header);
   const facts = factsOf(header);
   const { rows, columns, values, range } = pixels;
   return {
@@ -63,7 +68,7 @@ function readImage(bytes: Uint8Array, key: Uint8Array): AcceptedImage | Refused 
     frameFacts: [frameFactsOf(facts)],
     identifiers: identifiersOf(header, key),
     warnings: warningsOf(header, facts, pixels),
-    deidentification: deidentificationOf(parsed.dataSet.elements, elementsAfter(bytes, parsed, pixelData), header),
+    deidentification: deidentificationOf(parsed.dataSet.elements, elementsAfter(parsed), header),
   };
 }
 
@@ -88,18 +93,9 @@ function identifiersOf(header: Header, key: Uint8Array): UniqueIdentifiers {
   };
 }
 
-/** The pixel data of an image that is taken. */
-function pixelDataOf({ transferSyntax, pixelData }: Parsed, header: Header): Element | Refused {
+function whyNotTaken({ pixelData }: Parsed, header: Header): Refused | undefined {
   // A header that was cut off before its modality is not an image of another kind.
-  const kind = pixelData === undefined && header.text('modality') === undefined ? undefined : refuseKindOfImage(header);
-  if (kind !== undefined) return kind;
-  if (pixelData === undefined || pixelData.length === 0) {
-    return refuse('no-pixels', 'The file holds a header and no pixels, or was cut off before them. Export the image itself.');
-  }
-  if (!uncompressedLittleEndian.has(transferSyntax)) return refuse('transfer-syntax', `The pixels are ${whyNotRead(transferSyntax)}.`);
-  if (pixelData.hadUndefinedLength !== true) return pixelData;
-  return refuse(
-    'transfer-syntax',
-    'The pixels are packed as if compressed, though the header says they are not. Export the image again, uncompressed.',
-  );
+  const isCutOff = pixelData === undefined && header.text('modality') === undefined;
+  const kind = isCutOff ? undefined : refuseKindOfImage(header);
+  return kind ?? (pixelData === undefined || pixelData.length === 0 ? noPixels : undefined);
 }

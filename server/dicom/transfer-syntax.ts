@@ -4,16 +4,19 @@
 
 export const implicitLittleEndian = '1.2.840.10008.1.2';
 export const explicitLittleEndian = '1.2.840.10008.1.2.1';
+export const explicitBigEndian = '1.2.840.10008.1.2.2';
 
 /** Those whose whole data set is deflated: even the header is not readable as it stands. */
-export const deflated: ReadonlySet<string> = new Set(['1.2.840.10008.1.2.1.99', '1.2.840.10008.1.2.4.95', '1.2.840.10008.1.2.8.1']);
+export const deflated: ReadonlySet<string> = new Set(['1.2.840.10008.1.2.1.99']);
 
-/** Those whose pixels are read. */
-export const uncompressedLittleEndian: ReadonlySet<string> = new Set([implicitLittleEndian, explicitLittleEndian]);
+/** Those whose pixels stand as they are, once a deflated file is inflated. */
+export const uncompressed: ReadonlySet<string> = new Set([implicitLittleEndian, explicitLittleEndian, explicitBigEndian]);
+
+/** Whether the pixels of this transfer syntax come in items, one or more a frame. */
+export const encapsulated = (transferSyntax: string): boolean =>
+  transferSyntax.startsWith('1.2.840.10008.1.2.4.') || transferSyntax === '1.2.840.10008.1.2.5';
 
 const written: Readonly<Record<string, string>> = {
-  '1.2.840.10008.1.2.2': 'written as explicit big endian',
-  '1.2.840.10008.1.2.1.99': 'deflated as a whole',
   '1.2.840.10008.1.2.4.50': 'compressed as lossy 8-bit JPEG',
   '1.2.840.10008.1.2.4.51': 'compressed as lossy 12-bit JPEG',
   '1.2.840.10008.1.2.4.57': 'compressed as lossless JPEG',
