@@ -3,7 +3,7 @@
  * beside it. With u the unit vector from the centre, ρ the distance, b the direction of B0:
  *   ball of radius a:                 (Δχ/3)(a/ρ)³(3(u·b)² − 1)
  *   rod along the slice normal:       (Δχ/2)(a/ρ)² sin²θ cos 2ψ,  θ between B0 and the rod, ψ from the part of B0 in the plane.
- * Inside there is no signal; the value of the surface holds there, so that nothing jumps. Source: Schenck, Med Phys 1996;23:815 (from memory).
+ * Inside there is no signal; the value of the surface holds there, so that nothing jumps. Source: Schenck, Med Phys 1996;23:815.
  */
 import type { Acquisition } from './acquisition';
 import type { FieldMap } from './field-map';

@@ -2,7 +2,7 @@
  * How a plane is read out, as far as spins off resonance are concerned. A spin whose frequency is off by Δf is imaged elsewhere: by
  * Δf/BW pixels along the readout, BW the bandwidth per pixel, and in an echo-planar scan by Δf·ESP·N/R pixels along the phase encoding, where
  * a line takes the echo spacing ESP. At the echo it has the phase −2πΔf·TE in a gradient echo and none in a spin echo; echo-planar
- * scans are taken to be spin echoes. Source: Jezzard & Balaban, Magn Reson Med 1995;34:65 (from memory).
+ * scans are taken to be spin echoes. Source: Jezzard & Balaban, Magn Reson Med 1995;34:65.
  */
 import type { Acquisition } from './acquisition';
 import { phaseEncodeAxis } from './acquisition';

@@ -72,7 +72,12 @@ export const chemicalShift = defineCause({
       doi: '10.1148/radiographics.19.2.g99mr07357',
       standing: 'confirmed',
     },
-    { citation: 'Dixon WT. Simple proton spectroscopic imaging. Radiology 153:189', year: 1984, standing: 'from memory' },
+    {
+      citation: 'Dixon WT. Simple proton spectroscopic imaging. Radiology 153:189',
+      year: 1984,
+      doi: '10.1148/radiology.153.1.6089263',
+      standing: 'confirmed',
+    },
   ],
   remedies: [
     {

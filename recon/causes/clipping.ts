@@ -35,7 +35,7 @@ export const clipping = defineCause({
       citation: 'Zhuo J, Gullapalli RP. MR artifacts, safety, and quality control. RadioGraphics 26:275',
       year: 2006,
       equation: 'data clipping',
-      standing: 'from memory',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -122,7 +122,7 @@ export const cuspArtefact = defineCause({
     {
       citation: 'Rangwala NA, Zhou XJ. Reduction of fast spin echo cusp artifact using a slice-tilting gradient. Magn Reson Med 64:220',
       year: 2010,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     {
       citation:

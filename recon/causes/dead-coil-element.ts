@@ -41,7 +41,7 @@ export const deadCoilElement = defineCause({
       citation: 'Roemer PB et al. The NMR phased array. Magn Reson Med 16:192',
       year: 1990,
       equation: 'root sum of squares of the elements',
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     { citation: 'Gaussian sensitivities on a ring', standing: 'common practice' },
   ],

@@ -60,7 +60,7 @@ export const eddyCurrents = defineCause({
       citation:
         'Jezzard P, Barnett AS, Pierpaoli C. Characterization of and correction for eddy current artifacts in echo planar diffusion imaging. Magn Reson Med 39:801',
       year: 1998,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -85,7 +85,8 @@ export const gradientNonLinearity = defineCause({
       citation:
         'Jovicich J et al. Reliability in multi-site structural MRI studies: effects of gradient non-linearity correction. NeuroImage 30:436',
       year: 2006,
-      standing: 'from memory',
+      doi: '10.1016/j.neuroimage.2005.09.046',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -94,7 +94,8 @@ export const halfFieldGhost = defineCause({
     {
       citation: 'Bruder H et al. Image reconstruction for echo planar imaging. Magn Reson Med 23:311',
       year: 1992,
-      standing: 'from memory',
+      doi: '10.1002/mrm.1910230211',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -140,6 +140,7 @@ export const magicAngle = defineCause({
     toNormal: 90,
     inPlane: 0,
   },
+  phantom: 'vials',
   /** The effect fades as TE grows. */
   strength: { echoTime: [45, 8] },
   looks: {
@@ -152,13 +153,13 @@ export const magicAngle = defineCause({
       citation:
         'Du J et al. Magic angle effect in magnetic resonance imaging of the Achilles tendon and enthesis. Magn Reson Imaging 27:557',
       year: 2009,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     {
       citation: 'Erickson SJ et al. Effect of tendon orientation on MR imaging signal intensity. Radiology 181:389',
       year: 1991,
       doi: '10.1148/radiology.181.2.1924777',
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     {
       citation: 'Fullerton GD, Cameron IL, Ord VA. Orientation of tendons in the magnetic field and its effect on T2. Radiology 155:433',

@@ -105,12 +105,13 @@ export const noise = defineCause({
       citation:
         'Constantinides CD, Atalar E, McVeigh ER. Signal-to-noise measurements in magnitude images from NMR phased arrays. Magn Reson Med 38:852',
       year: 1997,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     {
       citation: 'Edelstein WA et al. The intrinsic signal-to-noise ratio in NMR imaging. Magn Reson Med 3:604',
       year: 1986,
-      standing: 'from memory',
+      doi: '10.1002/mrm.1910030413',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -61,7 +61,8 @@ export const offResonance = defineCause({
       citation:
         'Jezzard P, Balaban RS. Correction for geometric distortion in echo planar images from B0 field variations. Magn Reson Med 34:65',
       year: 1995,
-      standing: 'from memory',
+      doi: '10.1002/mrm.1910340111',
+      standing: 'confirmed',
     },
     {
       citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences',

@@ -54,7 +54,7 @@ export const parallelImagingResidual = defineCause({
     width: quantity({ label: 'Reach of an element', unit: 'of FOV', min: 0.3, max: 0.6, step: 0.05, initial: 0.3 }),
   },
   identity: { accelerationFactor: 1, displacement: 0, fraction: 1, mapNoise: 0, noise: 0, elements: 8, width: 0.3 },
-  strength: { displacement: [5, 40], noise: [0.5, 3] },
+  strength: { displacement: [5, 25], noise: [0.5, 3] },
   looks: {
     image:
       'Faint arcs and edges of the anatomy one R-th of the field of view away along the phase encoding; with a field of view that is too small a bright band of fold-in in the middle of the picture, not at its edge; grain that is coarser in the middle than at the edge. The coil is an assumed ring of elements.',

@@ -70,7 +70,8 @@ export const randomUndersampling = defineCause({
       citation:
         'Lustig M, Donoho D, Pauly JM. Sparse MRI: the application of compressed sensing for rapid MR imaging. Magn Reson Med 58:1182',
       year: 2007,
-      standing: 'from memory',
+      doi: '10.1002/mrm.21391',
+      standing: 'confirmed',
     },
     {
       citation: 'Efraimidis PS, Spirakis PG. Weighted random sampling with a reservoir. Inf Process Lett 97:181',

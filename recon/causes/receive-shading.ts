@@ -38,7 +38,7 @@ export const receiveShading = defineCause({
       citation:
         'Sled JG, Zijdenbos AP, Evans AC. A nonparametric method for automatic correction of intensity nonuniformity in MRI data. IEEE Trans Med Imaging 17:87',
       year: 1998,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
   ],
   remedies: [

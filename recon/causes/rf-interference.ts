@@ -150,12 +150,12 @@ export const rfInterference = defineCause({
     {
       citation: 'Pusey E et al. Magnetic resonance imaging artifacts: mechanism and clinical significance. RadioGraphics 6:891',
       year: 1986,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     {
       citation: 'Zhuo J, Gullapalli RP. MR artifacts, safety, and quality control. RadioGraphics 26:275',
       year: 2006,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
     {
       citation: 'Graves MJ, Mitchell DG. Body MRI artifacts in clinical practice. J Magn Reson Imaging 38:269',

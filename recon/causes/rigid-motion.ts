@@ -88,7 +88,8 @@ export const rigidMotion = defineCause({
       citation:
         'Atkinson D et al. Automatic correction of motion artifacts in magnetic resonance images using an entropy focus criterion. IEEE Trans Med Imaging 16:903',
       year: 1997,
-      standing: 'from memory',
+      doi: '10.1109/42.650886',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -110,7 +110,8 @@ export const susceptibility = defineCause({
     {
       citation: 'Schenck JF. The role of magnetic susceptibility in magnetic resonance imaging. Med Phys 23:815',
       year: 1996,
-      standing: 'from memory',
+      doi: '10.1118/1.597854',
+      standing: 'confirmed',
     },
     {
       citation: 'Lüdeke KM, Röschmann P, Tischler R. Susceptibility artefacts in NMR imaging. Magn Reson Imaging 3:329',
@@ -120,7 +121,8 @@ export const susceptibility = defineCause({
     {
       citation: 'Hargreaves BA et al. Metal-induced artifacts in MRI. AJR Am J Roentgenol 197:547',
       year: 2011,
-      standing: 'from memory',
+      doi: '10.2214/AJR.11.7364',
+      standing: 'confirmed',
     },
   ],
   remedies: [

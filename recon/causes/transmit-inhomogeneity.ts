@@ -109,7 +109,7 @@ export const transmitInhomogeneity = defineCause({
     {
       citation: 'Ernst RR, Anderson WA. Application of Fourier transform spectroscopy to magnetic resonance. Rev Sci Instrum 37:93',
       year: 1966,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
   ],
   remedies: [

@@ -2,7 +2,7 @@
  * Filters of k-space against ringing: every sample times W(r), r = |k|/kmax, kmax the edge of what was taken along each axis, W(0) = 1.
  *   Hamming 0.54 + 0.46 cos πr · Hann ½ + ½ cos πr · Tukey 1 up to 1 − a, then ½ + ½ cos(π(r − 1 + a)/a): axis by axis;
  *   Fermi 1/(1 + exp((r − r0)/w)) over W(0): of the radius in the plane.
- * Sources: Harris, Proc IEEE 1978;66:51 (windows, from memory); Bernstein, King, Zhou, Handbook of MRI Pulse Sequences 2004 (Fermi).
+ * Sources: Harris, Proc IEEE 1978;66:51 (windows); Bernstein, King, Zhou, Handbook of MRI Pulse Sequences 2004 (Fermi).
  */
 import type { Context, Encoded } from '../cause';
 import { defineReconstruction } from '../cause';
@@ -79,7 +79,8 @@ export const windowed = defineReconstruction({
     {
       citation: 'Harris FJ. On the use of windows for harmonic analysis with the discrete Fourier transform. Proc IEEE 66:51',
       year: 1978,
-      standing: 'from memory',
+      doi: '10.1109/PROC.1978.10837',
+      standing: 'confirmed',
     },
     { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'confirmed' },
   ],
