@@ -36,7 +36,7 @@ export function factsOf(header: Header): ScanFacts {
     phaseOversampling: encoding.phaseOversamplingFact(header),
     accelerationFactor: encoding.accelerationFactorFact(header),
     echoPlanar: encoding.echoPlanarFact(header),
-    scanningSequence: wordsFact(header, 'scanningSequence'),
+    scanningSequence: encoding.scanningSequenceFact(header),
     sequenceVariant: wordsFact(header, 'sequenceVariant'),
     scanOptions: wordsFact(header, 'scanOptions'),
     acquisitionType: encoding.acquisitionTypeFact(header),

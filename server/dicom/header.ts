@@ -1,9 +1,11 @@
 /**
- * A data set seen through the allow-list: values are asked for by name, as texts or as numbers, and nothing else can be asked.
+ * A data set seen through the allow-list, for one frame: values are asked for by name, as texts or as numbers, and nothing else can be asked.
+ * What the frame has for itself counts before what all frames share, and this before the top level (PS3.3 C.7.6.16).
  * Never throws on a strange value: what cannot be read as asked is left out. Encodings: DICOM PS3.5 section 6.2.
  */
 import type { DataSet, Element } from 'dicom-parser';
-import { allowList, type AttributeName } from './allow-list';
+import { allowList, type Attribute, type AttributeName } from './allow-list';
+import { groupsOfFrame, itemOf } from './functional-groups';
 
 export interface Header {
   /** The values of a textual attribute without their padding; none where it is absent or empty. */
@@ -13,29 +15,34 @@ export interface Header {
   /** The first value, where there is exactly one of them or more. */
   text(name: AttributeName): string | undefined;
   number(name: AttributeName): number | undefined;
+  /** The bytes of an attribute as they are. */
+  bytes(name: AttributeName): Uint8Array | undefined;
+}
+
+interface Found {
+  readonly dataSet: DataSet;
+  readonly element: Element;
+  readonly vr: string;
 }
 
 /** No attribute of the allow-list is longer in an honest file; a longer value is noise. */
 const longestValue = 1024;
 const decimal = /^[+-]?(\d+\.?\d*|\.\d+)([eE][+-]?\d+)?$/;
 
-export function headerOf(dataSet: DataSet): Header {
-  const find = (name: AttributeName): { element: Element; vr: string } | undefined => {
-    const { tag, vr } = allowList[name];
-    const element = dataSet.elements[tag];
-    if (element === undefined || element.length === 0 || element.length > longestValue || element.items !== undefined) return undefined;
-    return { element, vr: element.vr === undefined || element.vr === 'UN' ? vr : element.vr };
-  };
+/** @param frame counts for enhanced files; a classic one says the same of all its frames */
+export function headerOf(dataSet: DataSet, frame = 0): Header {
+  const groups = groupsOfFrame(dataSet, frame);
+  const find = (name: AttributeName): Found | undefined => findIn(placesOf(dataSet, groups, allowList[name]), allowList[name]);
   const texts = (name: AttributeName): readonly string[] => {
     const found = find(name);
-    return found === undefined || found.vr in binary ? [] : textsOf(dataSet, found.element);
+    return found === undefined || isLong(found) || found.vr in binary ? [] : textsOf(found.dataSet, found.element);
   };
   const numbers = (name: AttributeName): readonly number[] => {
     const found = find(name);
-    if (found === undefined) return [];
+    if (found === undefined || isLong(found)) return [];
     const reader = binary[found.vr];
-    if (reader !== undefined) return binaryNumbers(dataSet, found.element, reader);
-    return textsOf(dataSet, found.element).map((text) => (decimal.test(text) ? Number(text) : NaN));
+    if (reader !== undefined) return binaryNumbers(found.dataSet, found.element, reader);
+    return textsOf(found.dataSet, found.element).map((text) => (decimal.test(text) ? Number(text) : NaN));
   };
   return {
     texts,
@@ -45,12 +52,29 @@ export function headerOf(dataSet: DataSet): Header {
       const first = numbers(name)[0];
       return Number.isFinite(first) ? first : undefined;
     },
+    bytes: (name) => {
+      const found = find(name);
+      return found && found.dataSet.byteArray.subarray(found.element.dataOffset, found.element.dataOffset + found.element.length);
+    },
   };
 }
 
-/** The tags of those attributes that have a value in this data set. */
-export function tagsWithValue(header: Header, names: readonly AttributeName[]): string[] {
-  return names.filter((name) => header.texts(name).length > 0 || header.numbers(name).length > 0).map((name) => allowList[name].tag);
+const isLong = ({ element }: Found): boolean => element.length > longestValue;
+
+function placesOf(dataSet: DataSet, groups: readonly DataSet[], { group }: Attribute): readonly DataSet[] {
+  if (group === undefined) return [dataSet];
+  const items = groups.map((item) => itemOf(item, group, 0)).filter((item) => item !== undefined);
+  return [...items, dataSet];
+}
+
+/** The first of these places where the attribute has a value. */
+function findIn(places: readonly DataSet[], { tag, vr }: Attribute): Found | undefined {
+  for (const dataSet of places) {
+    const element = dataSet.elements[tag];
+    if (element === undefined || element.length === 0 || element.items !== undefined) continue;
+    return { dataSet, element, vr: element.vr === undefined || element.vr === 'UN' ? vr : element.vr };
+  }
+  return undefined;
 }
 
 interface BinaryReader {

@@ -8,6 +8,7 @@ import type { ScanFacts } from '../../contract/facts';
 import type { Header } from '../header';
 import { absent, doubtful, fromHeader, quantity, workedOut, type Fact } from './fact';
 import { acquisitionMatrix } from './phase-encode';
+import { wordsFact } from './words';
 
 type PartialFourier = NonNullable<ScanFacts['partialFourier']['value']>;
 
@@ -15,11 +16,14 @@ type PartialFourier = NonNullable<ScanFacts['partialFourier']['value']>;
 const ratioTolerance = 0.05;
 
 export const phaseEncodingStepsFact = (header: Header): Fact<number> =>
-  quantity(header, 'phaseEncodingSteps', { from: 1, to: 65_536, unit: 'lines' });
+  quantity(header, ['phaseEncodingSteps', 'phaseEncodingStepsInPlane'], { from: 1, to: 65_536, unit: 'lines' });
 export const percentPhaseFieldOfViewFact = (header: Header): Fact<number> =>
   quantity(header, 'percentPhaseFieldOfView', { from: 1, to: 200, unit: '%' });
-export const accelerationFactorFact = (header: Header): Fact<number> =>
-  quantity(header, 'parallelReductionFactor', { from: 1, to: 64, unit: '' });
+
+export function accelerationFactorFact(header: Header): Fact<number> {
+  if (header.text('parallelAcquisition') === 'NO') return fromHeader(1);
+  return quantity(header, 'parallelReductionFactor', { from: 1, to: 64, unit: '' });
+}
 
 export function acquisitionTypeFact(header: Header): Fact<'2D' | '3D'> {
   const text = header.text('acquisitionType');
@@ -30,9 +34,11 @@ export function acquisitionTypeFact(header: Header): Fact<'2D' | '3D'> {
 /** π/4 of the samples of a 3D scan: corners of k-space left out in both phase directions, not a coarser resolution in one. */
 export function percentSamplingFact(header: Header): Fact<number> {
   const fact = quantity(header, 'percentSampling', { from: 1, to: 200, unit: '%' });
-  const elliptical = fact.value !== null && Math.abs(fact.value - 25 * Math.PI) < 0.05;
-  if (!elliptical || acquisitionTypeFact(header).value !== '3D') return fact;
-  return doubtful(fact.value, 'This is π/4: an elliptical coverage of k-space in 3D, not a reduced resolution along one axis.');
+  if (fact.value === null || acquisitionTypeFact(header).value !== '3D') return fact;
+  const named = header.text('coverageOfKspace') === 'ELLIPTICAL';
+  if (!named && Math.abs(fact.value - 25 * Math.PI) >= 0.05) return fact;
+  const why = named ? 'The header says that k-space was covered elliptically' : 'This is π/4: an elliptical coverage of k-space in 3D';
+  return doubtful(fact.value, `${why}, not a reduced resolution along one axis.`);
 }
 
 export function echoPlanarFact(header: Header): Fact<boolean> {
@@ -40,6 +46,17 @@ export function echoPlanarFact(header: Header): Fact<boolean> {
   const flag = header.text('echoPlanarPulseSequence');
   if (sequence.includes('EP') || flag === 'YES') return fromHeader(true);
   return sequence.length > 0 || flag === 'NO' ? fromHeader(false) : absent();
+}
+
+const echoes: Readonly<Record<string, readonly string[]>> = { SPIN: ['SE'], GRADIENT: ['GR'], BOTH: ['SE', 'GR'] };
+
+/** Enhanced files name the echo instead: in the words of the classic attribute, so that the same fact reads the same. */
+export function scanningSequenceFact(header: Header): Fact<string> {
+  const fact = wordsFact(header, 'scanningSequence');
+  const echo = echoes[header.text('echoPulseSequence') ?? ''];
+  if (fact.value !== null || echo === undefined) return fact;
+  const words = header.text('echoPlanarPulseSequence') === 'YES' ? [...echo, 'EP'] : echo;
+  return workedOut(words.join('\\'), 'From the pulse sequence attributes of an enhanced file.');
 }
 
 export function phaseOversamplingFact(header: Header): Fact<boolean> {
@@ -64,7 +81,22 @@ const partialFourierOf = (options: readonly string[]): PartialFourier => {
   return readout ? 'readout' : 'none';
 };
 
+const writtenDirections: Readonly<Record<string, PartialFourier>> = { PHASE: 'phase', FREQUENCY: 'readout', COMBINATION: 'both' };
+
+/** As enhanced files write it (PS3.3 C.8.13.5.7). */
+function writtenPartialFourier(written: string, direction: string | undefined): Fact<PartialFourier> {
+  if (written === 'NO') return fromHeader<PartialFourier>('none');
+  if (written === 'YES' && direction === 'SLICE_SELECT')
+    return fromHeader<PartialFourier>('none', 'Partial Fourier along the slices only.');
+  const value = written === 'YES' ? writtenDirections[direction ?? ''] : undefined;
+  return value === undefined
+    ? doubtful<PartialFourier>(null, 'The header says partial Fourier, and not along which axis.')
+    : fromHeader(value);
+}
+
 export function partialFourierFact(header: Header): Fact<PartialFourier> {
+  const written = header.text('partialFourier');
+  if (written !== undefined) return writtenPartialFourier(written, header.text('partialFourierDirection'));
   const options = header.texts('scanOptions');
   const value = partialFourierOf(options);
   if (value !== 'none') return fromHeader(value);

@@ -23,15 +23,22 @@ export interface Plausible {
   readonly unit: string;
 }
 
+/** The first value of the first of these attributes that has one: enhanced files have tags of their own for some facts. */
+const firstNumber = (header: Header, names: readonly AttributeName[]): number | undefined =>
+  names.map((name) => header.numbers(name)[0]).find((value) => value !== undefined);
+
+type Names = readonly [AttributeName, ...AttributeName[]];
+
 /** A number as it stands in the header, if it is one and within what is plausible. */
-export function quantity(header: Header, name: AttributeName, { from, to, unit }: Plausible): Fact<number> {
-  const first = header.numbers(name)[0];
+export function quantity(header: Header, names: AttributeName | Names, { from, to, unit }: Plausible): Fact<number> {
+  const first = firstNumber(header, typeof names === 'string' ? [names] : names);
   if (first === undefined) return absent();
   if (first >= from && first <= to) return fromHeader(first);
   return doubtful<number>(null, `The header’s value is not between ${from} and ${to} ${unit}`.trimEnd() + '.');
 }
 
 /** As `quantity`, for attributes into which scanners write 0 when they mean none. */
-export function quantityOrNone(header: Header, name: AttributeName, plausible: Plausible): Fact<number> {
-  return header.numbers(name)[0] === 0 ? absent('Written as 0, which stands for none.') : quantity(header, name, plausible);
+export function quantityOrNone(header: Header, names: AttributeName | Names, plausible: Plausible): Fact<number> {
+  const first = firstNumber(header, typeof names === 'string' ? [names] : names);
+  return first === 0 ? absent('Written as 0, which stands for none.') : quantity(header, names, plausible);
 }

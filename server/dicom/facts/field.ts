@@ -16,7 +16,7 @@ const nominalTolerance = 0.1;
 const roundingTolerance = 0.01;
 
 export function imagingFrequencyFact(header: Header): Fact<number> {
-  return quantity(header, 'imagingFrequency', { from: 0.05, to: 1000, unit: 'MHz' });
+  return quantity(header, ['imagingFrequency', 'transmitterFrequency'], { from: 0.05, to: 1000, unit: 'MHz' });
 }
 
 export function fieldStrengthFact(header: Header): Fact<number> {
@@ -43,7 +43,7 @@ function writtenStrength(header: Header): Fact<number> {
 
 /** Field strength in tesla from the proton frequency; undefined for another nucleus. */
 function impliedStrength(header: Header): number | undefined {
-  const nucleus = header.text('imagedNucleus') ?? '1H';
+  const nucleus = header.text('imagedNucleus') ?? header.text('resonantNucleus') ?? '1H';
   const frequency = imagingFrequencyFact(header).value;
   return frequency !== null && /^(1H|H1|H)$/.test(nucleus) ? frequency / protonMHzPerTesla : undefined;
 }

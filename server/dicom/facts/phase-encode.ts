@@ -6,7 +6,7 @@
  */
 import type { PhaseEncode } from '../../contract/facts';
 import type { Header } from '../header';
-import { absent, doubtful, fromHeader, workedOut, type Fact } from './fact';
+import { absent, doubtful, fromHeader, quantity, workedOut, type Fact } from './fact';
 
 interface AcquisitionMatrix {
   readonly phaseEncode: PhaseEncode;
@@ -51,9 +51,15 @@ export function phaseEncodeFact(header: Header): Fact<PhaseEncode> {
   return doubtful<PhaseEncode>(null, `${said}: say which axis it is. An image that was rotated after the scan can do this.`);
 }
 
+/** Enhanced files count steps instead of holding a matrix (PS3.3 C.8.13.5.3). */
+const acquiredSteps = (header: Header): { acquiredReadout: Fact<number>; acquiredPhase: Fact<number> } => ({
+  acquiredReadout: quantity(header, 'readoutSteps', { from: 1, to: largestMatrix, unit: 'samples' }),
+  acquiredPhase: quantity(header, 'phaseEncodingStepsInPlane', { from: 1, to: largestMatrix, unit: 'lines' }),
+});
+
 export function acquiredFacts(header: Header): { acquiredReadout: Fact<number>; acquiredPhase: Fact<number> } {
   const matrix = acquisitionMatrix(header);
-  if (matrix === undefined) return { acquiredReadout: absent(), acquiredPhase: absent() };
+  if (matrix === undefined) return acquiredSteps(header);
   if (matrix !== null) return { acquiredReadout: fromHeader(matrix.readout), acquiredPhase: fromHeader(matrix.phase) };
   const nValues = header.numbers('acquisitionMatrix').length;
   const why = nValues === 4 ? 'is not two counts and two zeros' : `has ${nValues} values instead of 4`;

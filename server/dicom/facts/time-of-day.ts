@@ -7,7 +7,12 @@ import type { Header } from '../header';
 import { absent, doubtful, workedOut, type Fact } from './fact';
 
 /** The first of these that has a value counts. */
-const timeNames = ['acquisitionTime', 'acquisitionDateTime', 'contentTime'] as const satisfies readonly AttributeName[];
+const timeNames = [
+  'frameAcquisitionDateTime',
+  'acquisitionTime',
+  'acquisitionDateTime',
+  'contentTime',
+] as const satisfies readonly AttributeName[];
 
 const time = /^([01]\d|2[0-3]):?([0-5]\d):?([0-5]\d|60)?(\.\d{1,6})?$/;
 const dateAndTime = /^\d{8}(\d{4,6}(?:\.\d{1,6})?)(?:[+-]\d{4})?$/;
@@ -20,7 +25,7 @@ export function timeOfDayFact(header: Header): Fact<string> {
   const name = timeSource(header);
   if (name === undefined) return absent();
   const text = header.text(name) ?? '';
-  const clock = name === 'acquisitionDateTime' ? dateAndTime.exec(text)?.[1] : text;
+  const clock = name.endsWith('DateTime') ? dateAndTime.exec(text)?.[1] : text;
   const match = time.exec(clock ?? '');
   if (match === null) return doubtful<string>(null, 'The time in the header is none.');
   return workedOut(`${match[1]}:${match[2]}:${match[3] ?? '00'}`, 'Time of day only; the date was not read.');

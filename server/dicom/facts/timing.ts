@@ -1,6 +1,7 @@
 /**
  * Times, angles and counts of the pulse sequence. Ranges are what a scanner can do (common practice); a value outside is not
- * repeated. Source of the attributes and their units: DICOM PS3.3 C.8.3.1.
+ * repeated. Source of the attributes and their units: DICOM PS3.3 C.8.3.1, and C.8.13.5 for
+ * those of enhanced files.
  */
 import type { Header } from '../header';
 import { doubtful, quantity, quantityOrNone, type Fact } from './fact';
@@ -8,9 +9,10 @@ import { echoPlanarFact } from './encoding';
 
 export const repetitionTimeFact = (header: Header): Fact<number> =>
   quantity(header, 'repetitionTime', { from: 0.5, to: 60_000, unit: 'ms' });
-export const echoTimeFact = (header: Header): Fact<number> => quantity(header, 'echoTime', { from: 0.005, to: 5_000, unit: 'ms' });
+export const echoTimeFact = (header: Header): Fact<number> =>
+  quantity(header, ['echoTime', 'effectiveEchoTime'], { from: 0.005, to: 5_000, unit: 'ms' });
 export const inversionTimeFact = (header: Header): Fact<number> =>
-  quantityOrNone(header, 'inversionTime', { from: 0.5, to: 20_000, unit: 'ms' });
+  quantityOrNone(header, ['inversionTime', 'inversionTimes'], { from: 0.5, to: 20_000, unit: 'ms' });
 export const flipAngleFact = (header: Header): Fact<number> => quantityOrNone(header, 'flipAngle', { from: 0.1, to: 360, unit: 'degrees' });
 export const averagesFact = (header: Header): Fact<number> => quantity(header, 'averages', { from: 0.1, to: 256, unit: '' });
 export const heartRateFact = (header: Header): Fact<number> =>
