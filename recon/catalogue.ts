@@ -2,8 +2,8 @@
 import type { Acquisition } from './acquisition';
 import type { Cause, Driver, Reconstruction, Remedy, Sighting, Source } from './cause';
 import { initialOf } from './initial';
-import type { Parameter, Parameters } from './parameter';
-import { strengthOf, swatchPhantom } from './swatch';
+import type { Parameter, Parameters, Quantity } from './parameter';
+import { movedBy, swatchPhantom, swatchRecipe } from './swatch';
 
 export type DescribedParameter =
   | {
@@ -20,26 +20,39 @@ export type DescribedParameter =
     }
   | { id: string; label: string; options: { value: string; label: string }[]; initial: string; when?: Record<string, string[]> };
 
-export interface DescribedReconstruction {
+/** A quantity that a swatch moves with its strength. */
+type MovedQuantity = Pick<Quantity, 'label' | 'unit' | 'min' | 'max' | 'step'> & { mild: number; strong: number };
+
+/** What is said of causes and reconstructions alike. */
+export interface DescribedEntry {
   id: string;
   title: string;
-  parameters: DescribedParameter[];
-  looks: { image: string; kspace: string };
-  sources: Source[];
-}
-
-export interface DescribedCause extends DescribedReconstruction {
-  stage: Cause['stage'];
   seen: Sighting[];
   runsAlong: Cause['runsAlong'];
   formula: string;
   drivers: Driver[];
+  parameters: DescribedParameter[];
+  looks: { image: string; kspace: string };
   needsObjectPhase: boolean;
   /** What the swatch is of. */
   phantom: { title: string; fieldOfViewMm: number };
-  strength: Record<string, [mild: number, strong: number]>;
+  strength: MovedQuantity[];
   remedies: Remedy[];
+  sources: Source[];
 }
+
+export interface DescribedCause extends DescribedEntry {
+  stage: Cause['stage'];
+}
+
+export interface DescribedReconstruction extends DescribedEntry {
+  stage: 'reconstruction';
+  /** The steps on which its swatch is shown. */
+  shownOn: { cause: string; parameters: Record<string, number | string> }[];
+}
+
+/** How strong the steps are with which the bench shows a reconstruction: at the middle of the swatch's slider. */
+const shownStrength = 0.5;
 
 const describeWhen = ({ when }: Parameter) =>
   when ? { when: Object.fromEntries(Object.entries(when).map(([id, values]) => [id, [...values]])) } : {};
@@ -58,38 +71,37 @@ function describeParameter(id: string, parameter: Parameter, acquisition?: Acqui
 const describeParameters = (parameters: Parameters, acquisition?: Acquisition): DescribedParameter[] =>
   Object.entries(parameters).map(([id, parameter]) => describeParameter(id, parameter, acquisition));
 
-function describePhantom(cause: Cause): DescribedCause['phantom'] {
-  const { title, fieldOfView } = swatchPhantom(cause);
+function describePhantom(entry: Cause | Reconstruction): DescribedEntry['phantom'] {
+  const { title, fieldOfView } = swatchPhantom(entry);
   return { title, fieldOfViewMm: Math.round(1000 * fieldOfView) };
 }
 
-/** A cause; with `acquisition`, initial values come from the scan facts where they say one. */
-export const describeCause = (cause: Cause, acquisition?: Acquisition): DescribedCause => ({
-  id: cause.id,
-  title: cause.title,
-  stage: cause.stage,
-  seen: [...cause.seen],
-  runsAlong: cause.runsAlong,
-  formula: cause.formula,
-  drivers: cause.drivers.map((driver) => ({ ...driver })),
-  parameters: describeParameters(cause.parameters, acquisition),
-  looks: { ...cause.looks },
-  needsObjectPhase: cause.needsObjectPhase === true,
-  phantom: describePhantom(cause),
-  strength: Object.fromEntries(
-    Object.entries(strengthOf(cause))
-      .filter(([, [mild, strong]]) => mild !== strong)
-      .map(([id, [mild, strong]]) => [id, [mild, strong]]),
-  ),
-  remedies: cause.remedies.map((remedy) => ({ ...remedy })),
-  sources: cause.sources.map((source) => ({ ...source })),
+/** With `acquisition`, initial values come from the scan facts where they say one. */
+const describeEntry = (entry: Cause | Reconstruction, acquisition?: Acquisition): DescribedEntry => ({
+  id: entry.id,
+  title: entry.title,
+  seen: [...entry.seen],
+  runsAlong: entry.runsAlong,
+  formula: entry.formula,
+  drivers: entry.drivers.map((driver) => ({ ...driver })),
+  parameters: describeParameters(entry.parameters, acquisition),
+  looks: { ...entry.looks },
+  needsObjectPhase: entry.needsObjectPhase === true,
+  phantom: describePhantom(entry),
+  strength: movedBy(entry).map(({ quantity: { label, unit, min, max, step }, ends: [mild, strong] }) => ({
+    ...{ label, unit, min, max, step, mild, strong },
+  })),
+  remedies: entry.remedies.map((remedy) => ({ ...remedy })),
+  sources: entry.sources.map((source) => ({ ...source })),
 });
 
-/** A reconstruction, in the same way. */
+export const describeCause = (cause: Cause, acquisition?: Acquisition): DescribedCause => ({
+  ...describeEntry(cause, acquisition),
+  stage: cause.stage,
+});
+
 export const describeReconstruction = (method: Reconstruction, acquisition?: Acquisition): DescribedReconstruction => ({
-  id: method.id,
-  title: method.title,
-  parameters: describeParameters(method.parameters, acquisition),
-  looks: { ...method.looks },
-  sources: method.sources.map((source) => ({ ...source })),
+  ...describeEntry(method, acquisition),
+  stage: 'reconstruction',
+  shownOn: swatchRecipe(method, shownStrength).steps.map(({ cause, parameters }) => ({ cause, parameters: { ...parameters } })),
 });

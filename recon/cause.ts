@@ -51,15 +51,6 @@ export interface Encoded extends ComplexPlane {
   readonly taken: Uint8Array;
 }
 
-interface Described<P extends Parameters> {
-  readonly id: string;
-  readonly title: string;
-  readonly parameters: P;
-  /** One plain sentence each; where k-space does not show the cause, `kspace` says so. */
-  readonly looks: { readonly image: string; readonly kspace: string };
-  readonly sources: readonly Source[];
-}
-
 /** What a user sees; the words of a report. */
 export type Sighting = 'ghosts' | 'fold-in' | 'lines' | 'shading' | 'distortion' | 'blur' | 'noise' | 'signal-loss' | 'other';
 
@@ -69,26 +60,39 @@ export interface Driver {
   readonly does: string;
 }
 
-interface CauseBase<P extends Parameters> extends Described<P> {
-  /** Where in the signal chain the cause belongs, as a user reads it. */
-  readonly stage: 'object' | 'encoding' | 'receive';
+/** The values of a quantity at which a swatch is mild and strong. */
+export type Ends = readonly [mild: number, strong: number];
+
+/** What the catalogue says of a cause and of a reconstruction alike. */
+interface Described<P extends Parameters> {
+  readonly id: string;
+  readonly title: string;
   readonly seen: readonly Sighting[];
   readonly runsAlong: 'phase-encode' | 'readout' | 'both' | 'none';
   /** The model, in TeX. */
   readonly formula: string;
   readonly drivers: readonly Driver[];
+  readonly parameters: P;
+  /** One plain sentence each; where k-space does not show it, `kspace` says so. */
+  readonly looks: { readonly image: string; readonly kspace: string };
   readonly remedies: readonly Remedy[];
-  /** The bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
+  readonly sources: readonly Source[];
+  /** The bench starts it with a synthetic object phase: without one the model looks better than it is. */
   readonly needsObjectPhase?: boolean;
-  /** The result may have another number of lines. Left out: the shape stays. */
+  /** The result may have another matrix. Left out: the shape stays. */
   readonly changesMatrix?: boolean;
-  /** Parameter values at which the cause does nothing, where there are such. */
+  /** Parameter values at which a cause does nothing, and a reconstruction restores an object of which all samples were taken. */
   readonly identity?: ValuesOf<P>;
   /** The phantom on which the swatch shows it best. Left out: the head. */
   readonly phantom?: PhantomId;
   /** Quantities that the swatch moves, each [mild, strong], where the line from identity through the initial value does not suit. Two equal
    *  ends hold a quantity at another value than its initial one. */
-  readonly strength?: { readonly [K in keyof P]?: readonly [mild: number, strong: number] };
+  readonly strength?: { readonly [K in keyof P]?: Ends };
+}
+
+interface CauseBase<P extends Parameters> extends Described<P> {
+  /** Where in the signal chain the cause belongs, as a user reads it. */
+  readonly stage: 'object' | 'encoding' | 'receive';
 }
 
 /** Acts on the complex image before it is encoded, [row, column]. */
@@ -105,12 +109,22 @@ export interface KspaceCause<P extends Parameters = Parameters> extends CauseBas
 
 export type Cause<P extends Parameters = Parameters> = ImageCause<P> | KspaceCause<P>;
 
-/** Reconstruction: k-space as acquired to a complex image. */
+/** A step of which a reconstruction has to make an image; quantities that its swatch moves, each [mild, strong]. */
+export interface ShownStep {
+  readonly cause: Cause;
+  readonly strength?: Readonly<Record<string, Ends>>;
+}
+
+/** Reconstruction: k-space as acquired to a complex image. It is the last stage of the signal chain. */
 export interface Reconstruction<P extends Parameters = Parameters> extends Described<P> {
-  /** The image may have more pixels than there are samples. Left out: the shape stays. */
-  readonly changesMatrix?: boolean;
-  /** Parameter values at which it restores an object of which all samples were taken. Left out: at all values. */
-  readonly identity?: ValuesOf<P>;
+  /** What its swatch is made of; the bench starts it with the same steps. */
+  readonly shownOn: {
+    readonly steps: readonly ShownStep[];
+    /** Values of the method itself that differ from the initial ones. */
+    readonly parameters?: { readonly [K in keyof P]?: ValuesOf<P>[K] };
+    /** Samples of the phantom along a side, as a part of the pixels of the picture. Left out: as many. */
+    readonly samples?: number;
+  };
   reconstruct(kspace: Encoded, parameters: ValuesOf<P>, context: Context): ComplexPlane;
 }
 

@@ -9,6 +9,8 @@ import { reconstructions } from './reconstructions/index';
 
 export const causeOf = (id: string): Cause | undefined => causes.find((cause) => cause.id === id);
 export const reconstructionOf = (id: string): Reconstruction | undefined => reconstructions.find((method) => method.id === id);
+/** What the catalogue has under this name. */
+export const entryOf = (id: string): Cause | Reconstruction | undefined => causeOf(id) ?? reconstructionOf(id);
 
 const listed = (ids: readonly string[]): string => ids.join(', ');
 

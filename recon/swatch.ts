@@ -1,14 +1,15 @@
 /**
- * The swatch of a cause: its own model on the phantom that shows it best, from mild to strong. Strength s runs from 0 to 1. One rule for every cause:
+ * The swatch of a cause or a reconstruction: its own model on the phantom that shows it best, from mild to strong. Strength s runs from 0 to 1. One rule for every cause:
  * each quantity q goes along the line from its identity value (no effect) through its initial value, q(s) = identity + f·(initial −
  * identity), f from 1/4 at s = 0 to 5/2 at s = 1, kept within its range and on its step. A quantity that starts at its identity stays
- * there. A cause without an identity, or one that this line does not suit, states its two ends in `strength`.
+ * there. A cause without an identity, or one that this line does not suit, states its two ends in `strength`. A reconstruction is shown on
+ * the steps that it names, whose quantities may be moved as well.
  */
 import type { Acquisition } from './acquisition';
-import type { Cause } from './cause';
+import type { Cause, Ends, Reconstruction } from './cause';
 import type { Plane } from './grid';
 import { onStep } from './initial';
-import type { Quantity } from './parameter';
+import type { Parameters, Quantity } from './parameter';
 import { phantomOf } from './phantoms';
 import { phantomGrid, phantomImage, type Phantom, type Scan } from './phantoms/phantom';
 import type { ParameterValues, Recipe } from './recipe';
@@ -29,7 +30,10 @@ export const swatchAcquisition: Acquisition = {
 };
 
 /** The phantom of the swatch of a cause. */
-export const swatchPhantom = ({ phantom = 'head' }: Pick<Cause, 'phantom'>): Phantom => phantomOf(phantom);
+export const swatchPhantom = ({ phantom = 'head' }: Pick<Entry, 'phantom'>): Phantom => phantomOf(phantom);
+
+/** Samples of the phantom along a side, as a part of the pixels of the picture. */
+export const swatchSamples = (entry: Entry): number => ('shownOn' in entry ? (entry.shownOn.samples ?? 1) : 1);
 
 /** The phantom as the swatches scan it, on `side` × `side` pixels of its own field of view; the brightest is 1. */
 export function swatchObject(phantom: Phantom, side: number): Plane {
@@ -47,9 +51,6 @@ const seed = 7;
 /** Total range of the object phase, radians, of causes that need one: as the bench starts with. */
 const objectPhaseRange = 1.6;
 
-/** The values of a quantity at both ends. */
-export type Ends = readonly [mild: number, strong: number];
-
 function endsOf(quantity: Quantity, identity: number): Ends {
   const way = quantity.initial - identity;
   const [mild, strong] = [mildPart, strongPart].map((part) => onStep(identity + part * way, quantity)) as [number, number];
@@ -57,8 +58,11 @@ function endsOf(quantity: Quantity, identity: number): Ends {
   return [mild === identity ? onStep(identity + Math.sign(way) * quantity.step, quantity) : mild, strong];
 }
 
-/** The quantities that strength moves, with their ends; the others stay at their initial values. */
-export function strengthOf({ parameters, identity, strength }: Cause): Record<string, Ends> {
+/** A cause or a reconstruction. */
+type Entry = Cause | Reconstruction;
+
+/** The quantities that strength moves or holds, with their ends; the others stay at their initial values. */
+function strengthOf({ parameters, identity, strength }: Pick<Entry, 'parameters' | 'identity' | 'strength'>): Record<string, Ends> {
   const moved: Record<string, Ends> = {};
   for (const [id, parameter] of Object.entries(parameters)) {
     if (parameter.kind === 'choice') continue;
@@ -70,22 +74,63 @@ export function strengthOf({ parameters, identity, strength }: Cause): Record<st
   return moved;
 }
 
-/** Every parameter of the cause at `strength`, 0 to 1. */
-export function valuesAt(cause: Cause, strength: number): ParameterValues {
-  const moved = strengthOf(cause);
+/** Every parameter at `strength`, 0 to 1. */
+function valuesAt(parameters: Parameters, ends: Readonly<Record<string, Ends>>, strength: number): ParameterValues {
   return Object.fromEntries(
-    Object.entries(cause.parameters).map(([id, parameter]) => {
-      const ends = moved[id];
-      if (parameter.kind === 'choice' || !ends) return [id, parameter.initial];
-      return [id, onStep(ends[0] + strength * (ends[1] - ends[0]), parameter)];
+    Object.entries(parameters).map(([id, parameter]) => {
+      const [mild, strong] = ends[id] ?? [];
+      if (parameter.kind === 'choice' || mild === undefined || strong === undefined) return [id, parameter.initial];
+      return [id, onStep(mild + strength * (strong - mild), parameter)];
+    }),
+  );
+}
+
+/** A part of a swatch, a step or the reconstruction, with the values that it holds and the ends of those that strength moves. */
+interface Part {
+  readonly id: string;
+  readonly parameters: Parameters;
+  readonly held: ParameterValues;
+  readonly ends: Readonly<Record<string, Ends>>;
+}
+
+/** What a swatch is made of: a cause stands alone and is zero-filled, a reconstruction acts on the steps that show it. */
+function partsOf(entry: Entry): { steps: Part[]; reconstruction: Part } {
+  if ('apply' in entry) {
+    return {
+      steps: [{ ...entry, held: {}, ends: strengthOf(entry) }],
+      reconstruction: { id: 'zero-filled', parameters: {}, held: {}, ends: {} },
+    };
+  }
+  const { steps, parameters = {} } = entry.shownOn;
+  return {
+    steps: steps.map(({ cause, strength = {} }) => ({ ...cause, held: {}, ends: strength })),
+    reconstruction: { ...entry, held: parameters as ParameterValues, ends: strengthOf(entry) },
+  };
+}
+
+const recipePart = ({ parameters, held, ends }: Part, strength: number): ParameterValues => ({
+  ...valuesAt(parameters, ends, strength),
+  ...held,
+});
+
+/** The quantities that strength moves, each with both ends. */
+export function movedBy(entry: Entry): { quantity: Quantity; ends: Ends }[] {
+  const { steps, reconstruction } = partsOf(entry);
+  return [...steps, reconstruction].flatMap(({ parameters, ends }) =>
+    Object.entries(ends).flatMap(([id, [mild, strong]]) => {
+      const quantity = parameters[id];
+      return quantity?.kind === 'quantity' && mild !== strong ? [{ quantity, ends: [mild, strong] as const }] : [];
     }),
   );
 }
 
 /** The recipe of the swatch at `strength`, 0 to 1. */
-export const swatchRecipe = (cause: Cause, strength: number): Recipe => ({
-  steps: [{ cause: cause.id, parameters: valuesAt(cause, strength) }],
-  reconstruction: { method: 'zero-filled', parameters: {} },
-  ...(cause.needsObjectPhase ? { objectPhase: { range: objectPhaseRange, seed } } : {}),
-  seed,
-});
+export function swatchRecipe(entry: Entry, strength: number): Recipe {
+  const { steps, reconstruction } = partsOf(entry);
+  return {
+    steps: steps.map((step) => ({ cause: step.id, parameters: recipePart(step, strength) })),
+    reconstruction: { method: reconstruction.id, parameters: recipePart(reconstruction, strength) },
+    ...(entry.needsObjectPhase ? { objectPhase: { range: objectPhaseRange, seed } } : {}),
+    seed,
+  };
+}

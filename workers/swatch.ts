@@ -1,15 +1,18 @@
 /**
- * The picture of a cause in the catalogue: its model runs on the phantom that shows it best, and the result is drawn into a square as large as the
+ * The picture of a cause or a reconstruction in the catalogue: its model runs on the phantom that shows it best, and the result is drawn into a square as large as the
  * phantom's field of view, or as the part of k-space that a clean scan covers. No strip is burned in: the sample book draws the stitched
  * edge beside each, and says of all of them that they are simulated.
  */
 import { encode } from 'fast-png';
+import type { Encoded, Reconstruction } from '../recon/cause';
+import { transform } from '../recon/fourier';
 import { asComplex, type ComplexPlane, type Grid } from '../recon/grid';
 import { phantomGrid, type Phantom } from '../recon/phantoms/phantom';
-import { causeOf } from '../recon/recipe-check';
+import { entryOf } from '../recon/recipe-check';
 import { randomOf } from '../recon/random';
 import { prepare, simulate, type PreparedObject } from '../recon/simulate';
-import { swatchAcquisition, swatchObject, swatchPhantom, swatchRecipe } from '../recon/swatch';
+import type { Recipe } from '../recon/recipe';
+import { swatchAcquisition, swatchObject, swatchPhantom, swatchRecipe, swatchSamples } from '../recon/swatch';
 import { kspaceWindow, logMagnitude } from './encode-planes';
 import type { SwatchJob, ThumbnailResult } from './job';
 
@@ -37,17 +40,25 @@ export function drawSwatch(job: SwatchJob): ThumbnailResult {
 }
 
 function encodeSwatch({ causeId, strength, domain, side }: SwatchJob): Uint8Array {
-  const cause = causeOf(causeId);
-  if (cause === undefined) throw new RangeError(`causeId must be in the catalogue, got ${causeId}`);
-  const recipe = swatchRecipe(cause, strength);
-  const phantom = swatchPhantom(cause);
-  const { image, kspace } = simulate(objectOf(phantom, side, recipe.objectPhase), recipe, swatchAcquisition);
+  const entry = entryOf(causeId);
+  if (entry === undefined) throw new RangeError(`causeId must be in the catalogue, got ${causeId}`);
+  const recipe = swatchRecipe(entry, strength);
+  const phantom = swatchPhantom(entry);
+  const scanned = objectOf(phantom, side * swatchSamples(entry), recipe.objectPhase);
+  const { image, kspace: acquired } = simulate(scanned, recipe, swatchAcquisition);
+  const kspace = 'reconstruct' in entry ? asReconstructed(entry, acquired, recipe) : acquired;
   const drawn = {
     image: () => draw({ values: image.values, grid: image, window: imageWindow }, phantomGrid(phantom, side), side),
     kspace: () => draw({ values: logMagnitude(kspace), grid: kspace, window: kspaceWindow }, objectOf(phantom, side).kspace(), side),
   };
   const data = domain === 'half' ? halves(drawn.image(), drawn.kspace(), side) : drawn[domain]();
   return encode({ width: side, height: side, data, channels: 1, depth: 8 });
+}
+
+/** What a reconstruction made of the samples: the k-space of its image, before the magnitude is taken. */
+function asReconstructed(method: Reconstruction, kspace: Encoded, { reconstruction, seed }: Recipe): ComplexPlane {
+  const context = { acquisition: swatchAcquisition, random: randomOf(seed, method.id) };
+  return transform(method.reconstruct(kspace, reconstruction.parameters, context));
 }
 
 function objectOf(phantom: Phantom, side: number, phase?: PreparedObject['phase']): PreparedObject {

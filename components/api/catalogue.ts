@@ -1,5 +1,6 @@
 /** The catalogue: causes (with values from an image's scan facts when one is named), reconstructions, corrections. */
 import { useQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
 import { listCauses, listCorrections, listReconstructions, readSwatch } from '@/server/contract/catalogue';
 import { addressOf, call, type CallInput } from './call';
 
@@ -18,6 +19,15 @@ export const useReconstructions = () =>
 export const useCorrections = () =>
   useQuery({ queryKey: ['corrections'], queryFn: ({ signal }) => call(listCorrections, {}, signal), staleTime: Infinity });
 
-/** Address of the swatch of a cause. */
+/** All that has a page in the catalogue, in the order of the signal chain: the causes, then the reconstructions. */
+export function useCatalogue() {
+  const causes = useCauses();
+  const methods = useReconstructions();
+  const data = useMemo(() => (causes.data && methods.data ? [...causes.data, ...methods.data] : undefined), [causes.data, methods.data]);
+  const refetch = () => Promise.all([causes.refetch(), methods.refetch()]);
+  return { data, error: causes.error ?? methods.error, refetch };
+}
+
+/** Address of the swatch of a cause or a reconstruction. */
 export const swatchOf = (causeId: string, query: NonNullable<CallInput<typeof readSwatch>['query']>): string =>
   addressOf(readSwatch.path, { causeId }, query);

@@ -8,7 +8,7 @@ import type { PlaneGrid } from '@/components/image/display-plane';
 import type { Domain } from '@/components/image/edge-scale';
 import type { ShownOf } from '@/components/image/layers';
 import type { Case } from '@/server/contract/cases';
-import type { Cause, Method } from '@/server/contract/catalogue';
+import type { Cause, Reconstruction } from '@/server/contract/catalogue';
 import type { PhaseEncode } from '@/server/contract/facts';
 import type { Image } from '@/server/contract/images';
 import type { BenchView } from './bench-view';
@@ -22,7 +22,7 @@ export interface CaseOnBench {
   readonly source: Image;
   readonly runsOn: 'comparison' | 'bad';
   readonly causes: readonly Cause[];
-  readonly methods: readonly Method[];
+  readonly methods: readonly Reconstruction[];
   readonly phaseEncode: PhaseEncode | null;
   readonly frame: PlaneGrid;
 }

@@ -16,7 +16,7 @@ import { startRecipe } from './recipe-start';
 interface BenchProps {
   caseId: string;
   trialId?: string | undefined;
-  /** A cause to start with; a trial that is opened has its own. */
+  /** A cause or a reconstruction to start with; a trial that is opened has its own. */
   add?: string | undefined;
 }
 

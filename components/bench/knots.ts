@@ -1,5 +1,5 @@
 /** The knots of the recipe in physical order: the object first, then each step, the reconstruction last. */
-import type { Cause, Method } from '@/server/contract/catalogue';
+import type { Cause, Reconstruction } from '@/server/contract/catalogue';
 import type { Recipe } from '@/server/contract/recipe';
 import { fixed } from '@/components/ui/number-text';
 import type { Knot } from './bench-view';
@@ -15,7 +15,7 @@ export interface RecipeKnot {
 
 interface Catalogue {
   readonly causes: readonly Cause[];
-  readonly methods: readonly Method[];
+  readonly methods: readonly Pick<Reconstruction, 'id' | 'title'>[];
 }
 
 export function knotsOf(recipe: Recipe, { causes, methods }: Catalogue, runsOn: 'comparison' | 'bad'): RecipeKnot[] {

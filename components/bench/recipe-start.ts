@@ -1,17 +1,22 @@
-/** The recipe that the bench starts with: nothing done yet, or one cause of the catalogue where the address names it. */
-import type { Cause, Method } from '@/server/contract/catalogue';
+/** The recipe that the bench starts with: nothing done yet, or what the address names of the catalogue, a cause or a reconstruction. */
+import type { Cause, Reconstruction } from '@/server/contract/catalogue';
 import type { Recipe } from '@/server/contract/recipe';
 import { initialValues, usualObjectPhase } from './recipe-order';
 
 const firstSeed = 1;
 
-/** The first reconstruction of the catalogue; the cause `add` as the only step, with an object phase where it needs one. */
-export function startRecipe([method]: readonly Method[], causes: readonly Cause[], add: string | undefined): Recipe {
+/**
+ * The cause `add` as the only step and the first reconstruction of the catalogue; or the reconstruction `add` with the steps that show
+ * it. With an object phase where it needs one.
+ */
+export function startRecipe(methods: readonly Reconstruction[], causes: readonly Cause[], add: string | undefined): Recipe {
   const cause = causes.find(({ id }) => id === add);
+  const named = methods.find(({ id }) => id === add);
+  const method = named ?? methods[0];
   return {
-    steps: cause ? [{ cause: cause.id, parameters: initialValues(cause.parameters) }] : [],
+    steps: cause ? [{ cause: cause.id, parameters: initialValues(cause.parameters) }] : [...(named?.shownOn ?? [])],
     reconstruction: { method: method?.id ?? 'zero-filled', parameters: method ? initialValues(method.parameters) : {} },
-    ...(cause?.needsObjectPhase ? { objectPhase: { range: usualObjectPhase, seed: firstSeed } } : {}),
+    ...((cause ?? named)?.needsObjectPhase ? { objectPhase: { range: usualObjectPhase, seed: firstSeed } } : {}),
     seed: firstSeed,
   };
 }

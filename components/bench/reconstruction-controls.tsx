@@ -41,7 +41,7 @@ export function ReconstructionControls({ columns }: { columns: 1 | 3 }) {
           {method.looks.image}
         </Text>
       ) : null}
-      {chosen === 'homodyne' ? <PhaseCaution /> : null}
+      {method?.needsObjectPhase ? <PhaseCaution /> : null}
     </View>
   );
 }

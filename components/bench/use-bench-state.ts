@@ -4,7 +4,7 @@ import { ApiProblem } from '@/components/api/api-problem';
 import { usePixels, useSimulation } from '@/components/api/simulations';
 import { centredGrid } from '@/components/image/display-plane';
 import type { Case } from '@/server/contract/cases';
-import type { Cause, Method } from '@/server/contract/catalogue';
+import type { Cause, Reconstruction } from '@/server/contract/catalogue';
 import type { Image } from '@/server/contract/images';
 import type { Recipe } from '@/server/contract/recipe';
 import type { SimulationRequest } from '@/server/contract/simulations';
@@ -21,7 +21,7 @@ export interface OnTheBench {
   readonly bad: Image;
   readonly source: Image;
   readonly causes: readonly Cause[];
-  readonly methods: readonly Method[];
+  readonly methods: readonly Reconstruction[];
   readonly recipe: Recipe;
 }
 

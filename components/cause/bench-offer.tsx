@@ -1,4 +1,4 @@
-/** The bench works on a case: the open ones that have an image, youngest first, each opening with this cause as a step. */
+/** The bench works on a case: the open ones that have an image, youngest first, each opening with this cause or reconstruction. */
 import { useCases } from '@/components/api/cases';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
@@ -6,12 +6,12 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { LinkText } from '@/components/ui/link-text';
 import { LoadingWarp } from '@/components/ui/loading-warp';
 import { ProblemNotice } from '@/components/ui/problem-notice';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { stateWords } from '../case/words';
 import { CaseLines } from './case-lines';
 
 interface BenchOfferProps {
-  cause: Pick<Cause, 'id' | 'title'>;
+  cause: Pick<CatalogueEntry, 'id' | 'title' | 'stage'>;
   onClose: () => void;
 }
 
@@ -21,7 +21,7 @@ export function BenchOffer({ cause, onClose }: BenchOfferProps) {
   return (
     <Dialog
       title={`${cause.title} on the bench`}
-      text="On which case? It opens with this cause as a step, its values from the header where it says them."
+      text={`On which case? It opens with ${cause.stage === 'reconstruction' ? 'this reconstruction and a step that shows it' : 'this cause as a step, its values from the header where it says them'}.`}
       onClose={onClose}
       actions={<Button label="stay here" onPress={onClose} />}
     >

@@ -1,5 +1,5 @@
 /** Where swatches stand: how many beside each other in each column of a wide book, and how large they are in the list of a phone. */
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { alongs, type Along } from './cause-words';
 
 /** The mat around a picture, and the two stitched lines of the selvedge beside it, pixels. */
@@ -34,7 +34,7 @@ export function pictureWidth(room: number): number {
 }
 
 /** Titles in one sentence: small letters after the first, but not in an abbreviation. */
-export const nameLine = (causes: readonly Pick<Cause, 'title'>[]): string =>
+export const nameLine = (causes: readonly Pick<CatalogueEntry, 'title'>[]): string =>
   causes
     .map(({ title }, index) => (index === 0 || !/^.[a-z]/.test(title) ? title : title.charAt(0).toLowerCase() + title.slice(1)))
     .join(', ');

@@ -2,7 +2,7 @@
  * What the sample book shows, as it stands in the address: words, what is seen, the direction, who can act. Filtering picks, it never
  * sorts. An address that was typed wrong falls back to what it can still say.
  */
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { sightings, type Sighting } from '@/server/contract/sighting';
 import { sightingWords } from '../case/words';
 import { actors, alongs, alongWords, type Actor, type Along } from './cause-words';
@@ -42,7 +42,7 @@ export const paramsOf = ({ q, seen, along, who }: CatalogueFilters): Record<stri
 export const isNarrowed = ({ q, seen, along, who }: CatalogueFilters): boolean => Boolean(q || seen || along || who);
 
 /** Everything that is written about a cause. */
-const writtenOf = ({ title, stage, seen, runsAlong, looks, drivers, remedies, parameters, sources }: Cause): string =>
+const writtenOf = ({ title, stage, seen, runsAlong, looks, drivers, remedies, parameters, sources }: CatalogueEntry): string =>
   [
     title,
     stageWords[stage],
@@ -59,7 +59,7 @@ const writtenOf = ({ title, stage, seen, runsAlong, looks, drivers, remedies, pa
     .toLowerCase();
 
 /** Whether every word occurs somewhere in what is written: parts of words count, so that a search works while it is being typed. */
-const says = (cause: Cause, q: string): boolean => {
+const says = (cause: CatalogueEntry, q: string): boolean => {
   const written = writtenOf(cause);
   return q
     .toLowerCase()
@@ -67,14 +67,14 @@ const says = (cause: Cause, q: string): boolean => {
     .every((word) => written.includes(word));
 };
 
-export const fits = (cause: Cause, { q, seen, along, who }: CatalogueFilters): boolean =>
+export const fits = (cause: CatalogueEntry, { q, seen, along, who }: CatalogueFilters): boolean =>
   (seen === '' || cause.seen.includes(seen)) &&
   (along === '' || cause.runsAlong === along) &&
   (who === '' || cause.remedies.some((remedy) => remedy.who === who)) &&
   says(cause, q);
 
 /** How many causes show each thing under the other filters; things that no cause of the catalogue shows are left out. */
-export function seenCounts(causes: readonly Cause[], filters: CatalogueFilters): { seen: Sighting | ''; count: number }[] {
+export function seenCounts(causes: readonly CatalogueEntry[], filters: CatalogueFilters): { seen: Sighting | ''; count: number }[] {
   const countOf = (seen: Sighting | ''): number => causes.filter((cause) => fits(cause, { ...filters, seen })).length;
   const shown = sightings.filter((seen) => causes.some((cause) => cause.seen.includes(seen)));
   return (['', ...shown] as const).map((seen) => ({ seen, count: countOf(seen) }));

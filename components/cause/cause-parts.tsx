@@ -4,7 +4,7 @@ import { Badge } from '@/components/ui/badge';
 import { withMinus } from '@/components/ui/number-text';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { Section } from '../case/view/section';
 import { CauseLine } from './cause-line';
 import { ClosedCases } from './closed-cases';
@@ -13,13 +13,13 @@ import { Formula } from './formula';
 import { RemedyList } from './remedy-list';
 import { SourceList } from './source-list';
 
-const rangeOf = (parameter: Cause['parameters'][number]): string =>
+const rangeOf = (parameter: CatalogueEntry['parameters'][number]): string =>
   'options' in parameter
     ? parameter.options.map(({ label }) => label).join(', ')
     : `${withMinus(String(parameter.min))} to ${withMinus(String(parameter.max))} ${parameter.unit}`.trim();
 
 /** What it looks like, what drives it, the model. */
-export function CauseModel({ cause }: { cause: Cause }) {
+export function CauseModel({ cause }: { cause: CatalogueEntry }) {
   return (
     <>
       <Section title="Looks like">
@@ -56,7 +56,7 @@ export function CauseModel({ cause }: { cause: Cause }) {
 }
 
 /** What can be changed, by whom; where it is published; where it was found. */
-export function CauseRemedies({ cause }: { cause: Cause }) {
+export function CauseRemedies({ cause }: { cause: CatalogueEntry }) {
   const atHand = cause.remedies.filter(({ who }) => who === 'technologist');
   const others = cause.remedies.filter(({ who }) => who !== 'technologist');
   return (

@@ -4,7 +4,7 @@
  */
 import { useState } from 'react';
 import { View } from 'react-native';
-import { useCauses } from '@/components/api/catalogue';
+import { useCatalogue } from '@/components/api/catalogue';
 import { ActionBar } from '@/components/ui/action-bar';
 import { BarHead } from '@/components/ui/bar-head';
 import { Button } from '@/components/ui/button';
@@ -17,7 +17,7 @@ import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { useLayout } from '@/components/ui/use-layout';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { sightingWords } from '../case/words';
 import { BenchOffer } from './bench-offer';
 import { CauseModel, CauseRemedies } from './cause-parts';
@@ -27,13 +27,13 @@ import { stageWords } from './stage-words';
 import { StrengthMat } from './strength-mat';
 
 /** What is seen and where it runs, in a line. */
-export const factsLine = ({ seen, runsAlong }: Cause): string =>
+export const factsLine = ({ seen, runsAlong }: CatalogueEntry): string =>
   [
     ...seen.map((sighting) => sightingWords[sighting]),
     `runs along ${runsAlong === 'both' ? 'both directions' : alongWords[runsAlong]}`,
   ].join(' · ');
 
-function CauseHead({ cause, gutters }: { cause: Cause; gutters: number }) {
+function CauseHead({ cause, gutters }: { cause: CatalogueEntry; gutters: number }) {
   return (
     <View style={{ paddingHorizontal: gutters, paddingBottom: space(4), gap: 2 }}>
       <Text variant="title" level={1}>
@@ -46,7 +46,7 @@ function CauseHead({ cause, gutters }: { cause: Cause; gutters: number }) {
   );
 }
 
-function CausePhone({ cause }: { cause: Cause }) {
+function CausePhone({ cause }: { cause: CatalogueEntry }) {
   return (
     <View style={{ width: '100%', maxWidth: 720, alignSelf: 'center' }}>
       <CauseHead cause={cause} gutters={gutter.phone} />
@@ -59,7 +59,7 @@ function CausePhone({ cause }: { cause: Cause }) {
   );
 }
 
-function CauseWide({ cause }: { cause: Cause }) {
+function CauseWide({ cause }: { cause: CatalogueEntry }) {
   const { colours } = useTheme();
   return (
     <View style={{ flexDirection: 'row', flexGrow: 1 }}>
@@ -88,7 +88,7 @@ function NotThere() {
 }
 
 export function CauseScreen({ causeId }: { causeId: string }) {
-  const { data, error, refetch } = useCauses();
+  const { data, error, refetch } = useCatalogue();
   const [offering, setOffering] = useState(false);
   const wide = useLayout() === 'wide';
   const cause = data?.find(({ id }) => id === causeId);

@@ -1,8 +1,8 @@
 /** The words of a cause: one for every value of the contract, so that a value without a word does not compile. */
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 
-export type Along = Cause['runsAlong'];
-export type Actor = Cause['remedies'][number]['who'];
+export type Along = CatalogueEntry['runsAlong'];
+export type Actor = CatalogueEntry['remedies'][number]['who'];
 
 /** In the order of the columns of the sample book. */
 export const alongWords: Record<Along, string> = {

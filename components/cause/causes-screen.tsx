@@ -4,7 +4,7 @@
  */
 import { useState } from 'react';
 import { ScrollView, View } from 'react-native';
-import { useCauses } from '@/components/api/catalogue';
+import { useCatalogue } from '@/components/api/catalogue';
 import { EmptyState } from '@/components/ui/empty-state';
 import { GlyphButton } from '@/components/ui/glyph-button';
 import { LinkText } from '@/components/ui/link-text';
@@ -16,7 +16,7 @@ import { Text } from '@/components/ui/text';
 import { gutter, space, touchTarget } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { useLayout } from '@/components/ui/use-layout';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { SearchField } from '../case/list/search-field';
 import { fits, isNarrowed, paramsOf, readFilters, type CatalogueFilters, type Params } from './catalogue-filters';
 import { MoreFilters, SeenBar } from './filter-bar';
@@ -63,7 +63,7 @@ function Samples({
   onAll,
   wide,
 }: {
-  causes: readonly Cause[];
+  causes: readonly CatalogueEntry[];
   filters: CatalogueFilters;
   onAll: () => void;
   wide: boolean;
@@ -83,7 +83,7 @@ function Samples({
 
 export function CausesScreen({ params, onParams }: CausesScreenProps) {
   const wide = useLayout() === 'wide';
-  const { data, error, refetch } = useCauses();
+  const { data, error, refetch } = useCatalogue();
   const filters = readFilters(params);
   const [searching, setSearching] = useState(Boolean(filters.q || filters.along || filters.who));
   const change = (next: CatalogueFilters): void => onParams(paramsOf(next));

@@ -5,7 +5,7 @@ import { Tabs } from '@/components/ui/tabs';
 import { Text } from '@/components/ui/text';
 import { gutter, space, touchTarget } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { sightingWords } from '../case/words';
 import { seenCounts, type CatalogueFilters } from './catalogue-filters';
 import { actors, actorWords, alongs, alongWords } from './cause-words';
@@ -42,7 +42,7 @@ export function MoreFilters({ filters, onChange }: FilterProps) {
 }
 
 interface SeenBarProps extends FilterProps {
-  causes: readonly Cause[];
+  causes: readonly CatalogueEntry[];
   wide: boolean;
 }
 

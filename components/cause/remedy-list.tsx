@@ -4,9 +4,9 @@ import { Glyph } from '@/components/ui/glyph';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 
-type Remedy = Cause['remedies'][number];
+type Remedy = CatalogueEntry['remedies'][number];
 
 /** A remedy that may leave an implant's conditions or an operating mode: it says so in its price. */
 export const needsCare = ({ price }: Remedy): boolean => /\b(SAR|slew|implant|nerve stimulation|operating mode)\b/i.test(price);

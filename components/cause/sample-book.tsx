@@ -7,7 +7,7 @@ import { View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { bookColumns, swatchPitch } from './book-columns';
 import { fits, type CatalogueFilters } from './catalogue-filters';
 import { alongs, type Along } from './cause-words';
@@ -22,7 +22,7 @@ const picture = 92;
 const gap = swatchPitch - picture;
 
 interface SampleBookProps {
-  causes: readonly Cause[];
+  causes: readonly CatalogueEntry[];
   filters: CatalogueFilters;
 }
 

@@ -5,7 +5,7 @@ import { stitchedLine } from '@/components/ui/stitches';
 import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause, Stage } from '@/server/contract/catalogue';
+import type { CatalogueEntry, Stage } from '@/server/contract/catalogue';
 import { listGap as gap, nameLine, pictureWidth } from './book-columns';
 import { fits, type CatalogueFilters } from './catalogue-filters';
 import { causesByStage, stageWords } from './stage-words';
@@ -13,7 +13,7 @@ import { Swatch } from './swatch';
 import { WarpKnot } from './warp-knot';
 
 interface SampleListProps {
-  causes: readonly Cause[];
+  causes: readonly CatalogueEntry[];
   filters: CatalogueFilters;
 }
 

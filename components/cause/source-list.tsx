@@ -4,9 +4,9 @@ import { Badge } from '@/components/ui/badge';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 
-export function SourceList({ sources }: { sources: Cause['sources'] }) {
+export function SourceList({ sources }: { sources: CatalogueEntry['sources'] }) {
   const { colours } = useTheme();
   return (
     <View role="list">

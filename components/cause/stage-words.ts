@@ -1,5 +1,5 @@
 /** The stages of the signal chain, in order: where in the making of an image a cause acts. */
-import type { Cause, Stage } from '@/server/contract/catalogue';
+import type { CatalogueEntry, Stage } from '@/server/contract/catalogue';
 
 export const stageWords: Record<Stage, string> = {
   object: 'object',
@@ -17,7 +17,7 @@ export const stageMeanings: Record<Stage, string> = {
 };
 
 /** The stages that have a cause, each with its causes in the order of the catalogue. */
-export const causesByStage = (causes: readonly Cause[]): { stage: Stage; causes: Cause[] }[] =>
+export const causesByStage = (causes: readonly CatalogueEntry[]): { stage: Stage; causes: CatalogueEntry[] }[] =>
   (Object.keys(stageWords) as Stage[])
     .map((stage) => ({ stage, causes: causes.filter((cause) => cause.stage === stage) }))
     .filter(({ causes: ofStage }) => ofStage.length > 0);

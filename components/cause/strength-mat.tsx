@@ -10,12 +10,12 @@ import { Slider } from '@/components/ui/slider';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { Figure } from '../case/view/figure';
 import { movedWords } from './moved-words';
 
 interface StrengthMatProps {
-  cause: Cause;
+  cause: CatalogueEntry;
   /** Pixels at the left and right. */
   gutters: number;
 }

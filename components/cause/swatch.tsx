@@ -9,11 +9,11 @@ import { Press } from '@/components/ui/press';
 import { insideBar, webStyle } from '@/components/ui/stitches';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme-context';
-import type { Cause } from '@/server/contract/catalogue';
+import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { mat, selvedge, swatchEdges } from './book-columns';
 
 interface SwatchProps {
-  cause: Cause;
+  cause: CatalogueEntry;
   /** Sides of the picture, pixels; what does not fit is cut off above and below. */
   width: number;
   height: number;

@@ -8,6 +8,7 @@
  * the readout alike; where both have a short side the one that lacks more is made up and the other stays zero-filled: the
  * method knows one conjugate side only.
  */
+import { partialFourier } from '../causes/partial-fourier';
 import { defineReconstruction } from '../cause';
 import { inverse } from '../fourier';
 import type { ComplexPlane } from '../grid';
@@ -39,6 +40,14 @@ function inPhase(image: ComplexPlane, low: ComplexPlane): ComplexPlane {
 export const homodyne = defineReconstruction({
   id: 'homodyne',
   title: 'Homodyne',
+  seen: ['shading', 'signal-loss'],
+  runsAlong: 'phase-encode',
+  formula: String.raw`I = \left|\mathrm{Re}\left\{ e^{-i\theta}\, \mathcal{F}^{-1}\{ W K \} \right\}\right|,\quad W(k) + W(-k) = 2`,
+  drivers: [
+    { fact: 'Partial Fourier fraction', does: 'sets how wide the symmetric band is from which the phase is known, 2f − 1 of k-space' },
+    { fact: 'TE, in a gradient echo', does: 'lets the phase of the object grow, near air and metal most' },
+  ],
+  needsObjectPhase: true,
   parameters: {},
   looks: {
     image:
@@ -53,6 +62,29 @@ export const homodyne = defineReconstruction({
       standing: 'confirmed',
     },
   ],
+  remedies: [
+    {
+      change: 'Take more of the missing side: 6/8, 7/8 or all lines',
+      who: 'technologist',
+      price:
+        'Longer in proportion, or a longer shortest TE and other contrast in echo-planar scans; SNR rises with the square root of the fraction',
+      moves: { time: 'rises', snr: 'rises', contrast: 'changes' },
+    },
+    {
+      change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less',
+      who: 'technologist',
+      price: 'Other contrast; a refocusing pulse raises SAR: check the conditions of an implant',
+      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
+    },
+    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
+    {
+      change: 'The iterative reconstruction of the missing side (POCS) instead',
+      who: 'physicist',
+      price: 'Slower reconstruction; the scan itself stays as it is',
+      moves: {},
+    },
+  ],
+  shownOn: { steps: [{ cause: partialFourier, strength: { fraction: [0.875, 0.625] } }] },
   reconstruct(kspace, _parameters, { acquisition }) {
     const [worst] = (['phase-encode', 'readout'] as const)
       .map((direction) => linesAlong(kspace, acquisition, direction))

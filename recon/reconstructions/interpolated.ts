@@ -31,6 +31,13 @@ export const interpolated = defineReconstruction({
   id: 'interpolated',
   title: 'Interpolated',
   changesMatrix: true,
+  seen: ['blur'],
+  runsAlong: 'both',
+  formula: String.raw`I'(\mathbf{r}) = \sqrt{n'/n}\; \mathcal{F}_{n'}^{-1}\{ K \text{ within zeros} \},\quad n' > n`,
+  drivers: [
+    { fact: 'Acquired matrix', does: 'sets the detail: what the picture shows besides is interpolated' },
+    { fact: 'Rows and columns of the picture', does: 'more than the acquired matrix say that it was interpolated' },
+  ],
   parameters: {
     size: choice({
       label: 'Interpolate to',
@@ -57,6 +64,31 @@ export const interpolated = defineReconstruction({
       standing: 'confirmed',
     },
   ],
+  remedies: [
+    {
+      change: 'Acquire the matrix that is shown',
+      who: 'technologist',
+      price:
+        'Longer in proportion along the phase encoding; SNR of a pixel falls; stronger gradients: nerve stimulation rises, check the conditions of an implant',
+      moves: { time: 'rises', snr: 'falls', nerveStimulation: 'rises', implantConditions: 'changes' },
+    },
+    {
+      change: 'Switch interpolation off where the size of a pixel is taken for the resolution',
+      who: 'technologist',
+      price: 'The scan itself stays as it is; the picture is coarser to look at',
+      moves: {},
+    },
+    {
+      change: 'Measure the resolution on a phantom, and note the acquired pixel in the protocol',
+      who: 'physicist',
+      price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
+    },
+  ],
+  phantom: 'resolution',
+  // The phantom has half the pixels of the picture, 64 or 128: the mild end interpolates neither.
+  strength: { matrix: [64, 256] },
+  shownOn: { steps: [], parameters: { size: 'matrix' }, samples: 0.5 },
   reconstruct(kspace, { size, matrix }) {
     const factor = size === 'twice' ? 2 : Math.max(1, matrix / Math.max(kspace.rows, kspace.columns));
     if (factor === 1) return inverse(kspace);

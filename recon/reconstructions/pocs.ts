@@ -6,6 +6,7 @@
  *
  * Where no side is short the result is the zero-filled one: lines skipped on both sides cannot be made up by conjugation.
  */
+import { partialFourier } from '../causes/partial-fourier';
 import { defineReconstruction } from '../cause';
 import type { Encoded } from '../cause';
 import { inverse, transform } from '../fourier';
@@ -47,6 +48,15 @@ function restoreTaken({ re, im }: ComplexPlane, kspace: Encoded): void {
 export const pocs = defineReconstruction({
   id: 'pocs',
   title: 'POCS',
+  seen: ['shading', 'signal-loss'],
+  runsAlong: 'phase-encode',
+  formula: String.raw`I_{j+1} = \mathcal{F}^{-1}\left\{ m K + (1 - m)\, \mathcal{F}\{ |I_j|\, e^{i\theta} \} \right\}`,
+  drivers: [
+    { fact: 'Partial Fourier fraction', does: 'sets how wide the symmetric band is from which the phase is known, 2f − 1 of k-space' },
+    { fact: 'TE, in a gradient echo', does: 'lets the phase of the object grow, near air and metal most' },
+    { fact: 'Rounds of the reconstruction', does: 'sharpen the missing side; the first few do most' },
+  ],
+  needsObjectPhase: true,
   parameters: {
     iterations: quantity({ label: 'Iterations', unit: 'rounds', min: 1, max: 100, step: 1, initial: 10 }),
   },
@@ -69,6 +79,31 @@ export const pocs = defineReconstruction({
       standing: 'confirmed',
     },
   ],
+  remedies: [
+    {
+      change: 'Take more of the missing side: 6/8, 7/8 or all lines',
+      who: 'technologist',
+      price:
+        'Longer in proportion, or a longer shortest TE and other contrast in echo-planar scans; SNR rises with the square root of the fraction',
+      moves: { time: 'rises', snr: 'rises', contrast: 'changes' },
+    },
+    {
+      change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less',
+      who: 'technologist',
+      price: 'Other contrast; a refocusing pulse raises SAR: check the conditions of an implant',
+      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
+    },
+    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
+    {
+      change: 'More rounds',
+      who: 'physicist',
+      price: 'Slower reconstruction; the scan itself stays as it is',
+      moves: {},
+    },
+  ],
+  // With ten rounds hardly anything of a smooth phase is left to be seen: the swatch has fewer and fewer.
+  strength: { iterations: [20, 1] },
+  shownOn: { steps: [{ cause: partialFourier, strength: { fraction: [0.625, 0.625] } }] },
   reconstruct(kspace, { iterations }, { acquisition }) {
     let band: Encoded | undefined;
     for (const direction of ['phase-encode', 'readout'] as const) {

@@ -4,6 +4,7 @@
  *   Fermi 1/(1 + exp((r − r0)/w)) over W(0): of the radius in the plane.
  * Sources: Harris, Proc IEEE 1978;66:51 (windows); Bernstein, King, Zhou, Handbook of MRI Pulse Sequences 2004 (Fermi).
  */
+import { truncation } from '../causes/truncation';
 import type { Context, Encoded } from '../cause';
 import { defineReconstruction } from '../cause';
 import { inverse } from '../fourier';
@@ -48,6 +49,13 @@ function weighted(kspace: Encoded, { acquisition }: Context, weight: (rLine: num
 export const windowed = defineReconstruction({
   id: 'windowed',
   title: 'Filtered',
+  seen: ['blur'],
+  runsAlong: 'both',
+  formula: String.raw`K' = W(r)\, K,\quad r = |k| / k_{\max};\quad W_{\text{Tukey}}(r) = \tfrac12 + \tfrac12 \cos\frac{\pi (r - 1 + a)}{a} \text{ for } r > 1 - a`,
+  drivers: [
+    { fact: 'Acquired matrix', does: 'sets how wide the ringing is that the filter damps, and the blur that it adds' },
+    { fact: 'k-space filtering', does: 'in the header says that one was used, seldom which' },
+  ],
   parameters: {
     window: choice<WindowName>({
       label: 'Window',
@@ -84,6 +92,27 @@ export const windowed = defineReconstruction({
     },
     { citation: 'Bernstein MA, King KF, Zhou XJ. Handbook of MRI Pulse Sequences', year: 2004, standing: 'confirmed' },
   ],
+  remedies: [
+    {
+      change: 'A weaker filter, or none',
+      who: 'technologist',
+      price: 'Ringing comes back, and more noise',
+      moves: { snr: 'falls' },
+    },
+    {
+      change: 'Take more lines, so that ringing is narrow and needs no strong filter',
+      who: 'technologist',
+      price: 'Longer in proportion; SNR of a pixel falls',
+      moves: { time: 'rises', snr: 'falls' },
+    },
+    {
+      change: 'Hold filtered and unfiltered pictures of a phantom against each other, and choose the filter of the protocol',
+      who: 'physicist',
+      price: 'Half an hour of scanner time',
+      moves: { time: 'once' },
+    },
+  ],
+  shownOn: { steps: [{ cause: truncation }], parameters: { window: 'tukey' } },
   reconstruct(kspace, { window, taper, radius, width }, context) {
     if (window === 'fermi') {
       const fermi = (r: number): number => 1 / (1 + Math.exp((r - radius) / width));

@@ -1,5 +1,6 @@
 /** The catalogue: what forms, swatches and the recipe are built from. Causes, reconstructions and corrections alike. */
 import { z } from 'zod';
+import { stepSchema } from './recipe';
 import { everyMember, identifier, route } from './route';
 import { sightingSchema } from './sighting';
 
@@ -65,7 +66,8 @@ export const remedySchema = z.object({
   moves: movesSchema,
 });
 
-export const causeSchema = z.object({
+/** What is said of causes and reconstructions alike. */
+const entrySchema = z.object({
   id: z.string(),
   title: z.string(),
   stage: stageSchema,
@@ -78,16 +80,37 @@ export const causeSchema = z.object({
   drivers: z.array(z.object({ fact: z.string(), does: z.string() })),
   parameters: z.array(parameterSchema),
   looks: z.object({ image: z.string(), kspace: z.string() }),
-  /** Whether the bench starts this cause with a synthetic object phase: without one the model looks better than it is. */
+  /** Whether the bench starts it with a synthetic object phase: without one the model looks better than it is. */
   needsObjectPhase: z.boolean(),
   /** What the swatch is of. */
   phantom: z.object({ title: z.string(), fieldOfViewMm: z.number() }),
-  /** The quantities that a swatch moves with its strength, each at [mild, strong]. */
-  strength: z.record(z.string(), z.tuple([z.number(), z.number()])),
+  /** The quantities that a swatch moves with its strength. */
+  strength: z.array(
+    z.object({
+      label: z.string(),
+      unit: z.string(),
+      min: z.number(),
+      max: z.number(),
+      step: z.number(),
+      mild: z.number(),
+      strong: z.number(),
+    }),
+  ),
   remedies: z.array(remedySchema),
   sources: z.array(sourceSchema),
 });
+/** What a page of the catalogue is about. */
+export type CatalogueEntry = z.infer<typeof entrySchema>;
+
+export const causeSchema = entrySchema.extend({ stage: stageSchema.exclude(['reconstruction']) });
 export type Cause = z.infer<typeof causeSchema>;
+
+export const reconstructionSchema = entrySchema.extend({
+  stage: z.literal('reconstruction'),
+  /** The steps on which its swatch is shown, and with which the bench starts it. */
+  shownOn: z.array(stepSchema.omit({ enabled: true })),
+});
+export type Reconstruction = z.infer<typeof reconstructionSchema>;
 
 export const methodSchema = z.object({
   id: z.string(),
@@ -114,7 +137,7 @@ export const readSwatch = route({
   method: 'get',
   path: '/api/causes/:causeId/swatch',
   summary:
-    'A square PNG of the cause on the phantom that shows it best, computed by its own model: phase encoding left and right, strength 0 mild to 1 strong. Simulated, not for diagnosis',
+    'A square PNG of the cause or reconstruction on the phantom that shows it best, computed by its own model: phase encoding left and right, strength 0 mild to 1 strong. Simulated, not for diagnosis',
   access: everyMember,
   params: z.object({ causeId: z.string().max(60) }),
   query: z.object({
@@ -129,9 +152,9 @@ export const readSwatch = route({
 export const listReconstructions = route({
   method: 'get',
   path: '/api/reconstructions',
-  summary: 'Every reconstruction method',
+  summary: 'Every reconstruction method, the plainest first',
   access: everyMember,
-  output: z.array(methodSchema),
+  output: z.array(reconstructionSchema),
 });
 export const listCorrections = route({
   method: 'get',

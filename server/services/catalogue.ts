@@ -3,9 +3,9 @@ import type { Database } from '../../db/client';
 import { describeCause, describeReconstruction } from '../../recon/catalogue';
 import { causes } from '../../recon/causes';
 import { reconstructions } from '../../recon/reconstructions';
-import { causeOf } from '../../recon/recipe-check';
+import { entryOf } from '../../recon/recipe-check';
 import type { z } from 'zod';
-import type { Cause, Method, readSwatch } from '../contract/catalogue';
+import type { Cause, readSwatch, Reconstruction } from '../contract/catalogue';
 import type { Dependencies } from '../dependencies';
 import { acquisitionOf } from '../dicom/acquisition';
 import { AppError } from '../errors';
@@ -23,19 +23,19 @@ export async function describeCauses(db: Database, caller: Caller, imageId: stri
   return causes.map((cause) => describeCause(cause, { ...acquisition, phaseEncode }));
 }
 
-export const describeReconstructions = (): Method[] => reconstructions.map((method) => describeReconstruction(method));
+export const describeReconstructions = (): Reconstruction[] => reconstructions.map((method) => describeReconstruction(method));
 
 /** The same for everybody and every time; an update of the models may change it. */
 const swatchHeaders = { 'Cache-Control': 'private, max-age=3600' };
 
-/** The swatch of a cause, or `not-found`. */
+/** The swatch of a cause or a reconstruction, or `not-found`. */
 export async function drawSwatch(
   { workers }: Pick<Dependencies, 'workers'>,
   causeId: string,
   { strength, domain, side }: z.output<typeof readSwatch.query>,
   gone: AbortSignal,
 ): Promise<Binary> {
-  if (causeOf(causeId) === undefined) throw new AppError('not-found');
+  if (entryOf(causeId) === undefined) throw new AppError('not-found');
   const { bytes } = await workers.swatch({ kind: 'swatch', causeId, strength, domain, side: Number(side) }, gone);
   return { mediaType: 'image/png', bytes, headers: swatchHeaders };
 }

@@ -76,8 +76,10 @@ describe.each(reconstructions.map((method) => [method.id, method] as const))('%s
     }
   });
 
-  test('says what it looks like and where it is published', () => {
+  test('says what it looks like, what drives it, what can be changed, and where it is published', () => {
     expect(Math.min(method.looks.image.length, method.looks.kspace.length)).toBeGreaterThan(20);
     expect(method.sources.length).toBeGreaterThan(0);
+    expect(Math.min(method.seen.length, method.drivers.length)).toBeGreaterThan(0);
+    expect(method.remedies.some(({ who }) => who === 'technologist')).toBe(true);
   });
 });

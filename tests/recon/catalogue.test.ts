@@ -5,7 +5,7 @@ import { initialOf } from '../../recon/initial';
 import { choice, quantity } from '../../recon/parameter';
 import { reconstructions } from '../../recon/reconstructions';
 import type { Moves } from '../../recon/cause';
-import { causeSchema, methodSchema } from '../../server/contract/catalogue';
+import { causeSchema, reconstructionSchema } from '../../server/contract/catalogue';
 
 describe('The catalogue', () => {
   test('has the shape of the contract, with nothing besides', () => {
@@ -14,7 +14,12 @@ describe('The catalogue', () => {
       expect(causeSchema.parse(described)).toEqual(described);
     }
     for (const method of reconstructions)
-      expect(methodSchema.parse(describeReconstruction(method))).toEqual(describeReconstruction(method));
+      expect(reconstructionSchema.parse(describeReconstruction(method))).toEqual(describeReconstruction(method));
+  });
+
+  test('has one entry of each name, causes and reconstructions together: a name is the address of its page', () => {
+    const ids = [...causes, ...reconstructions].map(({ id }) => id);
+    expect(new Set(ids).size).toBe(ids.length);
   });
 
   test('fills initial values from the scan facts and names the fact', () => {
@@ -71,7 +76,9 @@ const said: Record<keyof Moves, RegExp> = {
 const notOfTheScan = /\bno longer\b|\b(longer|shorter) (shortest )?(TE|TR|pulses|trains)\b/gi;
 const prices = Object.keys(said) as (keyof Moves)[];
 
-const remedies = causes.flatMap((entry) => entry.remedies.map((remedy) => ({ name: `${entry.id}: ${remedy.change}`, ...remedy })));
+const remedies = [...causes, ...reconstructions].flatMap((entry) =>
+  entry.remedies.map((remedy) => ({ name: `${entry.id}: ${remedy.change}`, ...remedy })),
+);
 /** Those whose words say that they do this, each with what it moves. */
 const movesOf = (does: RegExp): [string, Moves][] => {
   const found = remedies.filter(({ change }) => does.test(change)).map(({ name, moves }): [string, Moves] => [name, moves]);

@@ -1,6 +1,7 @@
 /** Swatches over HTTP: every cause of the catalogue on the head phantom, and what is not there. */
 import { decode } from 'fast-png';
 import { causes } from '../../recon/causes';
+import { reconstructions } from '../../recon/reconstructions';
 import { openApplication, type Application } from './application';
 import { binary } from './planes';
 
@@ -26,13 +27,13 @@ const difference = (a: ArrayLike<number>, b: ArrayLike<number>): number =>
 
 /**
  * What leaves log |K| as it was, to within what is seen: a phase that is only turned, or one factor for all samples. Their `looks` say
- * that k-space does not show them.
+ * that k-space does not show them. What is interpolated has zeros about the samples, of any number.
  */
-const unseenInKspace = ['cross-talk', 'periodic-motion', 'half-field-ghost', 'line-phase-errors', 'quadrature-imbalance'];
+const unseenInKspace = ['cross-talk', 'periodic-motion', 'half-field-ghost', 'line-phase-errors', 'quadrature-imbalance', 'interpolated'];
 /** Ten levels of 255 are seen at an edge (common practice: two per cent of contrast is the threshold). */
 const seen = 10;
 
-describe.each(causes.map(({ id }) => id))('the swatch of %s', (id) => {
+describe.each([...causes, ...reconstructions].map(({ id }) => id))('the swatch of %s', (id) => {
   it.each(['image', 'half'])('is a picture of 128 pixels a side (%s), other when strong than when mild', async (domain) => {
     const mild = await levelsOf(id, { domain, strength: 0 });
     expect(difference(mild, await levelsOf(id, { domain, strength: 1 }))).toBeGreaterThan(seen);

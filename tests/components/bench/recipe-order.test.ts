@@ -14,7 +14,7 @@ const cause = (id: string, stage: Cause['stage']): Cause => ({
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
   phantom: { title: 'Head', fieldOfViewMm: 240 },
-  strength: {},
+  strength: [],
   remedies: [],
   sources: [],
 });

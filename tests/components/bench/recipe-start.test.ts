@@ -1,10 +1,18 @@
 /** The recipe that the bench starts with. */
 import { startRecipe } from '@/components/bench/recipe-start';
+import type { Reconstruction } from '@/server/contract/catalogue';
 import { causeWith } from '../cause/causes';
 
 const swing = { id: 'swing', label: 'Swing', unit: 'rad', min: 0, max: 2, step: 0.1, initial: 0.6 };
 const causes = [causeWith({ id: 'motion', parameters: [swing] }), causeWith({ id: 'undersampling', needsObjectPhase: true })];
-const methods = [{ id: 'zero-filled', title: 'Zero-filled', parameters: [], looks: { image: '', kspace: '' }, sources: [] }];
+const methodWith = (part: Partial<Reconstruction> & { id: string }): Reconstruction => ({
+  ...causeWith({ id: part.id }),
+  stage: 'reconstruction',
+  shownOn: [],
+  ...part,
+});
+const short = { cause: 'undersampling', parameters: { part: 0.75 } };
+const methods = [methodWith({ id: 'zero-filled' }), methodWith({ id: 'homodyne', needsObjectPhase: true, shownOn: [short] })];
 
 test('Without a cause in the address nothing is done yet', () => {
   expect(startRecipe(methods, causes, undefined)).toEqual({
@@ -22,6 +30,15 @@ test('A cause in the address is the first step, at its initial values', () => {
 test('It brings an object phase where the cause needs one', () => {
   expect(startRecipe(methods, causes, 'undersampling').objectPhase).toEqual({ range: 1.6, seed: 1 });
   expect(startRecipe(methods, causes, 'motion').objectPhase).toBeUndefined();
+});
+
+test('A reconstruction in the address comes with the steps that show it and the object phase that it needs', () => {
+  expect(startRecipe(methods, causes, 'homodyne')).toEqual({
+    steps: [short],
+    reconstruction: { method: 'homodyne', parameters: {} },
+    objectPhase: { range: 1.6, seed: 1 },
+    seed: 1,
+  });
 });
 
 test('A cause that is not in the catalogue starts nothing', () => {

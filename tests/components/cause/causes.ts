@@ -12,7 +12,7 @@ export const causeWith = (part: Partial<Cause> & { id: string }): Cause => ({
   looks: { image: '', kspace: '' },
   needsObjectPhase: false,
   phantom: { title: 'Head', fieldOfViewMm: 240 },
-  strength: {},
+  strength: [],
   remedies: [],
   sources: [],
   ...part,

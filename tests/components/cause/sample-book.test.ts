@@ -38,14 +38,9 @@ test('The line of names has small letters after the first, but not in an abbrevi
 });
 
 test('The slider says what it moves: on the step, in units, with a real minus sign', () => {
-  const quantity = { unit: 'mm', min: -20, max: 20, step: 0.5, initial: 0 };
   const cause = causeWith({
     id: 'shift',
-    parameters: [
-      { id: 'shift', label: 'Shift', ...quantity },
-      { id: 'still', label: 'Still', ...quantity },
-    ],
-    strength: { shift: [-1, -8] },
+    strength: [{ label: 'Shift', unit: 'mm', min: -20, max: 20, step: 0.5, mild: -1, strong: -8 }],
   });
   expect(movedWords(cause, 0)).toBe('shift −1.0 mm');
   expect(movedWords(cause, 0.5)).toBe('shift −4.5 mm');
