@@ -5,7 +5,7 @@
  */
 import { inverse, transform } from './fourier';
 import type { ComplexPlane } from './grid';
-import { complexZeros } from './grid';
+import { giveBackPlane, zeroArray } from './spare-arrays';
 
 const width = 6;
 const oversampling = 2;
@@ -25,18 +25,22 @@ function besselI0(x: number): number {
 
 const tableSteps = 2048;
 
-/** The kernel from 0 to half its width, `tableSteps` a sample; linear between them it is within 1e-6. The last entry is past the end. */
-const kernelTable = Float64Array.from({ length: (tableSteps * width) / 2 + 2 }, (_, i) => {
-  const z = (2 * i) / (tableSteps * width);
-  return z > 1 ? 0 : besselI0(beta * Math.sqrt(1 - z * z));
+/** The kernel from one end to the other, `tableSteps` a sample; linear between them it is within 1e-6. The last entry is past the end. */
+const kernelTable = Float64Array.from({ length: tableSteps * width + 2 }, (_, i) => {
+  const z = (2 * i) / (tableSteps * width) - 1;
+  return Math.abs(z) > 1 ? 0 : besselI0(beta * Math.sqrt(1 - z * z));
 });
 
-function kernel(distance: number): number {
-  const position = Math.abs(distance) * tableSteps;
+/** Weights of the samples from `first` on about `place`. They lie whole samples apart, so that one fraction of a step serves them all. */
+function writeWeights(weights: Float64Array, first: number, place: number): void {
+  const position = (first - place + width / 2) * tableSteps;
   const below = Math.floor(position);
-  if (below >= kernelTable.length - 1) return 0;
-  const low = kernelTable[below] as number;
-  return low + ((kernelTable[below + 1] as number) - low) * (position - below);
+  const fraction = position - below;
+  for (let tap = 0; tap < width; tap++) {
+    const entry = below + tap * tableSteps;
+    const low = kernelTable[entry] as number;
+    weights[tap] = low + ((kernelTable[entry + 1] as number) - low) * fraction;
+  }
 }
 
 /** Transform of the kernel at `n` places of an image: what the interpolation would otherwise shade it with. */
@@ -57,7 +61,9 @@ export interface FineKspace extends ComplexPlane {
 export function fineKspace(kspace: ComplexPlane): FineKspace {
   const image = inverse(kspace);
   const { rows, columns } = image;
-  const padded = complexZeros({ ...image, rows: oversampling * rows, columns: oversampling * columns });
+  const length = oversampling ** 2 * rows * columns;
+  const fineSize = { rows: oversampling * rows, columns: oversampling * columns };
+  const padded = { ...image, ...fineSize, re: zeroArray(length), im: zeroArray(length) };
   const offset = [rows - Math.floor(rows / 2), columns - Math.floor(columns / 2)] as const;
   const [alongRows, alongColumns] = [shading(rows), shading(columns)];
   for (let row = 0; row < rows; row++) {
@@ -69,13 +75,18 @@ export function fineKspace(kspace: ComplexPlane): FineKspace {
       padded.im[to] = (image.im[from] as number) * weight;
     }
   }
-  return { ...transform(padded), coarseRows: rows, coarseColumns: columns };
+  giveBackPlane(image);
+  const fine = transform(padded);
+  giveBackPlane(padded);
+  return { ...fine, coarseRows: rows, coarseColumns: columns };
 }
 
-const wrapped = (index: number, n: number): number => ((index % n) + n) % n;
+/** `index`, which lies at most one turn outside, among the n of a circle. */
+const wrapped = (index: number, n: number): number => (index < 0 ? index + n : index >= n ? index - n : index);
 
-/** Weights and places of the samples about one column, worked out once for all rows that they are used in. */
+/** Weights along both axes, and places of the samples about one column, worked out once for all rows that they are used in. */
 const acrossWeights = new Float64Array(width);
+const alongWeights = new Float64Array(width);
 const acrossPlaces = new Int32Array(width);
 
 /** K at row frequency u and column frequency v, in samples from the centre of k-space, into `value` as [re, im]. Zero beyond the band of
@@ -90,22 +101,26 @@ export function sampleAt(fine: FineKspace, u: number, v: number, value: Float64A
   const firstColumn = Math.ceil(column - width / 2);
   const centreRow = Math.floor(fine.rows / 2);
   const centreColumn = Math.floor(fine.columns / 2);
-  for (let tap = 0; tap < width; tap++) {
-    acrossWeights[tap] = kernel(column - firstColumn - tap);
-    acrossPlaces[tap] = wrapped(firstColumn + tap + centreColumn, fine.columns);
-  }
-  for (let r = firstRow; r < firstRow + width; r++) {
-    const weight = kernel(row - r);
-    const start = wrapped(r + centreRow, fine.rows) * fine.columns;
+  const { re: fineRe, im: fineIm } = fine;
+  writeWeights(acrossWeights, firstColumn, column);
+  writeWeights(alongWeights, firstRow, row);
+  for (let tap = 0; tap < width; tap++) acrossPlaces[tap] = wrapped(firstColumn + tap + centreColumn, fine.columns);
+  let totalRe = 0;
+  let totalIm = 0;
+  for (let r = 0; r < width; r++) {
+    const start = wrapped(firstRow + r + centreRow, fine.rows) * fine.columns;
     let re = 0;
     let im = 0;
     for (let tap = 0; tap < width; tap++) {
       const across = acrossWeights[tap] as number;
       const i = start + (acrossPlaces[tap] as number);
-      re += across * (fine.re[i] as number);
-      im += across * (fine.im[i] as number);
+      re += across * (fineRe[i] as number);
+      im += across * (fineIm[i] as number);
     }
-    value[0] += weight * re;
-    value[1] += weight * im;
+    const weight = alongWeights[r] as number;
+    totalRe += weight * re;
+    totalIm += weight * im;
   }
+  value[0] = totalRe;
+  value[1] = totalIm;
 }

@@ -6,6 +6,7 @@ import type { Encoded } from './cause';
 import type { FineKspace } from './off-grid';
 import { fineKspace, sampleAt } from './off-grid';
 import type { Lines } from './lines';
+import { copyOf, copyOfBytes, giveBackPlane } from './spare-arrays';
 
 /** Metres along each axis, and radians. */
 export interface Pose {
@@ -63,7 +64,7 @@ function rampLine(moved: Encoded, lines: Lines, line: number, [alongPhaseEncode,
 
 /** k-space of an object that has the pose `poses[line]` while a line is taken. */
 export function withPoses(kspace: Encoded, lines: Lines, poses: readonly Pose[]): Encoded {
-  const moved = { ...kspace, re: kspace.re.slice(), im: kspace.im.slice(), taken: kspace.taken.slice() };
+  const moved = { ...kspace, re: copyOf(kspace.re), im: copyOf(kspace.im), taken: copyOfBytes(kspace.taken) };
   const [phasePixel, readoutPixel] = pixelSizes(kspace, lines);
   let fine: FineKspace | undefined;
   poses.forEach(({ alongPhaseEncode, alongReadout, rotation }, line) => {
@@ -75,5 +76,6 @@ export function withPoses(kspace: Encoded, lines: Lines, poses: readonly Pose[])
       rampLine(moved, lines, line, [alongPhaseEncode / phasePixel, alongReadout / readoutPixel]);
     }
   });
+  if (fine) giveBackPlane(fine);
   return moved;
 }

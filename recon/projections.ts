@@ -6,8 +6,8 @@
  *
  * No grid is interpolated: the projections are taken of the pixels of the object, finely along each spoke.
  */
-import type { ComplexPlane } from './grid';
-import { centredGrid, complexZeros } from './grid';
+import type { Plane } from './grid';
+import { centredGrid } from './grid';
 
 /** Entries of the table of h per pixel: linear between them is right to 2e-5 of its peak. */
 const perPixel = 128;
@@ -17,9 +17,10 @@ const sinc = (x: number): number => (x === 0 ? 1 : Math.sin(Math.PI * x) / (Math
 /** h(t), t in pixels: the ramp-filtered projection of a point. */
 export const rampKernel = (t: number): number => sinc(t) / 2 - sinc(t / 2) ** 2 / 4;
 
-/** PSF on rows × columns pixels, its centre at floor(n/2) of each axis. Even in r: half of it is worked out, and mirrored. */
-export function projectionSpread(rows: number, columns: number, nSpokes: number): ComplexPlane {
-  const plane = complexZeros(centredGrid(rows, columns, [1, 1]));
+/** PSF on rows × columns pixels, its centre at floor(n/2) of each axis. Even in x and in y, as every spoke has its mirror image among the
+ *  others: a quarter of it is worked out. */
+export function projectionSpread(rows: number, columns: number, nSpokes: number): Plane {
+  const values = new Float64Array(rows * columns);
   const [centreRow, centreColumn] = [Math.floor(rows / 2), Math.floor(columns / 2)];
   const reach = Math.ceil(Math.sqrt(rows * rows + columns * columns) / 2) + 2;
   const table = Float64Array.from({ length: reach * perPixel }, (_, i) => (Math.PI / nSpokes) * rampKernel(i / perPixel));
@@ -28,20 +29,19 @@ export function projectionSpread(rows: number, columns: number, nSpokes: number)
     const dy = perPixel * Math.sin((Math.PI * spoke) / nSpokes);
     for (let row = 0; row <= centreRow; row++) {
       const along = (row - centreRow) * dy;
-      for (let column = 0, i = row * columns; column < columns; column++, i++) {
+      for (let column = 0, i = row * columns; column <= centreColumn; column++, i++) {
         const size = Math.abs(along + (column - centreColumn) * dx);
         const below = Math.floor(size);
         const low = table[below] as number;
-        plane.re[i] = (plane.re[i] as number) + low + ((table[below + 1] as number) - low) * (size - below);
+        values[i] = (values[i] as number) + low + ((table[below + 1] as number) - low) * (size - below);
       }
     }
   }
-  for (let row = centreRow + 1; row < rows; row++) {
+  for (let row = 0; row < rows; row++) {
+    const from = (row <= centreRow ? row : 2 * centreRow - row) * columns;
     for (let column = 0; column < columns; column++) {
-      // Column −n/2 of an even count is its own mirror image: +n/2 comes round to it.
-      const mirrorColumn = (2 * centreColumn - column) % columns;
-      plane.re[row * columns + column] = plane.re[(2 * centreRow - row) * columns + mirrorColumn] as number;
+      values[row * columns + column] = values[from + (column <= centreColumn ? column : 2 * centreColumn - column)] as number;
     }
   }
-  return plane;
+  return { ...centredGrid(rows, columns, [1, 1]), values };
 }

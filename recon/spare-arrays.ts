@@ -33,7 +33,10 @@ const spareBytes = spareOf<Uint8Array>();
 /** An array with arbitrary content: every sample of it is to be written before it is read. */
 export const unwrittenArray = (length: number): Float64Array => spareSamples.take(length) ?? new Float64Array(length);
 
-/** The same of bytes. */
+/** The same of zeros. */
+export const zeroArray = (length: number): Float64Array => spareSamples.take(length)?.fill(0) ?? new Float64Array(length);
+
+/** Unwritten bytes. */
 export const unwrittenBytes = (length: number): Uint8Array => spareBytes.take(length) ?? new Uint8Array(length);
 
 /** A copy that is its own. */

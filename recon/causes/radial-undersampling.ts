@@ -8,24 +8,26 @@
  * are taken to be square.
  */
 import { defineCause } from '../cause';
-import { inverse, transform } from '../fourier';
+import { inverse, inverseAlong, transform, transformOfReal } from '../fourier';
 import type { ComplexPlane, Grid } from '../grid';
-import { complexZeros, centredGrid } from '../grid';
+import { centredGrid } from '../grid';
 import { quantity } from '../parameter';
 import { projectionSpread } from '../projections';
+import { giveBackPlane, zeroArray } from '../spare-arrays';
 
 /** The transform of the point spread on twice the size, real; kept for the last size and number of spokes, while other sliders move. */
 let kept: { key: string; transfer: Float64Array } | undefined;
 
 function transferOf(rows: number, columns: number, nSpokes: number): Float64Array {
   const key = `${rows} ${columns} ${nSpokes}`;
-  if (kept?.key !== key) kept = { key, transfer: transform(projectionSpread(rows, columns, nSpokes)).re };
+  if (kept?.key !== key) kept = { key, transfer: transformOfReal(projectionSpread(rows, columns, nSpokes)).re };
   return kept.transfer;
 }
 
 /** `plane` about the centre of `grid`: zeros around it, or cut down to it. */
 function recentred(plane: ComplexPlane, grid: Grid): ComplexPlane {
-  const result = complexZeros(grid);
+  const { rows, columns, spacing, origin } = grid;
+  const result = { rows, columns, spacing, origin, re: zeroArray(rows * columns), im: zeroArray(rows * columns) };
   const rowShift = Math.floor(plane.rows / 2) - Math.floor(grid.rows / 2);
   const columnShift = Math.floor(plane.columns / 2) - Math.floor(grid.columns / 2);
   for (let row = Math.max(0, -rowShift); row < Math.min(grid.rows, plane.rows - rowShift); row++) {
@@ -40,7 +42,9 @@ function recentred(plane: ComplexPlane, grid: Grid): ComplexPlane {
 
 /** The object convolved with the spread of `nSpokes` projections; twice the size, so that nothing comes round. */
 function projected(image: ComplexPlane, nSpokes: number): ComplexPlane {
-  const wide = transform(recentred(image, centredGrid(2 * image.rows, 2 * image.columns, image.spacing)));
+  const padded = recentred(image, centredGrid(2 * image.rows, 2 * image.columns, image.spacing));
+  const wide = transform(padded);
+  giveBackPlane(padded);
   const transfer = transferOf(wide.rows, wide.columns, nSpokes);
   const scale = Math.sqrt(wide.rows * wide.columns);
   for (let i = 0; i < transfer.length; i++) {
@@ -48,7 +52,12 @@ function projected(image: ComplexPlane, nSpokes: number): ComplexPlane {
     wide.re[i] = factor * (wide.re[i] as number);
     wide.im[i] = factor * (wide.im[i] as number);
   }
-  return recentred(inverse(wide), image);
+  // One axis after the other: rows that are cut off need no second transform.
+  const rows = inverseAlong(wide, 0);
+  giveBackPlane(wide);
+  const narrow = recentred(rows, { ...rows, rows: image.rows });
+  giveBackPlane(rows);
+  return recentred(inverseAlong(narrow, 1), image);
 }
 
 /** 1 within the circle |k| ≤ ½ cycle a pixel, which the spokes reach. */

@@ -9,12 +9,13 @@
 import { partialFourier } from '../causes/partial-fourier';
 import { defineReconstruction } from '../cause';
 import type { Encoded } from '../cause';
-import { inverse, transform } from '../fourier';
+import { inverse, inverseAlong, transform, transformAlong } from '../fourier';
 import type { ComplexPlane } from '../grid';
 import { linesAlong, weightLines } from '../lines';
 import type { Lines } from '../lines';
 import { quantity } from '../parameter';
 import { reachOf, shortfall } from '../reach';
+import { giveBackPlane } from '../spare-arrays';
 
 /** A copy with the samples within the reach of the shorter side along `lines`, |k| < ks. */
 function symmetricBand<P extends ComplexPlane>(kspace: P, lines: Lines, ks: number): P {
@@ -22,17 +23,25 @@ function symmetricBand<P extends ComplexPlane>(kspace: P, lines: Lines, ks: numb
   return weightLines(kspace, lines, { re: im.map((_, line) => (Math.abs(line - lines.centre) < ks ? 1 : 0)), im });
 }
 
-/** Replaces `estimate` by |estimate|·exp(iθ), θ the phase of `low`; where `low` vanishes the phase is taken as 0. */
-function takePhase({ re, im }: ComplexPlane, low: ComplexPlane): void {
+/** Divides every sample by its modulus; one that vanishes becomes 1, a phase of 0. */
+function makeUnit({ re, im }: ComplexPlane): void {
   for (let i = 0; i < re.length; i++) {
-    const a = low.re[i] as number;
-    const b = low.im[i] as number;
+    const a = re[i] as number;
+    const b = im[i] as number;
+    const size = Math.sqrt(a * a + b * b);
+    re[i] = size > 0 ? a / size : 1;
+    im[i] = size > 0 ? b / size : 0;
+  }
+}
+
+/** Replaces `estimate` by |estimate|·`unit`. */
+function takePhase({ re, im }: ComplexPlane, unit: ComplexPlane): void {
+  for (let i = 0; i < re.length; i++) {
     const x = re[i] as number;
     const y = im[i] as number;
     const size = Math.sqrt(x * x + y * y);
-    const lowSize = Math.sqrt(a * a + b * b);
-    re[i] = lowSize > 0 ? (size * a) / lowSize : size;
-    im[i] = lowSize > 0 ? (size * b) / lowSize : 0;
+    re[i] = size * (unit.re[i] as number);
+    im[i] = size * (unit.im[i] as number);
   }
 }
 
@@ -43,6 +52,35 @@ function restoreTaken({ re, im }: ComplexPlane, kspace: Encoded): void {
     re[i] = kspace.re[i] as number;
     im[i] = kspace.im[i] as number;
   }
+}
+
+/** Whether each of `lines` was taken whole or not at all. */
+function isTakenWhole({ taken }: Encoded, { nLines, samplesPerLine, lineStride, sampleStride }: Lines): boolean {
+  for (let line = 0; line < nLines; line++) {
+    const start = line * lineStride;
+    for (let sample = 1; sample < samplesPerLine; sample++) if (taken[start + sample * sampleStride] !== taken[start]) return false;
+  }
+  return true;
+}
+
+/** The samples to go by, and the way there and back between them and the image. */
+interface Rounds {
+  readonly known: Encoded;
+  readonly forth: (image: ComplexPlane) => ComplexPlane;
+  readonly back: (samples: ComplexPlane) => ComplexPlane;
+}
+
+/** Where whole lines are missing, the transform along the lines and its inverse cancel from round to round: it is done once, and the rounds
+ *  go across the lines only, in half the time. */
+function roundsOf(kspace: Encoded, short: readonly Lines[]): Rounds {
+  const [lines, other] = short;
+  if (!lines || other || !isTakenWhole(kspace, lines)) return { known: kspace, forth: transform, back: inverse };
+  const [across, along] = lines.sampleStride === 1 ? ([0, 1] as const) : ([1, 0] as const);
+  return {
+    known: { ...inverseAlong(kspace, along), taken: kspace.taken },
+    forth: (image) => transformAlong(image, across),
+    back: (samples) => inverseAlong(samples, across),
+  };
 }
 
 export const pocs = defineReconstruction({
@@ -105,20 +143,24 @@ export const pocs = defineReconstruction({
   strength: { iterations: [20, 1] },
   shownOn: { steps: [{ cause: partialFourier, strength: { fraction: [0.625, 0.625] } }] },
   reconstruct(kspace, { iterations }, { acquisition }) {
-    let band: Encoded | undefined;
-    for (const direction of ['phase-encode', 'readout'] as const) {
-      const lines = linesAlong(kspace, acquisition, direction);
-      const reach = reachOf(kspace, lines);
-      if (shortfall(reach) > 0) band = symmetricBand(band ?? kspace, lines, Math.max(1, Math.min(reach.below, reach.above)));
-    }
-    if (!band) return inverse(kspace);
-    const low = inverse(band);
-    let estimate = inverse(kspace);
+    const directions = (['phase-encode', 'readout'] as const).map((direction) => linesAlong(kspace, acquisition, direction));
+    const short = directions.filter((lines) => shortfall(reachOf(kspace, lines)) > 0);
+    if (short.length === 0) return inverse(kspace);
+    const band = short.reduce((part, lines) => {
+      const { below, above } = reachOf(kspace, lines);
+      return symmetricBand(part, lines, Math.max(1, Math.min(below, above)));
+    }, kspace);
+    const phase = inverse(band);
+    makeUnit(phase);
+    const { known, forth, back } = roundsOf(kspace, short);
+    let estimate = back(known);
     for (let round = 0; round < iterations; round++) {
-      takePhase(estimate, low);
-      const filled = transform(estimate);
-      restoreTaken(filled, kspace);
-      estimate = inverse(filled);
+      takePhase(estimate, phase);
+      const filled = forth(estimate);
+      restoreTaken(filled, known);
+      giveBackPlane(estimate);
+      estimate = back(filled);
+      giveBackPlane(filled);
     }
     return estimate;
   },

@@ -24,7 +24,7 @@ describe('The point spread of projections', () => {
   });
 
   test('of many is that of the full disc', () => {
-    const { re } = projectionSpread(64, 64, 200);
+    const { values: re } = projectionSpread(64, 64, 200);
     for (const [dy, dx] of [
       [0, 0],
       [0, 1],
@@ -39,7 +39,7 @@ describe('The point spread of projections', () => {
   });
 
   test.each([16, 32])('of %i is clean within P/π pixels, and streaks beyond', (P) => {
-    const { re } = projectionSpread(128, 128, P);
+    const { values: re } = projectionSpread(128, 128, P);
     const worst = (from: number, to: number): number => {
       let largest = 0;
       re.forEach((value, i) => {
@@ -58,7 +58,7 @@ describe('Too few projections', () => {
   test('is the object convolved with the point spread, without what lies outside the disc of k-space', () => {
     const [rows, columns, P] = [12, 9, 8];
     const object = noisePlane(rows, columns);
-    const { re: spread } = projectionSpread(2 * rows, 2 * columns, P);
+    const { values: spread } = projectionSpread(2 * rows, 2 * columns, P);
     const expected = { ...object, re: new Float64Array(rows * columns), im: new Float64Array(rows * columns) };
     for (let i = 0; i < rows * columns; i++) {
       for (let j = 0; j < rows * columns; j++) {
