@@ -73,7 +73,7 @@ export const eddyCurrents = defineCause({
     {
       change: 'Diffusion preparation with two refocusing pulses, whose eddy currents cancel',
       who: 'technologist',
-      price: 'Longer TE and less SNR; one more refocusing pulse raises SAR: check the conditions of an implant',
+      price: 'Longer TE, with other contrast and less SNR; one more refocusing pulse raises SAR: check the conditions of an implant',
       moves: { snr: 'falls', contrast: 'changes', sar: 'rises', implantConditions: 'changes' },
     },
     {

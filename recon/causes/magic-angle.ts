@@ -171,20 +171,20 @@ export const magicAngle = defineCause({
     {
       change: 'Confirm with a TE above 40 ms: what is bright there as well is no magic angle',
       who: 'technologist',
-      price: 'One more scan, with other contrast',
+      price: 'The time of one more scan, of other contrast',
       moves: { time: 'rises', contrast: 'changes' },
     },
     {
       change: 'Lay the limb otherwise, so that the tendon leaves 55° to the bore',
       who: 'technologist',
-      price: 'A new set-up of the patient; the tendon then shows it elsewhere along its arc',
+      price: 'A few minutes at the table; the tendon may then show it elsewhere along its arc',
       moves: { time: 'once' },
     },
     {
       change: 'Plan protocols for tendons with one sequence of long TE in every plane',
       who: 'physicist',
-      price: 'Longer by that sequence; SNR is lower at long TE',
-      moves: { time: 'rises', snr: 'falls', contrast: 'changes' },
+      price: 'Longer by that sequence, whose SNR is lower',
+      moves: { time: 'rises', snr: 'falls' },
     },
   ],
   apply(object, { echoTime, atMagicAngle, alongTheField, brightness, ...shape }, { acquisition }) {

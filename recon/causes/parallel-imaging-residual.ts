@@ -95,7 +95,7 @@ export const parallelImagingResidual = defineCause({
     {
       change: 'Use a coil with more elements along the phase encoding, all of them selected and seated',
       who: 'technologist',
-      price: 'A new set-up of the patient; SNR rises',
+      price: 'A few minutes for a new set-up of the patient; SNR rises',
       moves: { time: 'once', snr: 'rises' },
     },
     {
