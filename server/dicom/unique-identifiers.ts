@@ -26,6 +26,9 @@ export interface UniqueIdentifiers {
 export const departmentKey = (identityKey: Uint8Array, departmentId: string): Uint8Array =>
   createHmac('sha256', identityKey).update(`department ${departmentId}`).digest();
 
+/** What stands for a file that was sent, of the SHA-256 of its bytes in hexadecimal. */
+export const fileKeyOf = (key: Uint8Array, digest: string): string => createHmac('sha256', key).update(`file ${digest}`).digest('hex');
+
 /** An identifier of ours in the place of `uid`: at most 44 characters. */
 export function replacedUid(key: Uint8Array, uid: string): string {
   const hash = createHmac('sha256', key).update(`uid ${uid}`).digest('hex');

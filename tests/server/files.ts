@@ -5,7 +5,7 @@ import { uidOf, writeDicom, type Attributes, type ImageToWrite } from '../../ser
 import type { Image } from '../../server/contract/images';
 import type { Application } from './application';
 
-const uids = {
+const sameUids = {
   study: uidOf('11111111-1111-4111-8111-111111111111'),
   series: uidOf('22222222-2222-4222-8222-222222222222'),
   image: uidOf('33333333-3333-4333-8333-333333333333'),
@@ -23,14 +23,14 @@ export const scanAttributes: Attributes = {
   imageOrientation: [1, 0, 0, 0, 1, 0],
 };
 
-interface Disc extends Partial<Pick<ImageToWrite, 'extra' | 'without'>> {
+interface Disc extends Partial<Pick<ImageToWrite, 'extra' | 'without' | 'uids'>> {
   readonly rows?: number;
   readonly columns?: number;
   readonly attributes?: Attributes;
 }
 
 /** A bright disc off the centre, with a ramp in it so that no symmetry hides a mistake. */
-export function discFile({ rows = 32, columns = 32, attributes = {}, extra, without }: Disc = {}): Buffer {
+export function discFile({ rows = 32, columns = 32, attributes = {}, extra, without, uids = sameUids }: Disc = {}): Buffer {
   const pixels = Uint16Array.from({ length: rows * columns }, (_, i) => {
     const y = Math.floor(i / columns) - 0.45 * rows;
     const x = (i % columns) - 0.55 * columns;
