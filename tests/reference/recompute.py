@@ -200,10 +200,10 @@ def recomputed(stored):
         'sheppLoganSignal': {'zero': head(0, 0), 'away': head(1.5, 2.25)},
         'fatShift': {'at1T5': fat_ppm * larmor(1.5) / 130, 'at3T': fat_ppm * larmor(3) / 440},
         'fatShiftHertz': fat_ppm * 123.25,
-        'rician': {a: rician(float(a)) for a in ('0', '1', '2', '3', '5')},
+        'rician': {a: rician(float(a)) for a in ('0', '1', '2', '3', '5', '10')},
         'centralChi': {n: central_chi(int(n)) for n in ('1', '2', '4', '8', '16', '32')},
         'spikePeriod': 256 / np.hypot(30, 40),
-        'quadratureGhost': [[g, a, quadrature(g, a)] for g, a in ((1.1, 0), (1, 5), (1.05, 3))],
+        'quadratureGhost': [[g, a, quadrature(g, a)] for g, a in ((1.1, 0), (1, 5), (1.05, 3), (1.1, 5))],
         'interferencePlace': {'inside': 3200 / 200, 'folded': (40000 / 200 + 128) % 256 - 128},
         'spinEchoAt80Percent': sin(0.8 * pi / 2) ** 3,
         'wavelength': {
@@ -220,13 +220,15 @@ def recomputed(stored):
     }
     encoding = {
         'gibbsLobes': [special.sici(n * pi)[0] / pi - 0.5 for n in (1, 2, 3)],
-        'gibbsOvershoot': {n: overshoot(int(n)) for n in ('32', '64', '128')},
+        'gibbsOvershoot': {n: overshoot(int(n)) for n in ('32', '64', '128', '256')},
         'gibbsOvershootWindowed': {'hamming': overshoot(128, hamming), 'hann': overshoot(128, hann)},
         'pointWidth': {
             'sinc': 2 * optimize.brentq(lambda x: np.sinc(x) - 0.5, 0.3, 0.9),
             'hamming': point_width(hamming),
             'hann': point_width(hann),
         },
+        'pointSideLobe': min(np.sinc(np.linspace(1, 2, 20001))),
+        'halfFieldStrong': {'parent': cos(pi / 6), 'ratio': tan(pi / 6)},
         'pointWidthDecay': point_width_decay(),
         'sixteenEchoes': exp(-16 * 10 / 80),
         'halfField': {

@@ -61,6 +61,7 @@ export const reference = {
     2: { mean: 2.272383428, standardDeviation: 0.914479937 },
     3: { mean: 3.172577288, standardDeviation: 0.966826433 },
     5: { mean: 5.101069639, standardDeviation: 0.989489026 },
+    10: { mean: 10.050126937, standardDeviation: 0.997471081 },
   },
   /** The same of root sum of squares of n coils without signal: χ of 2n degrees of freedom, scipy; Constantinides, Magn Reson Med
    *  1997;38:852. */
@@ -79,6 +80,7 @@ export const reference = {
     [1.1, 0, 0.047619047619],
     [1, 5, 0.043660942909],
     [1.05, 3, 0.035785275794],
+    [1.1, 5, 0.064605213],
   ],
   /** px from the centre: 3.2 kHz and 40 kHz at 200 Hz/px, the second folded into 256 px. */
   interferencePlace: { inside: 16, folded: -56 },

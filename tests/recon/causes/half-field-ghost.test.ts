@@ -23,6 +23,13 @@ describe('A constant phase between odd and even echoes', () => {
     expect(absolute(image, 62, 30) / absolute(image, 30, 30)).toBeCloseTo(reference.halfField[phase].ratio, 9);
   });
 
+  test('of π/6 makes a ghost of half the brightness', () => {
+    const image = ghosted(box(64, [28, 36], [20, 44]), { phase: Math.PI / 6 });
+    expect(absolute(image, 30, 30)).toBeCloseTo(reference.halfFieldStrong.parent, 9);
+    expect(absolute(image, 62, 30)).toBeCloseTo(0.5, 9);
+    expect(absolute(image, 62, 30) / absolute(image, 30, 30)).toBeCloseTo(reference.halfFieldStrong.ratio, 9);
+  });
+
   test('gives the ratio of the outside simulation', () => {
     const image = ghosted(box(128, [40, 60], [50, 70]), { phase: 0.1 });
     expect(absolute(image, 50 + 64, 60) / absolute(image, 50, 60)).toBeCloseTo(reference.halfFieldSimulated, 9);

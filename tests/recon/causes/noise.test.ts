@@ -87,7 +87,7 @@ describe('The magnitude from one coil is Rician', () => {
     expect(Math.abs(mean / standardDeviation - 1.913)).toBeLessThan(0.08);
   });
 
-  test.each([1, 2, 3, 5] as const)('in an object of %i σ', (snr) => {
+  test.each([1, 2, 3, 5, 10] as const)('in an object of %i σ', (snr) => {
     const { mean, standardDeviation } = inObject(noisy(half, snr));
     // The wanted SNR is relative to the clean object, 1: σ = 1/SNR.
     expect(Math.abs(mean * snr - reference.rician[snr].mean)).toBeLessThan(ofMean);
