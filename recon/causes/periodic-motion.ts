@@ -134,6 +134,7 @@ export const periodicMotion = defineCause({
     }),
   },
   identity: { moves: 'phase', frequency: 0.25, phaseSwing: 0, displacement: 5, modulation: 0.2, start: 0, averaging: 'left-over' },
+  strength: { phaseSwing: [0.1, 0.9] },
   looks: {
     image:
       'Faint copies of the whole object along the phase encoding, whatever way the motion goes, at equal steps of frac(TR × averages × frequency) of the field of view. Where the header has no TR, 500 ms is assumed.',

@@ -168,7 +168,7 @@ export const unexpectedVoid: Story = {
     {
       by: 'physicist',
       signed: {
-        stands: ['The cause is susceptibility and metal.'],
+        stands: ['The cause is metal and susceptibility.'],
         open: ['The fault was reproduced by a trial.', 'The fix was shown to work.', 'Every other cause was excluded.'],
       },
     },
