@@ -75,3 +75,15 @@ test('The readout gradient shears, not the other: what lies on the middle column
   for (let row = 0; row < 32; row++) expect(sheared.re[row * 9 + 4]).toBeCloseTo(object.re[row * 9 + 4] ?? NaN, 12);
   expect(Math.abs(energy(sheared) - energy(object))).toBeGreaterThan(1);
 });
+
+test('Each gradient counts metres along its own direction, where pixels are not square', () => {
+  // Pixels of 1 mm along the phase encoding and 2 mm along the readout: 10 Hz a millimetre are 10 Hz a line and 20 Hz a sample.
+  const even = box(100, [30, 70], [0, 100]);
+  const oblong = { ...even, spacing: [1e-3, 2e-3] as const };
+  const sheared = distorted(oblong, { alongReadout: gradientOf(10) });
+  // 20 Hz · 0.5 ms · 100 lines: one pixel a column.
+  expect(absolute(sheared, 30 + 8, 50 + 8)).toBeCloseTo(1, 9);
+  expect(absolute(sheared, 30 + 7, 50 + 8)).toBeCloseTo(0, 9);
+  // 10 Hz · 0.5 ms · 100 lines: half a pixel a line.
+  expect(absolute(distorted(oblong, { alongPhaseEncode: gradientOf(10) }), 50, 50)).toBeCloseTo(1 / 1.5, 9);
+});
