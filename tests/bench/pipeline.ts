@@ -36,10 +36,10 @@ export async function pipelineFigures(): Promise<Figure[]> {
   const object = headImage(headGrid(side));
   const source = asComplex(object);
   const peer = inNumpy(object, simulate(source, recipeOf(0.8), acquisition).image);
-  const full = await medianMs(() => simulate(source, recipeOf(0.8), acquisition), { calls });
+  const full = await medianMs(() => simulate(source, recipeOf(0.8), acquisition).giveBack(), { calls });
   const prepared = prepare(source);
   let call = 0;
-  const last = await medianMs(() => simulate(prepared, recipeOf(0.5 + (call++ % 9) / 20), acquisition), { calls });
+  const last = await medianMs(() => simulate(prepared, recipeOf(0.5 + (call++ % 9) / 20), acquisition).giveBack(), { calls });
   return [
     {
       id: `pipeline-six-steps-${side}`,

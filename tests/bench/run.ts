@@ -1,4 +1,5 @@
 /** `npm run bench`: measures every figure and prints a table; with `-- --json` the last line is one JSON object for programs. */
+import { causeFigures } from './causes';
 import { jsonOf, tableOf } from './figure';
 import { growthFigures } from './growth';
 import { pipelineFigures } from './pipeline';
@@ -12,6 +13,7 @@ async function run(): Promise<void> {
     ...(await previewFigures()),
     ...(await pipelineFigures()),
     ...(await growthFigures()),
+    ...(await causeFigures()),
     ...(await requestFigures()),
   ];
   console.log(tableOf(figures));
