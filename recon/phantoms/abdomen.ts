@@ -3,7 +3,7 @@
  * bowel, spleen, pancreas, kidneys, the great vessels, spine and cord. No two organs overlap, so that every pixel is filled once.
  */
 import type { Material } from './material';
-import { closedCurve, disc, mirrored, oval } from './outline';
+import { closedCurve, disc, mirrored, oval, type Pair } from './outline';
 import type { Amounts, MaterialShape, Phantom } from './phantom';
 import { replaces } from './phantom';
 import { randomOf } from '../random';
@@ -131,16 +131,22 @@ const vessels: readonly MaterialShape[] = [
   shape(oval([2.6, 1.9], [62, 14]), replaces(blood, fat)),
 ];
 
+/** A vessel through points given as x, y, x, y …, from one half width to another. */
+function vessel(from: number, to: number, [x = 0, y = 0, ...further]: readonly number[]): MaterialShape['outline'] {
+  const rest = Array.from({ length: further.length / 2 }, (_, i): Pair => [further[2 * i] ?? 0, further[2 * i + 1] ?? 0]);
+  return taper([[x, y], ...rest], from, to);
+}
+
 /** Branches of the portal vein from the hilum, and veins of the liver; each begins beside its parent, so that none overlaps. */
 const liverVessels: readonly MaterialShape[] = [
-  taper([[-46, -27], [-54, -30], [-63, -31]], 3.4, 2.8), // prettier-ignore
-  taper([[-67.5, -34.5], [-77, -45], [-88, -50]], 2.3, 0.9), // prettier-ignore
-  taper([[-69, -28.5], [-82, -24], [-97, -25], [-109, -20]], 2.4, 0.8), // prettier-ignore
-  taper([[-38, -31], [-30, -43], [-15, -55], [3, -63]], 2.4, 0.9), // prettier-ignore
-  taper([[-62, 1], [-78, -6], [-98, -6], [-115, -11]], 2.7, 0.9), // prettier-ignore
-  taper([[-92, 2.5], [-104, 11], [-112, 24], [-116, 37]], 2, 0.8), // prettier-ignore
-  taper([[-57, -45], [-64, -57], [-66, -69]], 2.1, 0.9), // prettier-ignore
-  taper([[-40, -52], [-42, -63], [-39, -73]], 1.8, 0.9), // prettier-ignore
+  vessel(3.4, 2.8, [-46, -27, -54, -30, -63, -31]),
+  vessel(2.3, 0.9, [-67.5, -34.5, -77, -45, -88, -50]),
+  vessel(2.4, 0.8, [-69, -28.5, -82, -24, -97, -25, -109, -20]),
+  vessel(2.4, 0.9, [-38, -31, -30, -43, -15, -55, 3, -63]),
+  vessel(2.7, 0.9, [-62, 1, -78, -6, -98, -6, -115, -11]),
+  vessel(2, 0.8, [-92, 2.5, -104, 11, -112, 24, -116, 37]),
+  vessel(2.1, 0.9, [-57, -45, -64, -57, -66, -69]),
+  vessel(1.8, 0.9, [-40, -52, -42, -63, -39, -73]),
   disc(1.5, [-101, -38]),
   disc(1.2, [-91, -36]),
   disc(1.4, [-121, 4]),

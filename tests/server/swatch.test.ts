@@ -1,4 +1,4 @@
-/** Swatches over HTTP: every cause of the catalogue on the head phantom, and what is not there. */
+/** Swatches over HTTP: every cause of the catalogue on its phantom, and what is not there. */
 import { decode } from 'fast-png';
 import { causes } from '../../recon/causes';
 import { reconstructions } from '../../recon/reconstructions';
