@@ -6,6 +6,7 @@ import { Slider } from '@/components/ui/slider';
 import { space } from '@/components/ui/theme';
 import type { CatalogueParameter } from '@/server/contract/catalogue';
 import { useBench } from './bench-context';
+import { shownParameters } from './shown-parameters';
 
 interface ParameterGridProps {
   parameters: readonly CatalogueParameter[];
@@ -36,7 +37,7 @@ export function ParameterGrid({ parameters, values, columns, errorOf, onChange, 
   const letGo = (): void => dispatch({ kind: 'let-go' });
   return (
     <ControlGrid columns={columns}>
-      {parameters.map((parameter) => {
+      {shownParameters(parameters, values).map((parameter) => {
         const value = values[parameter.id] ?? parameter.initial;
         if ('options' in parameter) {
           const rows = parameter.options.map(({ value: id, label }) => ({ id, label }));

@@ -20,7 +20,7 @@ import { useLayout } from '@/components/ui/use-layout';
 import type { CatalogueEntry } from '@/server/contract/catalogue';
 import { sightingWords } from '../case/words';
 import { BenchOffer } from './bench-offer';
-import { CauseModel, CauseRemedies } from './cause-parts';
+import { CauseDrivers, CauseLooks, CauseModel, CauseRecord, CauseRemedies } from './cause-parts';
 import { alongWords } from './cause-words';
 import { PrintPage } from './print-page';
 import { stageWords } from './stage-words';
@@ -52,8 +52,11 @@ function CausePhone({ cause }: { cause: CatalogueEntry }) {
       <CauseHead cause={cause} gutters={gutter.phone} />
       <StrengthMat cause={cause} gutters={gutter.phone} />
       <View style={{ paddingHorizontal: gutter.phone, paddingBottom: space(8) }}>
-        <CauseModel cause={cause} />
+        <CauseLooks cause={cause} />
         <CauseRemedies cause={cause} />
+        <CauseDrivers cause={cause} />
+        <CauseModel cause={cause} />
+        <CauseRecord cause={cause} />
       </View>
     </View>
   );
@@ -66,14 +69,17 @@ function CauseWide({ cause }: { cause: CatalogueEntry }) {
       <View style={{ flex: 1, minWidth: 0, paddingBottom: space(8) }}>
         <CauseHead cause={cause} gutters={gutter.wide} />
         <StrengthMat cause={cause} gutters={gutter.wide} />
-        <View style={{ paddingHorizontal: gutter.wide, maxWidth: 820 }}>
+        <View style={{ paddingHorizontal: gutter.wide, maxWidth: 960 }}>
+          <CauseRemedies cause={cause} />
           <CauseModel cause={cause} />
         </View>
       </View>
       <View
-        style={{ width: 460, paddingHorizontal: gutter.wide, paddingBottom: space(8), borderLeftWidth: 1, borderLeftColor: colours.rule }}
+        style={{ width: 400, paddingHorizontal: gutter.wide, paddingBottom: space(8), borderLeftWidth: 1, borderLeftColor: colours.rule }}
       >
-        <CauseRemedies cause={cause} />
+        <CauseLooks cause={cause} />
+        <CauseDrivers cause={cause} />
+        <CauseRecord cause={cause} />
       </View>
     </View>
   );

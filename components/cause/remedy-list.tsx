@@ -1,48 +1,57 @@
-/** What can be changed about a cause: what, who may do it, and its price. A price that touches SAR, slew or implants is marked. */
+/** What can be changed: a table of prices where there is room, else a list in which each remedy has a row of words for what it moves. */
 import { View } from 'react-native';
-import { Glyph } from '@/components/ui/glyph';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
+import { useLayout } from '@/components/ui/use-layout';
 import type { CatalogueEntry } from '@/server/contract/catalogue';
+import { PriceWord } from './price-word';
+import { prices, priceWord } from './price-words';
+import { RemedyTable } from './remedy-table';
 
-type Remedy = CatalogueEntry['remedies'][number];
+interface RemedyListProps {
+  name: string;
+  remedies: CatalogueEntry['remedies'];
+}
 
-/** A remedy that may leave an implant's conditions or an operating mode: it says so in its price. */
-export const needsCare = ({ price }: Remedy): boolean => /\b(SAR|slew|implant|nerve stimulation|operating mode)\b/i.test(price);
-
-export function RemedyList({ remedies }: { remedies: readonly Remedy[] }) {
+function Remedy({ remedy: { change, who, price: sentence, moves } }: { remedy: CatalogueEntry['remedies'][number] }) {
   const { colours } = useTheme();
+  const moved = prices.filter((price) => priceWord(price, moves) !== null);
   return (
-    <View role="list">
-      {remedies.map((remedy) => {
-        const care = needsCare(remedy);
-        return (
-          <View
-            role="listitem"
-            key={remedy.change}
-            style={{ paddingTop: 9, paddingBottom: space(2), borderBottomWidth: 1, borderBottomColor: colours.rule }}
-          >
-            <View style={{ flexDirection: 'row', gap: space(3), alignItems: 'baseline' }}>
-              <Text variant="caseTitle" style={{ flex: 1, fontSize: 15 }}>
-                {remedy.change}
-              </Text>
-              <Text variant="small" tone="inkSoft">
-                {remedy.who}
-              </Text>
-            </View>
-            <View style={{ flexDirection: 'row', gap: 6, paddingTop: 3 }}>
-              {care ? <Glyph name="danger" colour={colours.madder} size={14} /> : null}
-              <Text variant="small" tone={care ? 'madder' : 'inkSoft'} style={{ flex: 1 }}>
-                <Text variant="small" tone="inkFaint">
-                  price{' '}
-                </Text>
-                {remedy.price}
-              </Text>
-            </View>
-          </View>
-        );
-      })}
+    <View role="listitem" style={{ paddingTop: 9, paddingBottom: space(2), gap: 3, borderBottomWidth: 1, borderBottomColor: colours.rule }}>
+      <Text variant="caseTitle" style={{ fontSize: 15 }}>
+        {change}
+      </Text>
+      <View style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: space(4), rowGap: 2 }}>
+        {moved.map((price) => (
+          <PriceWord key={price} price={price} moves={moves} named />
+        ))}
+        {moved.length === 0 ? (
+          <Text variant="small" tone="inkFaint">
+            scan the same
+          </Text>
+        ) : null}
+      </View>
+      <Text variant="detail" tone="inkSoft">
+        {sentence}
+      </Text>
+      {who === 'technologist' ? null : (
+        <Text variant="small" tone="inkFaint">
+          {who}
+        </Text>
+      )}
+    </View>
+  );
+}
+
+export function RemedyList({ name, remedies }: RemedyListProps) {
+  const wide = useLayout() === 'wide';
+  if (wide) return <RemedyTable name={name} remedies={remedies} />;
+  return (
+    <View role="list" aria-label={name}>
+      {remedies.map((remedy) => (
+        <Remedy key={remedy.change} remedy={remedy} />
+      ))}
     </View>
   );
 }

@@ -9,6 +9,9 @@ import { Text } from './text';
 import { fonts, radius, space, touchTarget } from './theme';
 import { useTheme } from './theme-context';
 
+/** A longer value is set smaller, on two lines where it must. */
+const shortValue = 24;
+
 interface SelectProps {
   label: string;
   rows: readonly MenuRow[];
@@ -67,8 +70,12 @@ export function Select({ label, rows, value, onChange, look = 'field', disabled 
           ) : null}
           <Text
             variant={filter ? 'small' : 'mono'}
-            numberOfLines={1}
-            style={filter ? { fontFamily: fonts.monoMedium } : { flex: 1, fontSize: 16 }}
+            numberOfLines={filter ? 1 : 2}
+            style={
+              filter
+                ? { fontFamily: fonts.monoMedium }
+                : { flex: 1, fontSize: shown.length > shortValue ? 13 : 16, lineHeight: shown.length > shortValue ? 16 : 20 }
+            }
           >
             {shown}
           </Text>

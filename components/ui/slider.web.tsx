@@ -24,6 +24,10 @@ const rangeRules = `
 /** An end of the range without trailing zeros: it is read at a glance, beside the exact value. */
 const shortest = (value: number): string => withMinus(String(Number(value.toFixed(4))));
 
+/** Letters of label and unit that fit on one line with the value and the range; longer ones are set on two lines, without the range. */
+const shortWords = 18;
+const longLabel = { flex: 1, minWidth: 0, lineHeight: 14 } as const;
+
 const fractionOf = (value: number, min: number, max: number): number =>
   max > min ? Math.min(1, Math.max(0, (value - min) / (max - min))) : 0;
 
@@ -35,6 +39,7 @@ export function Slider(props: SliderProps) {
   const [refused, setRefused] = useState<string | null>(null);
   const decimals = decimalsOf(step);
   const wrong = error ?? refused;
+  const long = label.length + unit.length > shortWords;
   const change = (next: number): void => {
     setRefused(null);
     onChange(next);
@@ -42,13 +47,22 @@ export function Slider(props: SliderProps) {
   return (
     <View>
       <View style={{ height: 52, paddingTop: 4 }} onLayout={({ nativeEvent }) => setLength(Math.round(nativeEvent.layout.width))}>
-        <View style={{ flexDirection: 'row', alignItems: 'baseline', gap: space(2), zIndex: 1, pointerEvents: 'box-none' }}>
-          <Text variant="mono" numberOfLines={1} style={{ pointerEvents: 'none', flexShrink: 0, maxWidth: '60%' }} aria-hidden>
+        <View
+          style={{ flexDirection: 'row', alignItems: long ? 'center' : 'baseline', gap: space(2), zIndex: 1, pointerEvents: 'box-none' }}
+        >
+          <Text
+            variant={long ? 'small' : 'mono'}
+            numberOfLines={long ? 2 : 1}
+            style={[{ pointerEvents: 'none' }, long ? longLabel : { flexShrink: 1 }]}
+            aria-hidden
+          >
             {label}
           </Text>
-          <Text variant="small" tone="inkFaint" style={{ pointerEvents: 'none', flex: 1, minWidth: 0 }} numberOfLines={1} aria-hidden>
-            {`${shortest(min)} – ${shortest(max)}`}
-          </Text>
+          {long ? null : (
+            <Text variant="small" tone="inkFaint" style={{ pointerEvents: 'none', flex: 1, minWidth: 0 }} numberOfLines={1} aria-hidden>
+              {`${shortest(min)} – ${shortest(max)}`}
+            </Text>
+          )}
           <NumberInput
             label={`${label}, ${unit}`}
             value={value}
@@ -62,7 +76,7 @@ export function Slider(props: SliderProps) {
               onLetGo?.();
             }}
           />
-          <Text variant="mono" tone="inkFaint" style={{ minWidth: 28, maxWidth: 72, pointerEvents: 'none' }} numberOfLines={1} aria-hidden>
+          <Text variant="mono" tone="inkFaint" style={{ minWidth: 28, flexShrink: 0, pointerEvents: 'none' }} numberOfLines={1} aria-hidden>
             {unit}
           </Text>
         </View>
@@ -83,6 +97,7 @@ export function Slider(props: SliderProps) {
         <input
           type="range"
           className="range"
+          title={`${label}, ${shortest(min)} to ${shortest(max)} ${unit}`.trim()}
           aria-label={label}
           aria-valuetext={`${fixed(value, decimals)} ${unit}`}
           aria-invalid={wrong ? true : undefined}

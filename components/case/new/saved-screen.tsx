@@ -80,7 +80,7 @@ function ChangeNow({ seen }: { seen: Case['seen'] }) {
           <Text variant="detail" tone="inkSoft">
             {cause.looks.image}
           </Text>
-          <RemedyList remedies={cause.remedies} />
+          <RemedyList name={`what I can change now: ${cause.title}`} remedies={cause.remedies} />
         </View>
       ))}
       <Deference />
