@@ -3,12 +3,15 @@
  * complex ones as complex64. Display form: uint16 between `low` and `high`, a complex plane as `<name>.log` (log10 of the magnitude
  * over its maximum, not below −8) and `<name>.phase` (−π to π). Nothing pads: a plane may begin at an odd multiple of two bytes.
  */
-import type { ComplexPlane, Grid, Plane } from '../recon/grid';
+import { magnitude, type ComplexPlane, type Grid, type Plane } from '../recon/grid';
 import { logFloor, writeLevels, writeLogLevels, writePhaseLevels } from './display-levels';
 import type { PlaneDescription, PlaneForm, Planes } from './job';
 
 export type NamedPlane = { readonly name: string } & (
-  { readonly domain: 'image'; readonly plane: Plane } | { readonly domain: 'kspace'; readonly plane: ComplexPlane }
+  | { readonly domain: 'image'; readonly plane: Plane }
+  /** An image that has a phase of its own: in display form its magnitude, under its name, and its phase. */
+  | { readonly domain: 'complex-image'; readonly plane: ComplexPlane }
+  | { readonly domain: 'kspace'; readonly plane: ComplexPlane }
 );
 
 /** Part of an answer: what it is, how many bytes it takes, and how they are written. */
@@ -54,18 +57,20 @@ function interleave({ re, im }: ComplexPlane, samples: Float32Array): void {
 }
 
 function display(named: NamedPlane): Part[] {
-  if (named.domain === 'image') {
-    const { values } = named.plane;
-    const [low, most] = extremes(values);
-    // A flat plane is all zeros with high above low.
-    const high = most > low ? most : low + 1;
-    return [inLevels(named, named.name, [low, high], (levels) => writeLevels(values, [low, high], levels))];
-  }
+  if (named.domain === 'image') return [realLevels(named, named.plane.values)];
   const { name, plane } = named;
-  return [
-    inLevels(named, `${name}.log`, [logFloor, 0], (levels) => writeLogLevels(plane, levels)),
-    inLevels(named, `${name}.phase`, [-Math.PI, Math.PI], (levels) => writePhaseLevels(plane, levels)),
-  ];
+  const modulus =
+    named.domain === 'kspace'
+      ? inLevels(named, `${name}.log`, [logFloor, 0], (levels) => writeLogLevels(plane, levels))
+      : realLevels(named, magnitude(plane).values);
+  return [modulus, inLevels(named, `${name}.phase`, [-Math.PI, Math.PI], (levels) => writePhaseLevels(plane, levels))];
+}
+
+function realLevels(named: NamedPlane, values: Float64Array): Part {
+  const [low, most] = extremes(values);
+  // A flat plane is all zeros with high above low.
+  const high = most > low ? most : low + 1;
+  return inLevels(named, named.name, [low, high], (levels) => writeLevels(values, [low, high], levels));
 }
 
 function inLevels(named: NamedPlane, name: string, [low, high]: readonly [number, number], write: (levels: Uint16Array) => void): Part {
@@ -111,7 +116,7 @@ function extremes(values: Float64Array): [number, number] {
 
 /** Name, size and place. Image grids are in metres and travel in millimetres; k-space grids are in cycles per metre already. */
 function describe({ name, domain, plane }: NamedPlane): Omit<PlaneDescription, 'type'> {
-  const unit = domain === 'image' ? 1000 : 1;
+  const unit = domain === 'kspace' ? 1 : 1000;
   const { rows, columns, spacing, origin }: Grid = plane;
   const pair = ([row, column]: readonly [number, number]): [number, number] => [written(row * unit), written(column * unit)];
   return { name, rows, columns, spacing: pair(spacing), origin: pair(origin) };

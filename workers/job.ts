@@ -1,6 +1,8 @@
 /** Messages between the server and its worker threads. Image values are shared memory; what comes back is moved, never copied. */
 import type { Acquisition } from '../recon/acquisition';
+import type { Parts } from '../recon/complex-image';
 import type { Recipe } from '../recon/recipe';
+import type { Derivation } from '../server/dicom/derived/derivation';
 
 /** One frame of a stored image: float32 values, [frame, row, column], where `isComplex` re and im in turn. */
 export interface ImageSource {
@@ -77,12 +79,43 @@ export interface TrialResult {
   readonly kspaceThumbnail: Uint8Array;
 }
 
+export type ExportForm = 'derived.dcm' | 'image.png' | 'image16.png' | 'kspace.png' | 'kspace16.png' | 'image.npy' | 'kspace.npy';
+
+/** Runs a recipe to hand its result out as a file that says it is simulated. */
+export interface ExportJob {
+  readonly kind: 'export';
+  readonly form: ExportForm;
+  readonly source: ImageSource;
+  readonly recipe: Recipe;
+  readonly acquisition: Acquisition;
+  readonly about: Derivation;
+}
+export interface ExportResult {
+  readonly bytes: Uint8Array;
+  /** SHA-256 of the float32 image plane, as of a trial. */
+  readonly digest: string;
+}
+
 /** The stored values of an image, or their transform. */
 export interface PixelsJob {
   readonly kind: 'pixels';
   readonly source: ImageSource;
   readonly domain: Domain;
   readonly form: PlaneForm;
+}
+
+/** Makes a complex image of two stored ones; values are all frames of each, the result re and im in turn. */
+export interface PairJob {
+  readonly kind: 'pair';
+  readonly parts: Parts;
+  readonly first: SharedArrayBuffer;
+  readonly second: SharedArrayBuffer;
+}
+export interface PairResult {
+  /** Float32 values as bytes. */
+  readonly values: Uint8Array;
+  /** Of the magnitude, for the first window. */
+  readonly range: readonly [number, number];
 }
 
 /** A small PNG of an image or of its log-magnitude k-space. `window`: the values drawn black and white. */

@@ -10,8 +10,12 @@ import { join } from 'node:path';
 import { Piscina } from 'piscina';
 import type { Read } from '../server/dicom/read';
 import type {
+  ExportJob,
+  ExportResult,
   MeasureJob,
   MeasureResult,
+  PairJob,
+  PairResult,
   PixelsJob,
   Planes,
   SimulateJob,
@@ -27,6 +31,8 @@ import type { ReadDicomJob } from './read-dicom.worker';
 export interface WorkerFiles {
   readonly simulate: string;
   readonly readDicom: string;
+  /** Not of the pool: the thread that listens for scanners. */
+  readonly dicomNode: string;
   readonly execArgv: string[];
 }
 
@@ -34,6 +40,7 @@ export interface WorkerFiles {
 export const workersIn = (folder: string, extension: '.ts' | '.mjs'): WorkerFiles => ({
   simulate: join(folder, `simulate.worker${extension}`),
   readDicom: join(folder, `read-dicom.worker${extension}`),
+  dicomNode: join(folder, `dicom-node.worker${extension}`),
   execArgv: extension === '.ts' ? ['--import', 'tsx'] : [],
 });
 
@@ -41,10 +48,12 @@ export interface WorkerPool {
   /** Every job ends early, with an AbortError, once `gone` aborts. */
   simulate(job: SimulateJob, gone?: AbortSignal): Promise<SimulateResult>;
   trial(job: TrialJob, gone?: AbortSignal): Promise<TrialResult>;
+  exported(job: ExportJob, gone?: AbortSignal): Promise<ExportResult>;
   pixels(job: PixelsJob, gone?: AbortSignal): Promise<Planes>;
   thumbnail(job: ThumbnailJob, gone?: AbortSignal): Promise<ThumbnailResult>;
   swatch(job: SwatchJob, gone?: AbortSignal): Promise<ThumbnailResult>;
   measure(job: MeasureJob, gone?: AbortSignal): Promise<MeasureResult>;
+  pair(job: PairJob, gone?: AbortSignal): Promise<PairResult>;
   /** Reads one file; `undefined` when it took longer than `limitMs`, whose thread is then stopped. */
   readDicom(job: ReadDicomJob, limitMs: number): Promise<Read | undefined>;
   /** Threads that are up. */
@@ -63,7 +72,7 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
   const pool = new Piscina({ ...shared, filename: files.simulate, minThreads: threads, maxThreads: threads, maxQueue: longestQueue });
   const reader = openReader(new Piscina({ ...shared, filename: files.readDicom, minThreads: 1, maxThreads: 1 }));
   const run = async <Result>(
-    job: SimulateJob | TrialJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob,
+    job: SimulateJob | TrialJob | ExportJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob | PairJob,
     gone?: AbortSignal,
   ): Promise<Result> => {
     gone?.throwIfAborted();
@@ -77,10 +86,12 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
   return {
     simulate: run<SimulateResult>,
     trial: run<TrialResult>,
+    exported: run<ExportResult>,
     pixels: run<Planes>,
     thumbnail: run<ThumbnailResult>,
     swatch: run<ThumbnailResult>,
     measure: run<MeasureResult>,
+    pair: run<PairResult>,
     readDicom: reader.read,
     threads: () => pool.threads.length + reader.threads(),
     async close() {

@@ -1,17 +1,23 @@
 /** Runs transforms, recipes and small pictures on a worker thread. Parses the message, calls recon, hands the bytes back. */
-import { createHash } from 'node:crypto';
 import { performance } from 'node:perf_hooks';
+import { complexOf, magnitudeOf } from '../recon/complex-image';
 import { transform } from '../recon/fourier';
 import { prepare, simulate, type PreparedObject, type Simulation } from '../recon/simulate';
 import type { Recipe } from '../recon/recipe';
+import { rangeOf } from '../server/dicom/value-range';
 import { compareNumbers, type Reference } from './compare-numbers';
 import { encodePlanes, kspaceWindow, logMagnitude, type NamedPlane } from './encode-planes';
+import { digestOf, exportedFile } from './exported-file';
 import { handBack } from './hand-back';
 import { measure } from './measure';
 import type {
+  ExportJob,
+  ExportResult,
   ImageSource,
   MeasureJob,
   MeasureResult,
+  PairJob,
+  PairResult,
   PixelsJob,
   PlaneName,
   Planes,
@@ -27,18 +33,22 @@ import { smallPicture } from './small-picture';
 import { objectOf, pictureOf } from './stored-frame';
 import { drawSwatch } from './swatch';
 
-type Job = SimulateJob | TrialJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob;
+type Job = SimulateJob | TrialJob | ExportJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob | PairJob;
 
 /** Objects kept with their transform while sliders move: the image, the one beside it, with and without a phase. */
 const preparedLimit = 4;
 const prepared = new Map<string, PreparedObject>();
 
-export default function runJob(job: Job): SimulateResult | TrialResult | Planes | ThumbnailResult | MeasureResult {
+export default function runJob(
+  job: Job,
+): SimulateResult | TrialResult | ExportResult | Planes | ThumbnailResult | MeasureResult | PairResult {
   switch (job.kind) {
     case 'simulate':
       return runSimulation(job);
     case 'trial':
       return runTrial(job);
+    case 'export':
+      return runExport(job);
     case 'pixels':
       return readPixels(job);
     case 'thumbnail':
@@ -47,6 +57,8 @@ export default function runJob(job: Job): SimulateResult | TrialResult | Planes 
       return drawSwatch(job);
     case 'measure':
       return measure(pictureOf(job.source), job);
+    case 'pair':
+      return pair(job);
   }
 }
 
@@ -64,22 +76,40 @@ function runSimulation({ source, recipe, acquisition, outputs, compareWith, form
 
 function runTrial({ source, recipe, acquisition, compareWith, window }: TrialJob): TrialResult {
   const { image, kspaceOfImage } = simulate(preparedObject(source, recipe), recipe, acquisition);
-  const { bytes } = encodePlanes([{ name: 'image', domain: 'image', plane: image }], 'exact');
   const log = logMagnitude(kspaceOfImage());
   return {
-    digest: createHash('sha256').update(bytes).digest('hex'),
+    digest: digestOf(image),
     numbers: compareNumbers(image, compareWith && referenceOf(compareWith), acquisition),
     imageThumbnail: smallPicture({ values: image.values, grid: image, window, simulated: true }),
     kspaceThumbnail: smallPicture({ values: log, grid: { ...image, spacing: [1, 1] }, window: kspaceWindow, simulated: true }),
   };
 }
 
+function runExport({ source, recipe, acquisition, form, about }: ExportJob): ExportResult {
+  const simulation = simulate(preparedObject(source, recipe), recipe, acquisition);
+  const bytes = exportedFile(simulation, form, about);
+  return handBack({ bytes, digest: digestOf(simulation.image) }, [bytes.buffer]);
+}
+
 function readPixels({ source, domain, form }: PixelsJob): Planes {
-  const plane = pictureOf(source);
-  const named: NamedPlane =
-    domain === 'image' ? { name: 'image', domain, plane } : { name: 'kspace', domain, plane: preparedObject(source, undefined).kspace() };
-  const planes = encodePlanes([named], form);
+  const planes = encodePlanes([domain === 'image' ? storedPlane(source) : kspacePlane(source)], form);
   return handBack(planes, [planes.bytes.buffer]);
+}
+
+const storedPlane = (source: ImageSource): NamedPlane =>
+  source.isComplex
+    ? { name: 'image', domain: 'complex-image', plane: objectOf(source) }
+    : { name: 'image', domain: 'image', plane: pictureOf(source) };
+const kspacePlane = (source: ImageSource): NamedPlane => ({
+  name: 'kspace',
+  domain: 'kspace',
+  plane: preparedObject(source, undefined).kspace(),
+});
+
+function pair({ parts, first, second }: PairJob): PairResult {
+  const values = complexOf(parts, new Float32Array(first), new Float32Array(second));
+  const bytes = new Uint8Array(values.buffer);
+  return handBack({ values: bytes, range: rangeOf(magnitudeOf(values)) }, [bytes.buffer]);
 }
 
 function drawThumbnail({ source, domain, window }: ThumbnailJob): ThumbnailResult {

@@ -21,6 +21,9 @@ export const imageSchema = z.object({
   component: z.enum(components),
   use: z.enum(uses),
   kspace: z.enum(kspaceOrigins),
+  /** A secondary capture may show a name in its pixels. `false`: whoever uploaded it has not looked yet, sees it alone, and it cannot be put on a
+   *  case; `true`: looked, and there is no text; null: nobody need look. */
+  confirmedNoText: z.boolean().nullable(),
   /** Row, column; null where the header is silent: millimetres are then unknown, and 1 mm is assumed in planes. */
   spacingMm: z.tuple([z.number(), z.number()]).nullable(),
   /** A robust range of the stored values for the first window: 1st and 99.8th percentile. */
@@ -84,6 +87,47 @@ export const readImage = route({
   output: imageSchema,
 });
 
+export const confirmNoText = route({
+  method: 'patch',
+  path: '/api/images/:imageId',
+  summary: 'Say, after looking, that a secondary capture shows no name and no text. Only whoever uploaded it may',
+  access: everyMember,
+  params: imageParams,
+  body: z.object({ confirmedNoText: z.literal(true) }),
+  output: imageSchema,
+});
+
+export const discardImage = route({
+  method: 'delete',
+  path: '/api/images/:imageId',
+  summary: 'Take away a secondary capture that does show text. Only whoever uploaded it may, before it is confirmed',
+  access: everyMember,
+  params: imageParams,
+  status: 204,
+});
+
+/** An image that makes a complex one together with another. */
+export const pairSchema = z.object({ imageId: identifier, component: z.enum(components) });
+export const readPairs = route({
+  method: 'get',
+  path: '/api/images/:imageId/pairs',
+  summary: 'Images of the same exam and place with which this one makes a complex image',
+  access: everyMember,
+  params: imageParams,
+  output: z.array(pairSchema),
+});
+
+/** 422 with the reason where the two do not belong together. */
+export const makeComplexImage = route({
+  method: 'post',
+  path: '/api/images/complex',
+  summary: 'Make a complex image of magnitude and phase, or of real and imaginary part',
+  access: everyMember,
+  status: 201,
+  body: z.union([z.object({ magnitudeId: identifier, phaseId: identifier }), z.object({ realId: identifier, imaginaryId: identifier })]),
+  output: imageSchema,
+});
+
 export const correctFacts = route({
   method: 'patch',
   path: '/api/images/:imageId/facts',
@@ -107,10 +151,10 @@ export const readPixels = route({
 export const readThumbnail = route({
   method: 'get',
   path: '/api/images/:imageId/thumbnail',
-  summary: 'A small PNG of the image or of its log-magnitude k-space',
+  summary: 'A small PNG of a frame or of its log-magnitude k-space',
   access: everyMember,
   params: imageParams,
-  query: z.object({ domain: z.enum(['image', 'kspace']).default('image') }),
+  query: z.object({ frame: z.coerce.number().int().min(0).default(0), domain: z.enum(['image', 'kspace']).default('image') }),
   answers: 'binary',
 });
 

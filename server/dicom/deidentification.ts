@@ -10,6 +10,7 @@ import { deviceNames, screenedDevice } from './facts/device';
 import { namesNames, screenedName } from './facts/names';
 import { timeSource } from './facts/time-of-day';
 import { screenedWords, wordsNames } from './facts/words';
+import { groupsOfFile, groupTags, itemOf } from './functional-groups';
 import type { Header } from './header';
 import { identifierNames } from './unique-identifiers';
 
@@ -22,18 +23,30 @@ const attributes: readonly Attribute[] = Object.values(allowList);
 
 type Elements = Readonly<DataSet['elements']>;
 
-/** @param before the elements up to the pixel data
+/** @param dataSet the elements up to the pixel data
  *  @param after those behind it, as far as they could be read; none of them is stored, whatever its tag */
-export function deidentificationOf(before: Elements, after: Elements, header: Header): Deidentification {
-  const { stored, replaced } = fates(before, header);
-  const top = Object.keys(before).filter((tag) => !stored.has(tag) && !replaced.has(tag));
-  const removed = [...top, ...tagsInItems(before), ...Object.keys(after), ...tagsInItems(after)];
+export function deidentificationOf(dataSet: DataSet, after: Elements, header: Header): Deidentification {
+  const before: Elements = dataSet.elements;
+  const grouped = groupedTags(dataSet);
+  const { stored, replaced } = fates(new Set([...Object.keys(before), ...grouped]), header);
+  const isUsed = (tag: string): boolean => stored.has(tag) || replaced.has(tag) || groupTags.has(tag);
+  const top = Object.keys(before).filter((tag) => !isUsed(tag));
+  const inItems = tagsInItems(before).filter((tag) => !groupTags.has(tag) && !(grouped.has(tag) && isUsed(tag)));
+  const removed = [...top, ...inItems, ...Object.keys(after), ...tagsInItems(after)];
   return { removed: listed(removed), replaced: listed([...replaced]) };
 }
 
+/** Attributes of the allow-list that stand in the functional group where they belong. */
+function groupedTags(dataSet: DataSet): ReadonlySet<string> {
+  const groups = groupsOfFile(dataSet);
+  const isIn = ({ tag, group }: Attribute): boolean =>
+    group !== undefined && groups.some((item) => itemOf(item, group, 0)?.elements[tag] !== undefined);
+  return new Set(attributes.filter(isIn).map(({ tag }) => tag));
+}
+
 /** The tags of this file that are stored as they are, and those of which something else is stored. */
-function fates(elements: Elements, header: Header): { stored: ReadonlySet<string>; replaced: ReadonlySet<string> } {
-  const stored = new Set<string>(attributes.filter(({ use, tag }) => use === 'stored' && tag in elements).map(({ tag }) => tag));
+function fates(present: ReadonlySet<string>, header: Header): { stored: ReadonlySet<string>; replaced: ReadonlySet<string> } {
+  const stored = new Set<string>(attributes.filter(({ use, tag }) => use === 'stored' && present.has(tag)).map(({ tag }) => tag));
   stored.add(pixelDataTag);
   const replaced = new Set<string>();
   const time = timeSource(header);

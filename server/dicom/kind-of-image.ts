@@ -1,9 +1,12 @@
 /**
- * Is this an image that can be worked on: one plane of MR magnitude? Each check refuses for one reason; their order puts the
- * reason first that exporting the same image again could not cure. Attributes: DICOM PS3.3 C.7.6.1, C.8.3.1, C.8.13.3.
+ * Is this an image that is taken, and what is it good for? Refusals each have one reason; their order puts the reason first that exporting the
+ * same image again could not cure. Captured, derived and reformatted images were not encoded in their own plane: they may be looked at.
+ * Attributes: DICOM PS3.3 C.7.6.1 (Image Type), C.8.3.1, C.8.6.1 (Conversion Type), C.8.13.3.
  */
+import type { Image } from '../contract/images';
 import type { Header } from './header';
-import { count, refuse, type Refused } from './refusal';
+import { refuse, type Refused } from './refusal';
+import type { Warning } from './warnings';
 
 export const mrImageStorage = '1.2.840.10008.5.1.4.1.1.4';
 const enhancedMr = new Set(['1.2.840.10008.5.1.4.1.1.4.1', '1.2.840.10008.5.1.4.1.1.4.4']);
@@ -11,41 +14,30 @@ const enhancedMrColour = '1.2.840.10008.5.1.4.1.1.4.3';
 const spectroscopy = '1.2.840.10008.5.1.4.1.1.4.2';
 const secondaryCapture = '1.2.840.10008.5.1.4.1.1.7';
 
-/** Image Type values, from the third on, which say that the image is no magnitude: one letter on most scanners, words on some
- *  (common practice; the standard leaves these values to the maker). */
-const otherComponents: Readonly<Record<string, string>> = {
-  P: 'a phase image',
-  PHASE: 'a phase image',
-  'PHASE MAP': 'a phase image',
-  R: 'the real part of a complex image',
-  REAL: 'the real part of a complex image',
-  I: 'the imaginary part of a complex image',
-  IMAGINARY: 'the imaginary part of a complex image',
-  MIXED: 'a mixture of complex components',
-};
+export interface Kind {
+  readonly use: Image['use'];
+  /** `false` where somebody has to look for text in the pixels first. */
+  readonly confirmedNoText: false | null;
+  readonly warnings: readonly Warning[];
+}
 
-/** The private number by which one maker tells the component, where Image Type does not (from memory: GE, image kind). */
-const privateComponents: readonly string[] = ['M', 'P', 'R', 'I'];
-const privateCreatorOfComponents = 'GEMS_PARM_01';
-
-type Check = (header: Header) => Refused | undefined;
-
-export function refuseKindOfImage(header: Header): Refused | undefined {
-  for (const check of [secondaryCaptures, otherModalities, burnedInText, enhanced, mosaic, multiFrame, colour, components]) {
+export function kindOf(header: Header): Kind | Refused {
+  for (const check of [otherModalities, burnedInText, colour]) {
     const refused = check(header);
     if (refused !== undefined) return refused;
   }
-  return undefined;
+  if (isCaptured(header)) return { use: 'look-only', confirmedNoText: false, warnings: [captured] };
+  const made = computed(header) ?? reformatted(header);
+  return { use: made?.use ?? 'measured', confirmedNoText: null, warnings: made === undefined ? [] : [made.warning] };
 }
 
-const secondaryCaptures: Check = (header) => {
-  const captured = header.text('sopClass')?.startsWith(secondaryCapture) === true || header.text('conversionType') !== undefined;
-  if (!captured) return undefined;
-  return refuse(
-    'not-mr',
-    'This is a secondary capture, a picture of a screen or of a film: it is not the image, and may show names. Send the original.',
-  );
-};
+type Check = (header: Header) => Refused | undefined;
+
+const isCaptureClass = (sopClass: string | undefined): boolean =>
+  sopClass === secondaryCapture || sopClass?.startsWith(`${secondaryCapture}.`) === true;
+
+/** Conversion Type belongs to secondary captures and scanned films, whatever class they call themselves. */
+const isCaptured = (header: Header): boolean => isCaptureClass(header.text('sopClass')) || header.text('conversionType') !== undefined;
 
 const otherModalities: Check = (header) => {
   const modality = header.text('modality');
@@ -53,8 +45,8 @@ const otherModalities: Check = (header) => {
   if (modality === undefined) return refuse('not-mr', 'The header does not say that this is an MR image (no modality).');
   if (modality !== 'MR') return refuse('not-mr', `${modalityInWords(modality)} Only MR images are taken.`);
   if (sopClass === spectroscopy) return refuse('not-mr', 'This is MR spectroscopy: it holds spectra and no image.');
-  const image = sopClass === undefined || sopClass === mrImageStorage || enhancedMr.has(sopClass) || sopClass === enhancedMrColour;
-  return image
+  const isImage = sopClass === undefined || sopClass === mrImageStorage || enhancedMr.has(sopClass) || sopClass === enhancedMrColour;
+  return isImage || isCaptureClass(sopClass)
     ? undefined
     : refuse('not-mr', 'This comes from an MR scanner but is no MR image (a report, raw data or a file of the maker’s own kind).');
 };
@@ -71,45 +63,52 @@ const burnedInText: Check = (header) =>
       )
     : undefined;
 
-const enhanced: Check = (header) => {
-  const sopClass = header.text('sopClass');
-  if (sopClass === enhancedMrColour) return refuse('colour', 'This is a colour image; only greyscale magnitude is taken.');
-  if (sopClass === undefined || !enhancedMr.has(sopClass)) return undefined;
-  return refuse('multi-frame', 'This is an enhanced MR object: not read yet; export it as classic single-frame MR images.');
-};
-
-const mosaic: Check = (header) =>
-  header.texts('imageType').includes('MOSAIC')
-    ? refuse('mosaic', 'This is a mosaic, many slices tiled in one picture: its transform means nothing. Export the slices one by one.')
-    : undefined;
-
-const multiFrame: Check = (header) => {
-  const frames = header.number('numberOfFrames') ?? 1;
-  return frames > 1 ? refuse('multi-frame', `The file holds ${count(frames)} frames; only single images are read yet.`) : undefined;
-};
-
 const colour: Check = (header) => {
-  const photometric = header.text('photometricInterpretation');
-  if (photometric === 'MONOCHROME1') {
-    // Its largest value is black, and how large that is, is not said: the zero of the signal, and with it k-space, would be a guess.
-    return refuse(
-      'not-magnitude',
-      'The image is stored inverted (MONOCHROME1), so where its signal is zero cannot be told. Export the original image.',
-    );
+  const photometric = header.text('photometricInterpretation') ?? 'MONOCHROME2';
+  const isGrey = /^MONOCHROME[12]$/.test(photometric) && (header.number('samplesPerPixel') ?? 1) === 1;
+  if (isGrey && header.text('sopClass') !== enhancedMrColour) return undefined;
+  return refuse('colour', 'This is a colour image; only grey images are taken. Colour maps and screens hold no signal.');
+};
+
+const lookOnly = 'It can be looked at; nothing is simulated on it.';
+
+const captured: Warning = {
+  code: 'secondary-capture',
+  text: `This is a secondary capture, a picture of a screen or of a film, and not the image itself. ${lookOnly} It may show a name: whoever sent it looks first.`,
+};
+
+/** Image Type words of images that were computed from others rather than encoded in their own plane. */
+const derivedWords = new Set(
+  'DERIVED SECONDARY PROJECTION MIP MINIP MNIP REFORMATTED RESAMPLED ADC EADC FA TENSOR TRACEW SUB SUBTRACTION ADD MEAN COMPOSED SWI PERFUSION TTP RCBV RCBF'.split(
+    ' ',
+  ),
+);
+
+interface Made {
+  readonly use: Image['use'];
+  readonly warning: Warning;
+}
+
+/** `B0 MAP`, `T1 MAP`: parameters, not signal (common practice); a phase map is a phase image. */
+const isMap = (value: string): boolean => value.endsWith(' MAP') && value !== 'PHASE MAP';
+
+function computed(header: Header): Made | undefined {
+  const values = [...header.texts('imageType'), ...header.texts('frameType')];
+  const known = values.map((value) => (value.startsWith('PROJECTION') ? 'PROJECTION' : isMap(value) ? 'MAP' : value));
+  const words = [...new Set(known.filter((value) => derivedWords.has(value) || value === 'MAP'))];
+  if (words.length === 0) return undefined;
+  const text = `The image was computed from others (${words.join(', ')}): its k-space does not show how it was acquired. ${lookOnly}`;
+  return { use: 'look-only', warning: { code: 'derived', text } };
+}
+
+/** Some scanners write MPR into originals too: where the first value says ORIGINAL, the word is a doubt and no more. */
+function reformatted(header: Header): Made | undefined {
+  const values = header.texts('imageType');
+  if (!values.includes('MPR')) return undefined;
+  if (values[0] !== 'ORIGINAL') {
+    const text = `The image was reformatted (MPR): its k-space does not show how it was acquired. ${lookOnly}`;
+    return { use: 'look-only', warning: { code: 'reformatted', text } };
   }
-  const grey = (photometric ?? 'MONOCHROME2') === 'MONOCHROME2' && (header.number('samplesPerPixel') ?? 1) === 1;
-  return grey ? undefined : refuse('colour', 'This is a colour image; only greyscale magnitude is taken.');
-};
-
-const components: Check = (header) => {
-  const complexImageComponent = header.text('complexImageComponent');
-  const values = [...header.texts('imageType').slice(2), complexImageComponent ?? 'MAGNITUDE', privateComponent(header)];
-  const other = values.map((value) => otherComponents[value]).find((words) => words !== undefined);
-  if (other === undefined) return undefined;
-  return refuse('not-magnitude', `This is ${other}; only magnitude images are taken yet. Send the magnitude image of the same scan.`);
-};
-
-function privateComponent(header: Header): string {
-  if (header.text('geParametersCreator') !== privateCreatorOfComponents) return 'M';
-  return privateComponents[header.number('geImageKind') ?? 0] ?? 'M';
+  const text = 'The header says MPR: if the image was reformatted, its k-space does not show how it was acquired.';
+  return { use: 'measured', warning: { code: 'reformatted', text } };
 }

@@ -1,18 +1,25 @@
 /**
- * A frame to values: bits masked and sign-extended, padding made zero, rescaled. Sources: DICOM PS3.3 C.7.6.3 and C.11.1, PS3.5 section 8.
+ * Frames to values: bits masked and sign-extended, padding made zero, inverted where low values are bright, rescaled frame by frame, phase in
+ * radians where its unit is known. Sources: DICOM PS3.3 C.7.6.3 and C.11.1, PS3.5 section 8.
  */
+import type { StoredComponent } from './component';
 import type { Header } from './header';
-import type { Warning } from './warnings';
+import { radiansPerUnit } from './phase-unit';
+import { pixelWarnings, type Found } from './pixel-warnings';
 import { count, refuse, type Refused } from './refusal';
+import { rescaleOf } from './rescale';
+import { rangeOf } from './value-range';
+import type { Warning } from './warnings';
 
 export interface Pixels {
   readonly rows: number;
   readonly columns: number;
-  /** Rescaled, [row, column]. */
+  readonly frames: number;
+  /** Rescaled, [frame, row, column]. */
   readonly values: Float32Array<ArrayBuffer>;
-  /** 1st and 99.8th percentile of the values, padding left out. */
+  /** 1st and 99.8th percentile of the values of all frames, padding left out. */
   readonly range: readonly [number, number];
-  /** Share of pixels that are exactly zero as stored, or padding. */
+  /** Share of pixels of all frames that are exactly zero as stored, or padding. */
   readonly zeroFraction: number;
   readonly warnings: readonly Warning[];
 }
@@ -20,9 +27,6 @@ export interface Pixels {
 /** Sides in pixels. MR matrices end at 2048 in practice; smaller than 8 is no image (common practice). */
 const smallestSide = 8;
 const largestSide = 4096;
-/** Slopes of MR are within a few powers of ten of 1; far beyond, float32 would overflow. */
-const largestRescale = 1e12;
-const rangePercentiles = [0.01, 0.998] as const;
 
 /** How the pixels of a frame are written. */
 export interface Layout {
@@ -34,9 +38,11 @@ export interface Layout {
   readonly signed: boolean;
 }
 
-/** `frame` as it comes from `framesOf`. */
-export const readPixels = (frame: Uint8Array, layout: Layout, header: Header): Pixels =>
-  rescaled(storedValues(frame, layout), layout, header);
+/** One frame as it comes from `framesOf`, with the header seen for it. */
+export interface StoredFrame {
+  readonly bytes: Uint8Array;
+  readonly header: Header;
+}
 
 export function layoutOf(header: Header): Layout | Refused {
   const rows = header.number('rows');
@@ -77,34 +83,72 @@ function storedValues(frame: Uint8Array, { rows, columns, bytesPerPixel, bitsSto
   return stored;
 }
 
-/** Stored values reach from −32768 (signed) to 65535 (unsigned). */
-const signOffset = 1 << 15;
-const nStoredValues = 3 << 15;
-
-function rescaled(stored: Int32Array, layout: Layout, header: Header): Pixels {
-  const { slope, intercept, warning } = rescaleOf(header);
-  const padding = paddingValue(header, layout);
-  // Padding that stands for zero anyway needs no care of its own.
-  const mapped = padding === 0 && intercept === 0 ? undefined : padding;
-  const values = new Float32Array(stored.length);
-  const counts = new Uint32Array(nStoredValues);
-  let padded = 0;
-  let negative = 0;
-  for (let i = 0; i < stored.length; i++) {
-    const value = stored[i] as number;
-    if (value === mapped) {
-      padded++;
-      continue;
-    }
-    if (value < 0) negative++;
-    counts[value + signOffset] = (counts[value + signOffset] as number) + 1;
-    values[i] = slope * value + intercept;
-  }
+/** Values of frames that make one image: the same component, one size. */
+export function readPixels(frames: readonly StoredFrame[], layout: Layout, component: StoredComponent): Pixels {
   const { rows, columns } = layout;
-  const range = rangeOf(counts, stored.length - padded, (value) => slope * value + intercept);
-  const zeroFraction = ((counts[signOffset] as number) + padded) / stored.length;
-  const warnings = [warning, paddingWarning(padded), negativeWarning(negative)].filter((found) => found !== undefined);
-  return { rows, columns, values, range, zeroFraction, warnings };
+  const nPixels = rows * columns;
+  const values = new Float32Array(frames.length * nPixels);
+  const isPadding = new Uint8Array(values.length);
+  const found: Found = { padded: 0, negative: 0, zeros: 0, ignoredRescales: 0, inverted: false, unknownUnit: false };
+  const largest = isInverted(frames) ? largestStored(frames, layout) : undefined;
+  frames.forEach(({ bytes, header }, frame) => {
+    const map = mapOf(header, layout, component, largest);
+    if (map.isIgnored) found.ignoredRescales++;
+    if (map.isUnitUnknown) found.unknownUnit = true;
+    const padding = paddingOf(header, layout, map);
+    storedValues(bytes, layout).forEach((stored, pixel) => {
+      const at = frame * nPixels + pixel;
+      if (stored === padding) {
+        isPadding[at] = 1;
+        found.padded++;
+        return;
+      }
+      const value = map.slope * stored + map.intercept;
+      if (stored === map.zero) found.zeros++;
+      if (value < 0) found.negative++;
+      values[at] = value;
+    });
+  });
+  found.inverted = largest !== undefined;
+  const range = rangeOf(values, found.padded === 0 ? undefined : (at) => isPadding[at] === 1);
+  const zeroFraction = (found.zeros + found.padded) / values.length;
+  return { rows, columns, frames: frames.length, values, range, zeroFraction, warnings: pixelWarnings(found, component) };
+}
+
+/** What becomes of a stored value: a straight line, and which of them stands for no signal. */
+interface ValueMap {
+  readonly slope: number;
+  readonly intercept: number;
+  readonly zero: number;
+  readonly isIgnored: boolean;
+  readonly isUnitUnknown: boolean;
+}
+
+function mapOf(header: Header, layout: Layout, component: StoredComponent, largest: number | undefined): ValueMap {
+  const { slope, intercept, isIgnored } = rescaleOf(header);
+  const radians = component === 'phase' ? radiansPerUnit(header, layout) : undefined;
+  const isUnitUnknown = component === 'phase' && radians === undefined;
+  // Bright and dark are turned about the largest value that is stored, which so becomes zero, wherever the intercept would put it.
+  if (largest !== undefined) return { slope: -slope, intercept: slope * largest, zero: largest, isIgnored, isUnitUnknown };
+  const factor = radians ?? 1;
+  return { slope: factor * slope, intercept: factor * intercept, zero: 0, isIgnored, isUnitUnknown };
+}
+
+const isInverted = (frames: readonly StoredFrame[]): boolean => frames[0]?.header.text('photometricInterpretation') === 'MONOCHROME1';
+
+function largestStored(frames: readonly StoredFrame[], layout: Layout): number {
+  let largest = -Infinity;
+  for (const { bytes, header } of frames) {
+    const padding = paddingValue(header, layout);
+    for (const stored of storedValues(bytes, layout)) if (stored > largest && stored !== padding) largest = stored;
+  }
+  return Number.isFinite(largest) ? largest : 0;
+}
+
+/** Padding that stands for zero anyway needs no care of its own. */
+function paddingOf(header: Header, layout: Layout, { intercept, zero }: ValueMap): number | undefined {
+  const padding = paddingValue(header, layout);
+  return padding === 0 && zero === 0 && intercept === 0 ? undefined : padding;
 }
 
 /** The value that marks places without an image, read with the sign of the pixels whatever VR the file gave it. */
@@ -112,48 +156,4 @@ function paddingValue(header: Header, { signed }: Layout): number | undefined {
   const value = header.number('pixelPaddingValue');
   if (value === undefined) return undefined;
   return signed ? (value << 16) >> 16 : value & 0xffff;
-}
-
-function rescaleOf(header: Header): { slope: number; intercept: number; warning?: Warning } {
-  const [slope = 1] = header.numbers('rescaleSlope');
-  const [intercept = 0] = header.numbers('rescaleIntercept');
-  // NaN, which stands for what is no number, fails both.
-  if (slope >= 1 / largestRescale && slope <= largestRescale && Math.abs(intercept) <= largestRescale) return { slope, intercept };
-  const text = 'The rescale slope and intercept in the header make no sense and were left out: values are as stored.';
-  return { slope: 1, intercept: 0, warning: { code: 'rescale-ignored', text } };
-}
-
-/** Percentiles by counting; the two ends are kept apart, so that a window can be made of them. */
-function rangeOf(counts: Uint32Array, total: number, rescale: (stored: number) => number): readonly [number, number] {
-  const [low, high] = rangePercentiles.map((fraction) => rescale(storedPercentile(counts, total * fraction)));
-  const from = Math.fround(low ?? 0);
-  const to = Math.fround(high ?? 0);
-  return to > from ? [from, to] : [from, from + 1];
-}
-
-/** The smallest stored value at which more than `rank` values are counted, or the largest that occurs. */
-function storedPercentile(counts: Uint32Array, rank: number): number {
-  let seen = 0;
-  let last = 0;
-  for (let index = 0; index < counts.length; index++) {
-    const count = counts[index] as number;
-    if (count === 0) continue;
-    seen += count;
-    last = index - signOffset;
-    if (seen > rank) break;
-  }
-  return last;
-}
-
-function paddingWarning(padded: number): Warning | undefined {
-  if (padded === 0) return undefined;
-  return { code: 'padding', text: `${padded} pixels held the padding value, which marks places without an image; they were set to zero.` };
-}
-
-function negativeWarning(negative: number): Warning | undefined {
-  if (negative === 0) return undefined;
-  return {
-    code: 'negative-values',
-    text: `${negative} pixels are negative, which a magnitude cannot be: a filter, an interpolation or a subtraction made them.`,
-  };
 }

@@ -2,7 +2,9 @@
 import type { z } from 'zod';
 import type { ScanFacts } from '../contract/facts';
 import type { warningSchema } from '../contract/images';
+import type { StoredComponent } from './component';
 import type { Header } from './header';
+import type { Kind } from './kind-of-image';
 import type { Pixels } from './pixels';
 
 export type Warning = z.infer<typeof warningSchema>;
@@ -11,23 +13,25 @@ export type Warning = z.infer<typeof warningSchema>;
  *  where its scale is worth the bits (common practice). */
 const blankedFraction = 0.1;
 
-/** Image Type words of images that were computed from others rather than encoded in their own plane. */
-const derivedWords = new Set(
-  'DERIVED SECONDARY PROJECTION MIP MINIP MNIP REFORMATTED RESAMPLED ADC EADC FA TENSOR TRACEW SUB SUBTRACTION ADD MEAN COMPOSED SWI PERFUSION TTP RCBV RCBF'.split(
-    ' ',
-  ),
-);
 /** Image Type and Scan Options words of images that were filtered, normalised or corrected for distortion. */
 const filteredWords = new Set(['NORM', 'FIL', 'DIS2D', 'DIS3D', 'FILTERED_GEMS']);
 
-export function warningsOf(header: Header, facts: ScanFacts, pixels: Pixels): Warning[] {
+interface Taken {
+  readonly header: Header;
+  readonly facts: ScanFacts;
+  readonly pixels: Pixels;
+  readonly component: StoredComponent;
+  readonly kind: Kind;
+}
+
+export function warningsOf({ header, facts, pixels, component, kind }: Taken): Warning[] {
   const found = [
-    magnitudeOnly,
+    componentWarning(component),
+    ...kind.warnings,
     ...pixels.warnings,
-    derived(header),
     filtered(header),
     interpolated(facts, pixels),
-    blanked(pixels),
+    component === 'magnitude' ? blanked(pixels) : undefined,
     spacingMissing(facts),
     phaseEncodeUnknown(facts),
     bandwidthDoubtful(facts),
@@ -35,23 +39,16 @@ export function warningsOf(header: Header, facts: ScanFacts, pixels: Pixels): Wa
   return found.filter((warning) => warning !== undefined);
 }
 
-const magnitudeOnly: Warning = {
-  code: 'magnitude-only',
-  text: 'This is a magnitude image: its phase is gone. Its k-space is derived from the image and is not the scanner’s raw data.',
-};
+const partWords = { phase: 'the phase', real: 'the real part', imaginary: 'the imaginary part' } as const;
+const partners = { phase: 'magnitude', real: 'imaginary part', imaginary: 'real part' } as const;
 
-function derived(header: Header): Warning | undefined {
-  const values = header.texts('imageType');
-  const words = values.map((value) => (value.startsWith('PROJECTION') ? 'PROJECTION' : value)).filter((value) => derivedWords.has(value));
-  if (words.length > 0) {
-    return {
-      code: 'derived',
-      text: `The image was computed from others (${words.join(', ')}): its k-space does not show how it was acquired.`,
-    };
+function componentWarning(component: StoredComponent): Warning {
+  if (component === 'magnitude') {
+    const text = 'This is a magnitude image: its phase is gone. Its k-space is derived from the image and is not the scanner’s raw data.';
+    return { code: 'magnitude-only', text };
   }
-  if (!values.includes('MPR')) return undefined;
-  // Some scanners write MPR into originals too: the first value, ORIGINAL, is not overruled by it.
-  return { code: 'reformatted', text: 'The header says MPR: if the image was reformatted, its k-space does not show how it was acquired.' };
+  const text = `This is ${partWords[component]} of a complex image: alone it can be looked at. With the ${partners[component]} of the same scan it makes a complex image.`;
+  return { code: 'one-component', text };
 }
 
 function filtered(header: Header): Warning | undefined {

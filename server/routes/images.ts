@@ -1,6 +1,8 @@
 import * as contract from '../contract/images';
 import { serve, type App } from '../serve';
+import { makeComplexImage, pairsOf } from '../services/complex-image';
 import { fileReader } from '../services/file-reader';
+import { confirmNoTextOn, discardImage } from '../services/look-for-text';
 import { formAskedFor } from '../services/planes-answer';
 import { correctFacts, readImage, readImplications, readPixels, readThumbnail } from '../services/read-image';
 import { takeUpload } from '../services/upload-images';
@@ -13,6 +15,10 @@ export function serveImages(app: App): void {
     status: ({ images }) => (images.length > 0 ? contract.uploadImages.status : 422),
   });
   serve(app, contract.readImage, ({ caller, params }) => readImage(db, caller, params.imageId));
+  serve(app, contract.confirmNoText, ({ caller, params }) => confirmNoTextOn(deps, caller, params.imageId));
+  serve(app, contract.discardImage, ({ caller, params }) => discardImage(deps, caller, params.imageId));
+  serve(app, contract.readPairs, ({ caller, params }) => pairsOf(deps, caller, params.imageId));
+  serve(app, contract.makeComplexImage, ({ caller, body, gone }) => makeComplexImage(deps, caller, body, gone));
   serve(app, contract.correctFacts, ({ caller, params, body }) => correctFacts(db, caller, params.imageId, body));
   serve(app, contract.readPixels, ({ caller, params, query, request, gone }) =>
     readPixels(deps, caller, { ...params, ...query, form: formAskedFor(request) }, gone),

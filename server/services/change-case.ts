@@ -83,9 +83,11 @@ async function checkImages(db: Database, caller: Caller, images: readonly { imag
     caller.departmentId,
     images.map(({ imageId }) => imageId),
   );
+  const pathOf = (index: number) => [...root, ...(root.length > 0 ? [index] : []), 'imageId'];
   const missing = images.findIndex(({ imageId }) => !found.some(({ id }) => id === imageId));
-  if (missing < 0) return;
-  throw invalidAt([...root, ...(root.length > 0 ? [missing] : []), 'imageId'], 'there is no such image');
+  if (missing >= 0) throw invalidAt(pathOf(missing), 'there is no such image');
+  const unseen = images.findIndex(({ imageId }) => found.some(({ id, confirmedNoText }) => id === imageId && confirmedNoText === false));
+  if (unseen >= 0) throw invalidAt(pathOf(unseen), 'look at this secondary capture first, and confirm that it shows no name and no text');
 }
 
 /** The last role that an image was given counts. */

@@ -8,17 +8,22 @@ import type { Dependencies } from '../dependencies';
 import { AppError, invalidAt } from '../errors';
 import type { Caller } from './sessions';
 
-/** The image, or `not-found`: also where it is another department's. */
+/** The image, or `not-found`: also where it is another department's, or for its uploader alone. */
 export async function requireImage(db: Database, caller: Caller, imageId: string): Promise<ImageRow> {
   const row = await findImageOf(db, caller.departmentId, imageId);
-  if (row === undefined) throw new AppError('not-found');
+  if (row === undefined || isHidden(row, caller)) throw new AppError('not-found');
   return row;
 }
+
+/** A secondary capture that its uploader has not looked at yet. What a scanner sent has no uploader: whoever opens it looks. */
+const isHidden = ({ confirmedNoText, uploaderId }: ImageRow, { memberId }: Caller): boolean =>
+  confirmedNoText === false && uploaderId !== null && uploaderId !== memberId;
 
 /** An image that a request names at `path`: where there is none, the answer says at which field. */
 export async function requireNamedImage(db: Database, caller: Caller, imageId: string, path: string[]): Promise<ImageRow> {
   const row = await findImageOf(db, caller.departmentId, imageId);
-  if (row === undefined) throw new AppError('not-found', { issues: [{ path, message: 'there is no such image' }] });
+  if (row === undefined || isHidden(row, caller))
+    throw new AppError('not-found', { issues: [{ path, message: 'there is no such image' }] });
   return row;
 }
 
@@ -46,11 +51,19 @@ export function currentFacts(row: Pick<ImageRow, 'headerFacts' | 'memberFacts'>)
   return scanFactsSchema.parse({ ...facts, ...Object.fromEntries(overlaid) });
 }
 
+/** The facts of one frame: its own echo time, unless a member set another. */
+export function factsOfFrame(row: ImageRow, frame: number): ScanFacts {
+  const facts = currentFacts(row);
+  const own = frameFactsSchema.array().parse(row.frameFacts)[frame];
+  if (own === undefined || own.echoTimeMs === null || facts.echoTimeMs.origin === 'member') return facts;
+  return { ...facts, echoTimeMs: { ...facts.echoTimeMs, value: own.echoTimeMs } };
+}
+
 /** An image as the contract describes it. */
 export function describeImage(row: ImageRow): Image {
-  const { id, rows, columns, frames, component, use, kspace, spacingMm, warnings } = row;
+  const { id, rows, columns, frames, component, use, kspace, confirmedNoText, spacingMm, warnings } = row;
   return {
-    ...{ id, rows, columns, frames, component, use, kspace, spacingMm, warnings },
+    ...{ id, rows, columns, frames, component, use, kspace, confirmedNoText, spacingMm, warnings },
     series: row.seriesKey,
     frameFacts: frameFactsSchema.array().parse(row.frameFacts),
     range: [row.rangeLow, row.rangeHigh],

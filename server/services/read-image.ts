@@ -55,9 +55,14 @@ export async function readPixels(
   return planesAnswer(await deps.workers.pixels({ kind: 'pixels', source, domain, form }, gone), form);
 }
 
-export async function readThumbnail(deps: Dependencies, caller: Caller, { imageId, domain }: Asked, gone: AbortSignal): Promise<Binary> {
+export async function readThumbnail(
+  deps: Dependencies,
+  caller: Caller,
+  { imageId, frame, domain }: Asked & { frame: number },
+  gone: AbortSignal,
+): Promise<Binary> {
   const row = await requireImage(deps.db, caller, imageId);
-  const source = await sourceOf(deps, row, 0);
+  const source = await sourceOf(deps, row, frame);
   const { bytes } = await deps.workers.thumbnail({ kind: 'thumbnail', source, domain, window: [row.rangeLow, row.rangeHigh] }, gone);
   return { mediaType: 'image/png', bytes, headers: thumbnailHeaders };
 }

@@ -13,7 +13,8 @@ import type { Dependencies } from '../dependencies';
 import { acquisitionOf } from '../dicom/acquisition';
 import { AppError, invalidAt } from '../errors';
 import type { Binary } from '../serve';
-import { currentFacts, requireNamedImage, sourceOf } from './image-source';
+import { requireAnalysable } from './analysable';
+import { currentFacts, factsOfFrame, requireNamedImage, sourceOf } from './image-source';
 import { planesAnswer, type PlaneForm } from './planes-answer';
 import type { Caller } from './sessions';
 
@@ -55,20 +56,22 @@ export async function simulate(
 /** Checks images, facts and recipe of a wish. Throws AppError with the path of what is wrong. */
 export async function prepareRun(deps: Pick<Dependencies, 'db' | 'values'>, caller: Caller, wish: Wish): Promise<Run> {
   const row = await requireNamedImage(deps.db, caller, wish.imageId, ['imageId']);
-  const acquisition = acquisitionForRun(row, wish.facts?.phaseEncode);
+  requireAnalysable(row, ['imageId']);
+  const acquisition = acquisitionForRun(row, wish.frame, wish.facts?.phaseEncode);
   const recipe = checkedRecipe(wish.recipe, acquisition);
   const source = await sourceOf(deps, row, wish.frame);
   if (!wish.compareWith) return { row, source, acquisition, recipe };
 
   const other = await requireNamedImage(deps.db, caller, wish.compareWith.imageId, ['compareWith', 'imageId']);
+  requireAnalysable(other, ['compareWith', 'imageId']);
   requireSamePlane(row, other);
   const compareWith = await sourceOf(deps, other, wish.compareWith.frame, ['compareWith', 'frame']);
   return { row, source, compareWith, acquisition, recipe };
 }
 
 /** The axis is never guessed: where neither header nor member nor request says it, the request is refused. */
-function acquisitionForRun(row: ImageRow, asked: PhaseEncode | undefined): Acquisition {
-  const acquisition = acquisitionOf(currentFacts(row));
+function acquisitionForRun(row: ImageRow, frame: number, asked: PhaseEncode | undefined): Acquisition {
+  const acquisition = acquisitionOf(factsOfFrame(row, frame));
   const phaseEncode = asked ?? acquisition.phaseEncode;
   if (phaseEncode === undefined) {
     throw invalidAt(['facts', 'phaseEncode'], 'the header does not say along which axis phase was encoded: choose row or column');

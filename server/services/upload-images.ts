@@ -14,39 +14,53 @@ export async function takeUpload(
   caller: Pick<Caller, 'memberId' | 'departmentId'>,
   request: Request,
 ): Promise<UploadResult> {
-  const accepted: AcceptedImage[] = [];
+  const accepted: ImageToStore[] = [];
   const refused: Refusal[] = [];
   for (const { name, outcome } of readingsOf(request)) {
-    if ('accepted' in outcome) accepted.push(...outcome.accepted);
+    if ('accepted' in outcome) accepted.push(...outcome.accepted.map((image) => ({ ...image, fileKey: outcome.fileKey })));
     else refused.push({ ...outcome.refused, name });
   }
   return { images: await storeImages(deps, caller, accepted), refused };
 }
 
+/** Whose images they are, and through which door they came: a member's upload, unless it says that a scanner sent them. */
+export interface Origin {
+  readonly departmentId: string;
+  readonly memberId: string | null;
+  readonly arrival?: NewImage['arrival'];
+  readonly scannerId?: string;
+}
+
+/** An image with the key of the file that it came in, if it came in one. */
+export interface ImageToStore extends AcceptedImage {
+  readonly fileKey?: string;
+}
+
 /** Stores images that came through the door. An object whose row then fails is unreachable and holds no identity. */
 export async function storeImages(
   { db, objects }: Pick<Dependencies, 'db' | 'objects'>,
-  caller: Pick<Caller, 'memberId' | 'departmentId'>,
-  accepted: readonly AcceptedImage[],
+  origin: Origin,
+  accepted: readonly ImageToStore[],
 ): Promise<UploadResult['images']> {
   const rows: NewImage[] = [];
   for (const image of accepted) {
     const { values } = image;
     const valuesDigest = await objects.put(new Uint8Array(values.buffer, values.byteOffset, values.byteLength));
-    rows.push(rowOf(image, valuesDigest, caller));
+    rows.push(rowOf(image, valuesDigest, origin));
   }
   return (await addImages(db, rows)).map(describeImage);
 }
 
 function rowOf(
-  image: AcceptedImage,
+  image: ImageToStore,
   valuesDigest: string,
-  { departmentId, memberId }: Pick<Caller, 'memberId' | 'departmentId'>,
+  { departmentId, memberId, arrival, scannerId }: Origin,
 ): NewImage {
-  const { rows, columns, frames, component, use, kspace, spacingMm, range, facts, frameFacts, identifiers, warnings, deidentification } =
-    image;
+  const { rows, columns, frames, component, use, kspace, confirmedNoText, spacingMm, range } = image;
+  const { facts, frameFacts, identifiers, warnings, deidentification } = image;
   return {
-    ...{ departmentId, uploaderId: memberId, rows, columns, frames, component, use, kspace, spacingMm, valuesDigest },
+    ...{ departmentId, uploaderId: memberId, arrival, scannerId },
+    ...{ rows, columns, frames, component, use, kspace, confirmedNoText, spacingMm, valuesDigest },
     ...{ frameFacts, warnings },
     rangeLow: range[0],
     rangeHigh: range[1],
@@ -57,5 +71,6 @@ function rowOf(
     seriesKey: identifiers.series,
     frameOfReferenceKey: identifiers.frameOfReference,
     imageKey: identifiers.image,
+    fileKey: image.fileKey ?? null,
   };
 }
