@@ -57,6 +57,9 @@ test.each([
   const mass = Array.from({ length: 100 }, (_, row) => absolute(image, row, 50)).reduce((a, b) => a + b, 0);
   // But for one pixel at each edge, which shares its mass with the air beside it.
   expect(Math.abs(mass - 40)).toBeLessThan(1e-9);
+  const moment = Array.from({ length: 100 }, (_, row) => (row - 50) * absolute(image, row, 50)).reduce((a, b) => a + b, 0);
+  // About the centre line: the middle of the bar, half a line before it, goes further off by the same part.
+  expect(moment / mass).toBeCloseTo(-0.5 * (1 + scale), 9);
   const lit = Array.from({ length: 100 }, (_, row) => row).filter((row) => absolute(image, row, 50) > brightness / 2);
   expect(Math.abs(lit.length - 40 * (1 + scale))).toBeLessThanOrEqual(1);
 });
