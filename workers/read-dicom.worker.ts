@@ -1,5 +1,7 @@
-/** Reads one DICOM file on a worker thread. Message in: the bytes of a file and a key; out: `Read`, its values transferred, not copied. */
+/** Reads one DICOM file on a worker thread. Message in: the bytes of a file and a key; out: `Read`, its values transferred, not copied.
+ *  The decoders are opened with the thread, before its first file. */
 import { move, transferableSymbol, valueSymbol } from 'piscina';
+import { openDecoders } from '../server/dicom/codecs/decoders';
 import { readDicom, type Read } from '../server/dicom/read';
 
 export interface ReadDicomJob {
@@ -11,8 +13,11 @@ export interface ReadDicomJob {
 /** A result whose buffers piscina hands over instead of copying them. */
 const handedOver = (read: Read, buffers: ArrayBuffer[]) => move({ [transferableSymbol]: buffers, [valueSymbol]: read });
 
-export default function readDicomTask({ bytes, key }: ReadDicomJob): ReturnType<typeof handedOver> | Read {
-  const read = readDicom(bytes, key);
+let decoders = openDecoders();
+
+export default async function readDicomTask({ bytes, key }: ReadDicomJob): Promise<ReturnType<typeof handedOver> | Read> {
+  if ((await decoders).worn()) decoders = openDecoders();
+  const read = readDicom(bytes, key, await decoders);
   if ('refused' in read) return read;
   return handedOver(
     read,

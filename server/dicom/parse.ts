@@ -8,7 +8,7 @@ import { pixelDataTag } from './allow-list';
 import { itemsFrom, type Items } from './encapsulation';
 import { inflated } from './inflate';
 import { cut, isRefused, refuse, type Refused } from './refusal';
-import { deflated, encapsulated, explicitLittleEndian, implicitLittleEndian } from './transfer-syntax';
+import { deflated, deflatedReference, encapsulated, explicitLittleEndian, implicitLittleEndian, whyNotRead } from './transfer-syntax';
 
 export interface Parsed {
   /** Its byte array is the file, or what came out of it where the file is deflated. */
@@ -30,7 +30,8 @@ export function parse(bytes: Uint8Array): Parsed | Refused {
   if (bytes.length === 0) return refuse('empty', 'The file is empty (0 bytes). Copy or export it again.');
   const container = containerOf(bytes);
   if (isRefused(container)) return container;
-  if (!deflated.has(container.transferSyntax)) return parseDataSet(bytes, container);
+  if (container.transferSyntax === deflatedReference) return refuse('transfer-syntax', `The pixels are ${whyNotRead(deflatedReference)}.`);
+  if (container.transferSyntax !== deflated) return parseDataSet(bytes, container);
   const whole = inflated(bytes.subarray(container.start));
   return isRefused(whole) ? whole : parseDataSet(whole, { ...container, transferSyntax: explicitLittleEndian, bare: true });
 }

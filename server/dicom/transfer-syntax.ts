@@ -6,8 +6,10 @@ export const implicitLittleEndian = '1.2.840.10008.1.2';
 export const explicitLittleEndian = '1.2.840.10008.1.2.1';
 export const explicitBigEndian = '1.2.840.10008.1.2.2';
 
-/** Those whose whole data set is deflated: even the header is not readable as it stands. */
-export const deflated: ReadonlySet<string> = new Set(['1.2.840.10008.1.2.1.99']);
+/** The whole data set is deflated: even the header is not readable as it stands. */
+export const deflated = '1.2.840.10008.1.2.1.99';
+/** Deflated, and without pixels. */
+export const deflatedReference = '1.2.840.10008.1.2.4.95';
 
 /** Those whose pixels stand as they are, once a deflated file is inflated. */
 export const uncompressed: ReadonlySet<string> = new Set([implicitLittleEndian, explicitLittleEndian, explicitBigEndian]);

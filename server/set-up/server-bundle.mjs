@@ -7,8 +7,8 @@ import { join } from 'node:path';
 import { buildWhenChanged } from './built-from.mjs';
 
 const folder = 'dist-server';
-/** Packages that start threads of their own from files in their folder. */
-const external = ['piscina', 'pino', 'pino-http'];
+/** Packages that find other files in their folder: scripts of threads, WebAssembly. */
+const external = ['piscina', 'pino', 'pino-http', '@cornerstonejs/*'];
 /** CommonJS packages in an ES module still ask for Node's own modules with `require`. */
 const banner = "import { createRequire as requireFrom } from 'node:module';\nconst require = requireFrom(import.meta.url);";
 const sources = ['server', 'workers', 'recon', 'db', 'package-lock.json'];
