@@ -37,7 +37,18 @@ describe('The geometry factor', () => {
   });
 
   test('stays finite where no element tells two places apart', () => {
-    const [alike] = geometryFactors(mapsOf([[[1, 0], [1, 0]], [[0, 1], [0, 1]]])); // prettier-ignore
+    const [alike] = geometryFactors(
+      mapsOf([
+        [
+          [1, 0],
+          [1, 0],
+        ],
+        [
+          [0, 1],
+          [0, 1],
+        ],
+      ]),
+    );
     // Pivots below 1e-6 of the mean diagonal are raised to it: g = √(1 + 1e6) at most about that.
     expect(alike).toBeGreaterThan(100);
     expect(alike).toBeLessThan(1.1e3);
@@ -45,7 +56,17 @@ describe('The geometry factor', () => {
 });
 
 test('Sensitivities that reach nowhere are refused', () => {
-  expect(() => factorise(mapsOf([[[0, 0], [0, 0]]]), complexArray(4))).toThrow(RangeError); // prettier-ignore
+  expect(() =>
+    factorise(
+      mapsOf([
+        [
+          [0, 0],
+          [0, 0],
+        ],
+      ]),
+      complexArray(4),
+    ),
+  ).toThrow(RangeError);
 });
 
 test.each([2, 3, 4])('What six elements see of %i places is told apart again', (nPlaces) => {

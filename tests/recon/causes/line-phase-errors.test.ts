@@ -81,7 +81,12 @@ describe('Line by line', () => {
   const a = 2 * Math.PI * 60 * 0.033;
 
   test('ε_n = a·sin(2πf·T·n) + D·n/N + B·(2n/N − 1)², n from the first line', () => {
-    const { re, im } = actOnKspace(linePhaseErrors, column(10, () => 1), { ...none, hum: 0.4, mains: '60', drift: 1.5, bend: 0.7 }, { ...columnEncoded, repetitionTime: 0.033 }); // prettier-ignore
+    const { re, im } = actOnKspace(
+      linePhaseErrors,
+      column(10, () => 1),
+      { ...none, hum: 0.4, mains: '60', drift: 1.5, bend: 0.7 },
+      { ...columnEncoded, repetitionTime: 0.033 },
+    );
     for (let n = 0; n < 10; n++) {
       const error = 0.4 * Math.sin(a * n) + 0.15 * n + 0.7 * (n / 5 - 1) ** 2;
       expect(re[n]).toBeCloseTo(Math.cos(error), 12);

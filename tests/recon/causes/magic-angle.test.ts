@@ -65,6 +65,11 @@ describe('A tendon in a picture', () => {
     expect(values[61 * 64 + 2]).toBeCloseTo(1, 11);
   });
 
+  test('is as bright at TE 0 as asked, relative to the brightest hundredth of the object', () => {
+    const twoLevels = { ...even, re: even.re.map((value, i) => (i % 64 < 6 ? 5 * value : value)) };
+    expect(pictured(twoLevels, { ...straight, direction: 0, echoTime: 0 })[32 * 64 + 32]).toBeCloseTo(0.8 * 5, 11);
+  });
+
   test('turns with the field in the plane, and is across a field through the slice', () => {
     expect(pictured(even, { ...straight, direction: 80, inPlane: 25 })[32 * 64 + 32]).toBeCloseTo(0.8 * signal(55, 15), 11);
     expect(pictured(even, { ...straight, direction: 20, toNormal: 0 })[32 * 64 + 32]).toBeCloseTo(0.8 * signal(90, 15), 11);

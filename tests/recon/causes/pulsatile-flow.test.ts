@@ -80,3 +80,11 @@ test('The radius is a part of the field of view along the readout, where the pic
   const turned = Array.from({ length: 80 }, (_, column) => column).filter((column) => (image.re[20 * 80 + column] ?? NaN) < 0);
   expect(turned).toHaveLength(15);
 });
+
+test('Nothing flows into samples that were not taken', () => {
+  const steps = [{ cause: 'uniform-undersampling', parameters: { accelerationFactor: 2 } }, ...flow({ phaseSwing: 1 }).steps];
+  const { kspace } = simulate(object, { ...flow({}), steps }, acquisition);
+  kspace.taken.forEach((taken, i) => {
+    if (taken === 0) expect([kspace.re[i], kspace.im[i]]).toEqual([0, 0]);
+  });
+});
