@@ -39,11 +39,13 @@ const isCaptureClass = (sopClass: string | undefined): boolean =>
 /** Conversion Type belongs to secondary captures and scanned films, whatever class they call themselves. */
 const isCaptured = (header: Header): boolean => isCaptureClass(header.text('sopClass')) || header.text('conversionType') !== undefined;
 
+/** Captures of an MR console come as MR or as `other`. */
 const otherModalities: Check = (header) => {
   const modality = header.text('modality');
   const sopClass = header.text('sopClass');
   if (modality === undefined) return refuse('not-mr', 'The header does not say that this is an MR image (no modality).');
-  if (modality !== 'MR') return refuse('not-mr', `${modalityInWords(modality)} Only MR images are taken.`);
+  if (modality !== 'MR' && !(modality === 'OT' && isCaptureClass(sopClass)))
+    return refuse('not-mr', `${modalityInWords(modality)} Only MR images are taken.`);
   if (sopClass === spectroscopy) return refuse('not-mr', 'This is MR spectroscopy: it holds spectra and no image.');
   const isImage = sopClass === undefined || sopClass === mrImageStorage || enhancedMr.has(sopClass) || sopClass === enhancedMrColour;
   return isImage || isCaptureClass(sopClass)

@@ -26,7 +26,8 @@ interface Taken {
 
 export function warningsOf({ header, facts, pixels, component, kind }: Taken): Warning[] {
   const found = [
-    componentWarning(component),
+    // A picture of a screen is no part of a signal.
+    kind.confirmedNoText === null ? componentWarning(component) : undefined,
     ...kind.warnings,
     ...pixels.warnings,
     filtered(header),

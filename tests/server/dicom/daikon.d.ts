@@ -4,7 +4,7 @@ declare module 'daikon' {
     getRows(): number;
     getCols(): number;
     /** Rescaled values. */
-    getInterpretedData(asArray: false, asObject: false): Float32Array;
+    getInterpretedData(asArray: false, asObject: false, frame?: number): Float32Array;
     getTag(group: number, element: number): { value: readonly unknown[] | null } | undefined;
   }
   export const Series: { parseImage(data: DataView): Image | null };
