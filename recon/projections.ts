@@ -2,7 +2,7 @@
  * The point spread of P projections over half a turn, evenly apart, with the ramp |k| as density compensation:
  *   PSF(r) = (π/P) Σ_p h(r·n_p),  h(t) = ∫_{|k| < ½} |k| exp(i2πkt) dk = ½·sinc(t) − ¼·sinc²(t/2),  k in cycles per pixel.
  * Adjoint of the sampling with these weights is a convolution by it, exactly: filtered back projection (Ramachandran & Lakshminarayanan,
- * Proc Natl Acad Sci USA 1971;68:2236, from memory). For P → ∞ it is that of the full disc, J1(πr)/(2r), π/4 at r = 0.
+ * Proc Natl Acad Sci USA 1971;68:2236). For P → ∞ it is that of the full disc, J1(πr)/(2r), π/4 at r = 0.
  *
  * No grid is interpolated: the projections are taken of the pixels of the object, finely along each spoke.
  */

@@ -107,7 +107,7 @@ export const radialUndersampling = defineCause({
       citation:
         'Ramachandran GN, Lakshminarayanan AV. Three-dimensional reconstruction from radiographs and electron micrographs. PNAS 68:2236',
       year: 1971,
-      standing: 'from memory',
+      standing: 'confirmed',
     },
   ],
   remedies: [
