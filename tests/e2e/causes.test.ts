@@ -105,6 +105,38 @@ test('from its page a cause is opened on the bench of an open case, as a step', 
   await page.getByText('Periodic motion').first().waitFor();
 });
 
+test('a reconstruction has a page as causes have, and opens on the bench with a step that shows it', async () => {
+  opened = await visitAs(browser, 'technologist', '/causes');
+  const { page } = opened;
+  await page
+    .getByRole('region', { name: 'reconstruction' })
+    .getByRole('link', { name: /^Homodyne: / })
+    .click();
+  await page.getByRole('slider', { name: 'mild to strong' }).waitFor();
+  await page.getByRole('table', { name: 'what I can change now' }).getByRole('columnheader', { name: 'SAR' }).waitFor();
+  await drawn(page);
+  await takePicture(page, 'reconstruction-desk');
+  expect(await accessibilityFaults(page)).toEqual([]);
+  await page.getByRole('button', { name: 'try it on the bench' }).click();
+  await page.getByRole('dialog').getByRole('link').first().click();
+  await page.waitForURL(/\/bench\?add=homodyne$/);
+  await page.getByText('Partial Fourier').first().waitFor();
+});
+
+test('the form of a step shows what matters at its choices', async () => {
+  opened = await visitAs(browser, 'technologist', '/causes/periodic-motion');
+  const { page } = opened;
+  await page.getByRole('button', { name: 'try it on the bench' }).click();
+  await page.getByRole('dialog').getByRole('link').first().click();
+  await page.getByRole('slider', { name: 'Phase swing' }).waitFor();
+  expect(await page.getByRole('slider', { name: 'Displacement' }).count()).toBe(0);
+  await page.getByRole('button', { name: /^What moves: / }).click();
+  await page.getByRole('menuitemradio', { name: 'Place along readout' }).click();
+  await page.getByRole('slider', { name: 'Displacement' }).waitFor();
+  expect(await page.getByRole('slider', { name: 'Phase swing' }).count()).toBe(0);
+  await takePicture(page, 'bench-form-desk');
+});
+
 test('on paper a cause is light, whole, and without rail, buttons and slider', async () => {
   opened = await visitAs(browser, 'technologist', '/causes/periodic-motion');
   const { page } = opened;
