@@ -8,6 +8,7 @@ import { logRequests } from './log';
 import { serveCaseParts } from './routes/case-parts';
 import { serveCases } from './routes/cases';
 import { serveCatalogue } from './routes/catalogue';
+import { serveExports } from './routes/exports';
 import { serveHealth } from './routes/health';
 import { serveImages } from './routes/images';
 import { serveMeasurements } from './routes/measurements';
@@ -44,6 +45,7 @@ export function createApp(deps: Dependencies, { clientFolder }: { clientFolder?:
     serveMeasurements,
     serveCatalogue,
     serveSimulations,
+    serveExports,
     serveRegistry,
     serveCases,
     serveCaseParts,

@@ -2,6 +2,7 @@
  *  The decoders are opened with the thread, before its first file. */
 import { move, transferableSymbol, valueSymbol } from 'piscina';
 import { openDecoders } from '../server/dicom/codecs/decoders';
+import { auditedRead } from '../server/dicom/profile/stored';
 import { readDicom, type Read } from '../server/dicom/read';
 
 export interface ReadDicomJob {
@@ -17,7 +18,7 @@ let decoders = openDecoders();
 
 export default async function readDicomTask({ bytes, key }: ReadDicomJob): Promise<ReturnType<typeof handedOver> | Read> {
   if ((await decoders).worn()) decoders = openDecoders();
-  const read = readDicom(bytes, key, await decoders);
+  const read = auditedRead(readDicom(bytes, key, await decoders));
   if ('refused' in read) return read;
   return handedOver(
     read,

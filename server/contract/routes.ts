@@ -2,9 +2,11 @@
 import * as caseParts from './case-parts';
 import * as cases from './cases';
 import * as catalogue from './catalogue';
+import * as exports from './exports';
 import * as health from './health';
 import * as images from './images';
 import * as measurements from './measurements';
+import * as recipeFile from './recipe-file';
 import * as registry from './registry';
 import type { Route } from './route';
 import * as session from './session';
@@ -12,6 +14,6 @@ import * as simulations from './simulations';
 
 const isRoute = (value: unknown): value is Route => typeof value === 'object' && value !== null && 'method' in value && 'access' in value;
 
-export const routes: readonly Route[] = [session, health, images, measurements, catalogue, simulations, registry, cases, caseParts].flatMap(
+export const routes: readonly Route[] = [session, health, images, measurements, catalogue, simulations, exports, recipeFile, registry, cases, caseParts].flatMap(
   (resource) => Object.values(resource).filter(isRoute),
 );

@@ -27,7 +27,7 @@ export interface ImageToWrite {
 }
 
 /** Names this writer in its files, as PS3.10 asks for: an identifier made of a UUID once. */
-const implementationClass = '2.25.56549397983632776333917931728191179833';
+export const implementationClass = '2.25.56549397983632776333917931728191179833';
 const preamble = new Uint8Array(128);
 const prefix = new TextEncoder().encode('DICM');
 
@@ -39,12 +39,29 @@ export function writeDicom(image: ImageToWrite): Uint8Array {
   const isMeta = ({ tag }: ElementToWrite) => tag.startsWith('0002');
   const without = new Set(image.without);
   const kept = (elements: readonly ElementToWrite[]) => elements.filter(({ tag }) => !without.has(tag));
-  const meta = kept(overlaid(metaElements(image), extra.filter(isMeta)));
+  const { uids, vrEncoding } = image;
+  const written = { sopClass: mrImageStorage, sopInstance: uids.image, vrEncoding };
+  const meta = kept(overlaid(metaElements(written), extra.filter(isMeta)));
   const named = Object.entries(image.attributes ?? {}).map(([name, value]) => namedElement(name as AttributeName, value));
   const dataSet = kept(overlaid(defaultElements(image), [...named, ...extra.filter((element) => !isMeta(element))]));
+  return joined([head(meta), encodeElements(dataSet, vrEncoding)]);
+}
+
+interface Written {
+  readonly sopClass: string;
+  readonly sopInstance: string;
+  /** `explicit` where left out. */
+  readonly vrEncoding?: VrEncoding | undefined;
+}
+
+/** A file of exactly these elements; later ones replace earlier ones with the same tag. */
+export const partTen = (dataSet: readonly ElementToWrite[], written: Written): Uint8Array =>
+  joined([head(metaElements(written)), encodeElements(overlaid(dataSet, []), written.vrEncoding)]);
+
+function head(meta: readonly ElementToWrite[]): Uint8Array {
   const metaBytes = encodeElements(meta);
   const metaLength = encodeElements([{ tag: '0002,0000', vr: 'UL', value: metaBytes.length }]);
-  return joined([preamble, prefix, metaLength, metaBytes, encodeElements(dataSet, image.vrEncoding)]);
+  return joined([preamble, prefix, metaLength, metaBytes]);
 }
 
 /** Later elements replace earlier ones with the same tag. */
@@ -57,10 +74,10 @@ function namedElement(name: AttributeName, value: ElementValue): ElementToWrite 
   return { tag: `${tag.slice(1, 5)},${tag.slice(5)}`.toUpperCase(), vr, value };
 }
 
-const metaElements = ({ uids, vrEncoding }: ImageToWrite): ElementToWrite[] => [
+const metaElements = ({ sopClass, sopInstance, vrEncoding }: Written): ElementToWrite[] => [
   { tag: '0002,0001', vr: 'OB', value: Uint8Array.of(0, 1) },
-  { tag: '0002,0002', vr: 'UI', value: mrImageStorage },
-  { tag: '0002,0003', vr: 'UI', value: uids.image },
+  { tag: '0002,0002', vr: 'UI', value: sopClass },
+  { tag: '0002,0003', vr: 'UI', value: sopInstance },
   { tag: '0002,0010', vr: 'UI', value: vrEncoding === 'implicit' ? implicitLittleEndian : explicitLittleEndian },
   { tag: '0002,0012', vr: 'UI', value: implementationClass },
 ];

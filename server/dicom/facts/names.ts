@@ -18,8 +18,9 @@ export type NamesName = (typeof namesNames)[number];
 
 const longestText = 64;
 
+const unprintable = /[^\x20-\x7e]/;
+
 const identifying: readonly RegExp[] = [
-  /[^\x20-\x7e]/, // not printable ASCII
   /[\^=@]/, // person name components and groups, e-mail
   /^\s*[A-Za-z'-]+,\s*[A-Za-z]/, // surname, given name
   /\b(Mr|Mrs|Ms|Miss|Dr|Prof)\.?\s+[A-Z][a-z]/, // a form of address and a name; MR is another thing
@@ -31,7 +32,10 @@ const identifying: readonly RegExp[] = [
 ];
 
 /** True where a text may be kept: short, printable, and like nobody's name, number or date. */
-export const isHarmless = (text: string): boolean => text.length <= longestText && !identifying.some((pattern) => pattern.test(text));
+export const isHarmless = (text: string): boolean => text.length <= longestText && !unprintable.test(text) && !looksLikeSomebody(text);
+
+/** True where something in a text is like a person's name, number or date. */
+export const looksLikeSomebody = (text: string): boolean => identifying.some((pattern) => pattern.test(text));
 
 /** The text of an attribute, or what to say in its place. */
 export function screenedName(header: Header, name: NamesName): { text?: string; withheld: boolean } {
