@@ -12,7 +12,9 @@ import { serveExports } from './routes/exports';
 import { serveHealth } from './routes/health';
 import { serveImages } from './routes/images';
 import { serveMeasurements } from './routes/measurements';
+import { servePush } from './routes/push';
 import { serveRegistry } from './routes/registry';
+import { serveSeries } from './routes/series';
 import { serveSession } from './routes/session';
 import { serveSimulations } from './routes/simulations';
 import { refuseUnserved, type App } from './serve';
@@ -42,11 +44,13 @@ export function createApp(deps: Dependencies, { clientFolder }: { clientFolder?:
     serveSession,
     serveHealth,
     serveImages,
+    serveSeries,
     serveMeasurements,
     serveCatalogue,
     serveSimulations,
     serveExports,
     serveRegistry,
+    servePush,
     serveCases,
     serveCaseParts,
   ];

@@ -4,6 +4,7 @@
  */
 import { resolve } from 'node:path';
 import { z } from 'zod';
+import { aeTitleSchema } from './contract/push';
 
 const mebibyte = 1024 * 1024;
 const wholeNumber = (least: number, most: number) => z.coerce.number().int().min(least).max(most);
@@ -31,6 +32,12 @@ const variables = z.object({
   WORKER_THREADS: wholeNumber(1, 64).default(2),
   /** Seconds that reading one file may take. */
   READ_SECONDS: wholeNumber(1, 600).default(15),
+  /** Where scanners send to. Left out, nothing listens. 0 takes a free port; 104 is DICOM's own, 11112 the one without privileges. */
+  DICOM_NODE_PORT: wholeNumber(0, 65_535).optional(),
+  DICOM_NODE_HOST: z.string().min(1).default('127.0.0.1'),
+  DICOM_NODE_AE_TITLE: aeTitleSchema.default('PICKGLASS'),
+  /** Days that images wait in a scanner's inbox. */
+  INBOX_DAYS: wholeNumber(1, 3650).default(14),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
 });
 
@@ -49,6 +56,9 @@ export interface Env {
   readonly upload: { readonly fileBytes: number; readonly files: number; readonly totalBytes: number };
   readonly workerThreads: number;
   readonly readMilliseconds: number;
+  /** Undefined where it is off. */
+  readonly dicomNode: { readonly port: number; readonly host: string; readonly aeTitle: string } | undefined;
+  readonly inboxDays: number;
   readonly logLevel: string;
 }
 
@@ -77,6 +87,11 @@ export function readEnv(source: Readonly<Record<string, string | undefined>>): E
     },
     workerThreads: values.WORKER_THREADS,
     readMilliseconds: values.READ_SECONDS * 1000,
+    dicomNode:
+      values.DICOM_NODE_PORT === undefined
+        ? undefined
+        : { port: values.DICOM_NODE_PORT, host: values.DICOM_NODE_HOST, aeTitle: values.DICOM_NODE_AE_TITLE },
+    inboxDays: values.INBOX_DAYS,
     logLevel: values.LOG_LEVEL,
   };
 }

@@ -18,6 +18,8 @@ import { seedDemo } from './demo/seed-demo';
 import type { Dependencies } from './dependencies';
 import { readEnv, type Env } from './env';
 import { openLog } from './log';
+import { openDicomNode } from './push/dicom-node';
+import { keepSweeping } from './push/retention';
 import { openDiskObjects } from './storage/disk-objects';
 import { cachedImageValues } from './storage/image-values';
 import { identityKey, sessionKey } from './storage/kept-keys';
@@ -36,13 +38,35 @@ async function start(): Promise<void> {
   await step('demo department ready', () => seedDemo(deps));
   const server = createServer(createApp(deps, { clientFolder: join(project, 'dist') }));
   await listen(server, env);
+  const stopPush = await openPush(deps);
   const url = env.publicOrigin ?? `http://${env.host}:${(server.address() as AddressInfo).port}`;
   log.info({ url }, 'ready');
   process.send?.({ kind: 'ready', url, accountsFile: accountsFile(env.dataFolder) });
-  const stop = once(() => stopServing(server, close, log));
+  const stop = once(() =>
+    stopServing(
+      server,
+      async () => {
+        await stopPush();
+        await close();
+      },
+      log,
+    ),
+  );
   for (const signal of ['SIGTERM', 'SIGINT'] as const) process.once(signal, stop);
   // The parent is gone: nobody would stop this process any more.
   process.once('disconnect', stop);
+}
+
+/** What goes on without a request: the node that scanners send to, where it is switched on, and the sweeping of the inboxes. */
+async function openPush(deps: Dependencies): Promise<() => Promise<void>> {
+  const { dicomNode } = deps.env;
+  const node = dicomNode && (await openDicomNode(deps, dicomNode, workerFiles));
+  if (node) deps.log.info({ port: node.port }, 'the DICOM node listens');
+  const stopSweeping = keepSweeping(deps);
+  return async () => {
+    await node?.close();
+    await stopSweeping();
+  };
 }
 
 /** `work`, but only the first time. */

@@ -8,6 +8,7 @@ import type { Route } from './contract/route';
 import { routes } from './contract/routes';
 import type { Dependencies } from './dependencies';
 import { AppError, issuesOf } from './errors';
+import { scannerOfToken, type SendingScanner } from './push/tokens';
 import { readSession, type Caller } from './services/sessions';
 
 /** Bytes that a binary route answers with. */
@@ -59,7 +60,7 @@ export function serve<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
   options: Options<O, Caller> = {},
 ): void {
   const { access } = route;
-  if (access === 'anyone') throw new Error(`${nameOf(route)} is open to anyone: use serveAnyone`);
+  if (typeof access === 'string') throw new Error(`${nameOf(route)} is not for members: use serveAnyone or serveScanner`);
   const admit = async (request: Request): Promise<Caller> => {
     const caller = await readSession(app.deps, request.headers.cookie);
     if (caller === undefined) throw new AppError('not-signed-in');
@@ -77,6 +78,23 @@ export function serveAnyone<P extends z.ZodType, Q extends z.ZodType, B extends 
 ): void {
   if (route.access !== 'anyone') throw new Error(`${nameOf(route)} is for members: use serve`);
   register(app, route, { admit: () => Promise.resolve(undefined), handler, options: {} });
+}
+
+/** Serves a route that the contract opens to scanners, by a token of theirs. A session does not open it. */
+export function serveScanner<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, O extends z.ZodType>(
+  app: App,
+  route: Route<P, Q, B, O>,
+  handler: Handler<P, Q, B, O, SendingScanner>,
+  options: Options<O, SendingScanner> = {},
+): void {
+  if (route.access !== 'scanner') throw new Error(`${nameOf(route)} is not for scanners`);
+  const admit = async (request: Request): Promise<SendingScanner> => {
+    const scanner = await scannerOfToken(app.deps.db, request.headers.authorization);
+    if (scanner !== undefined) return scanner;
+    request.res?.setHeader('WWW-Authenticate', 'Bearer');
+    throw new AppError('wrong-token');
+  };
+  register(app, route, { admit, handler, options });
 }
 
 interface Served<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, O extends z.ZodType, Who> {
@@ -103,7 +121,7 @@ function register<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType,
       params: parsePath(route.params, request.params),
       query: parse(route.query, request.query),
       // A multipart body is not a value to parse: its reader has been over it.
-      body: parse(route.body, route.takes === 'multipart' ? {} : (request.body ?? {})),
+      body: parse(route.body, route.takes === 'json' ? (request.body ?? {}) : {}),
       caller: callerOf(request),
       request,
       response,
@@ -145,8 +163,9 @@ function send<O extends z.ZodType>(
     response.status(route.status).end();
     return;
   }
-  if (route.answers === 'json') {
+  if (route.answers === 'json' || route.answers === 'dicom-json') {
     const output = route.output.parse(result);
+    if (route.answers === 'dicom-json') response.type('application/dicom+json');
     response.status(statusOf?.(output) ?? route.status).json(output);
     return;
   }

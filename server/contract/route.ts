@@ -8,11 +8,11 @@ export const roles = ['technologist', 'lead-technologist', 'physicist', 'adminis
 export const roleSchema = z.enum(roles);
 export type Role = z.infer<typeof roleSchema>;
 
-/** Who may call a route: anyone at all, or members with one of the roles. There is no default: a route says it. */
-export type Access = 'anyone' | readonly Role[];
+/** Who may call a route: anyone at all, a scanner by its token, or members with one of the roles. There is no default: a route says it. */
+export type Access = 'anyone' | 'scanner' | readonly Role[];
 export const everyMember = roles;
 
-/** `json` is the usual answer; `binary` is typed planes or a file; `empty` is 204. */
+/** `json` is the usual answer; `dicom-json` the same under DICOM's media type; `binary` is typed planes or a file; `empty` is 204. */
 export type Answer<Output extends z.ZodType> = { kind: 'json'; schema: Output } | { kind: 'binary'; mediaType: string } | { kind: 'empty' };
 
 export interface Route<
@@ -32,9 +32,9 @@ export interface Route<
   /** Status of a success. */
   readonly status: number;
   readonly output: Output;
-  readonly answers: 'json' | 'binary' | 'empty';
-  /** Media type of the request body; JSON unless the route takes files. */
-  readonly takes: 'json' | 'multipart';
+  readonly answers: 'json' | 'dicom-json' | 'binary' | 'empty';
+  /** Media type of the request body; JSON unless the route takes files: of a form, or DICOM objects as multipart/related. */
+  readonly takes: 'json' | 'multipart' | 'multipart-dicom';
 }
 
 const nothing = z.object({}).strip();

@@ -25,7 +25,10 @@ export function describeInterface(version: string): Json {
     paths,
     components: {
       schemas: { Problem: jsonSchemaOf(problemSchema, 'output') },
-      securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: 'pickglass_session' } },
+      securitySchemes: {
+        session: { type: 'apiKey', in: 'cookie', name: 'pickglass_session' },
+        scannerToken: { type: 'http', scheme: 'bearer' },
+      },
     },
   };
 }
@@ -35,7 +38,7 @@ function describeRoute(route: Route): Json {
   const body = describeBody(route);
   return {
     summary: route.summary,
-    ...(route.access === 'anyone' ? { security: [] } : { security: [{ session: [] }], 'x-roles': route.access }),
+    ...describeAccess(route.access),
     ...(parameters.length > 0 ? { parameters } : {}),
     ...(body ? { requestBody: { required: true, content: body } } : {}),
     responses: {
@@ -46,6 +49,12 @@ function describeRoute(route: Route): Json {
       },
     },
   };
+}
+
+function describeAccess(access: Route['access']): Json {
+  if (access === 'anyone') return { security: [] };
+  if (access === 'scanner') return { security: [{ scannerToken: [] }] };
+  return { security: [{ session: [] }], 'x-roles': access };
 }
 
 function describeParameters(schema: z.ZodType, place: 'path' | 'query'): Json[] {
@@ -63,6 +72,9 @@ function describeBody(route: Route): Json | undefined {
     const files = { type: 'array', items: { type: 'string', format: 'binary' } };
     return { 'multipart/form-data': { schema: { type: 'object', required: ['files'], properties: { files } } } };
   }
+  if (route.takes === 'multipart-dicom') {
+    return { 'multipart/related; type="application/dicom"': { schema: { type: 'array', items: { type: 'string', format: 'binary' } } } };
+  }
   const schema = jsonSchemaOf(route.body, 'input');
   const empty = schema.type === 'object' && Object.keys(schema.properties ?? {}).length === 0;
   return empty ? undefined : { 'application/json': { schema } };
@@ -70,8 +82,9 @@ function describeBody(route: Route): Json | undefined {
 
 function describeAnswer(route: Route): Json {
   if (route.answers === 'empty') return { description: 'Done' };
-  if (route.answers === 'json') {
-    return { description: route.summary, content: { 'application/json': { schema: jsonSchemaOf(route.output, 'output') } } };
+  if (route.answers === 'json' || route.answers === 'dicom-json') {
+    const mediaType = route.answers === 'json' ? 'application/json' : 'application/dicom+json';
+    return { description: route.summary, content: { [mediaType]: { schema: jsonSchemaOf(route.output, 'output') } } };
   }
   const bytes = { schema: { type: 'string', format: 'binary' } };
   return {

@@ -3,7 +3,7 @@
  * an object is there whole or not at all, also after a power cut.
  */
 import { createHash, randomUUID } from 'node:crypto';
-import { chmod, mkdir, open, readFile, rename, rm, stat } from 'node:fs/promises';
+import { chmod, mkdir, open, readFile, rename, rm, stat, utimes } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
 import { errorCode } from '../error-code';
 import type { ObjectStore } from './object-store';
@@ -26,7 +26,7 @@ export async function openDiskObjects(folder: string): Promise<ObjectStore> {
     async put(bytes) {
       const digest = sha256(bytes);
       const place = placeOf(digest);
-      if (!(await exists(place, bytes.byteLength))) await writeWhole(place, bytes);
+      if (!(await renew(place, bytes.byteLength))) await writeWhole(place, bytes);
       return digest;
     },
     async get(digest) {
@@ -34,16 +34,38 @@ export async function openDiskObjects(folder: string): Promise<ObjectStore> {
       if (sha256(bytes) !== digest) throw new Error(`object ${digest} is damaged`);
       return bytes;
     },
+    remove: (digest, unusedForMs) => removeUnused(placeOf(digest), unusedForMs),
   };
 }
 
-async function exists(place: string, size: number): Promise<boolean> {
+/** Marks an object as kept just now, for whoever might be about to remove it. False where it is not there whole. */
+async function renew(place: string, size: number): Promise<boolean> {
+  const now = new Date();
   try {
+    await utimes(place, now, now);
     return (await stat(place)).size === size;
   } catch (error) {
     if (errorCode(error) === 'ENOENT') return false;
     throw error;
   }
+}
+
+/**
+ * Out of its place first, and only then looked at: whoever keeps the same bytes in between either has renewed the object before it was
+ * moved, and it goes back, or finds none and writes it anew.
+ */
+async function removeUnused(place: string, unusedForMs: number): Promise<boolean> {
+  const aside = join(dirname(place), `.leaving-${randomUUID()}`);
+  try {
+    await rename(place, aside);
+  } catch (error) {
+    if (errorCode(error) === 'ENOENT') return true;
+    throw error;
+  }
+  const isUnused = Date.now() - (await stat(aside)).mtimeMs >= unusedForMs;
+  if (isUnused) await rm(aside);
+  else await rename(aside, place);
+  return isUnused;
 }
 
 async function writeWhole(place: string, bytes: Uint8Array): Promise<void> {

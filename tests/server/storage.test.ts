@@ -54,6 +54,7 @@ describe('the values of images', () => {
     const reads: string[] = [];
     const counting: ObjectStore = {
       put: objects.put,
+      remove: objects.remove,
       get: (digest) => {
         reads.push(digest);
         return objects.get(digest);
