@@ -88,31 +88,52 @@ export function readPixels(frames: readonly StoredFrame[], layout: Layout, compo
   const { rows, columns } = layout;
   const nPixels = rows * columns;
   const values = new Float32Array(frames.length * nPixels);
-  const isPadding = new Uint8Array(values.length);
-  const found: Found = { padded: 0, negative: 0, zeros: 0, ignoredRescales: 0, inverted: false, unknownUnit: false };
   const largest = isInverted(frames) ? largestStored(frames, layout) : undefined;
-  frames.forEach(({ bytes, header }, frame) => {
-    const map = mapOf(header, layout, component, largest);
+  const found: Found = { padded: 0, negative: 0, zeros: 0, ignoredRescales: 0, inverted: largest !== undefined, unknownUnit: false };
+  const isPadding = frames.some(({ header }) => header.numbers('pixelPaddingValue').length > 0) ? new Uint8Array(values.length) : undefined;
+  frames.forEach((frame, index) => {
+    const part = [index * nPixels, (index + 1) * nPixels] as const;
+    const map = mapOf(frame.header, layout, component, largest);
     if (map.isIgnored) found.ignoredRescales++;
     if (map.isUnitUnknown) found.unknownUnit = true;
-    const padding = paddingOf(header, layout, map);
-    storedValues(bytes, layout).forEach((stored, pixel) => {
-      const at = frame * nPixels + pixel;
-      if (stored === padding) {
-        isPadding[at] = 1;
-        found.padded++;
-        return;
-      }
-      const value = map.slope * stored + map.intercept;
-      if (stored === map.zero) found.zeros++;
-      if (value < 0) found.negative++;
-      values[at] = value;
-    });
+    mapFrame(
+      { stored: storedValues(frame.bytes, layout), values: values.subarray(...part), isPadding: isPadding?.subarray(...part) },
+      map,
+      found,
+    );
   });
-  found.inverted = largest !== undefined;
-  const range = rangeOf(values, found.padded === 0 ? undefined : (at) => isPadding[at] === 1);
   const zeroFraction = (found.zeros + found.padded) / values.length;
-  return { rows, columns, frames: frames.length, values, range, zeroFraction, warnings: pixelWarnings(found, component) };
+  return {
+    rows,
+    columns,
+    frames: frames.length,
+    values,
+    range: rangeOf(values, isPadding),
+    zeroFraction,
+    warnings: pixelWarnings(found, component),
+  };
+}
+
+interface Mapped {
+  readonly stored: Int32Array;
+  readonly values: Float32Array;
+  readonly isPadding: Uint8Array | undefined;
+}
+
+/** The loop over pixels: millions of them, so it calls nothing. */
+function mapFrame({ stored, values, isPadding }: Mapped, { slope, intercept, zero, padding }: ValueMap, found: Found): void {
+  for (let pixel = 0; pixel < stored.length; pixel++) {
+    const level = stored[pixel] as number;
+    if (level === padding) {
+      if (isPadding !== undefined) isPadding[pixel] = 1;
+      found.padded++;
+      continue;
+    }
+    const value = slope * level + intercept;
+    if (level === zero) found.zeros++;
+    if (value < 0) found.negative++;
+    values[pixel] = value;
+  }
 }
 
 /** What becomes of a stored value: a straight line, and which of them stands for no signal. */
@@ -120,6 +141,8 @@ interface ValueMap {
   readonly slope: number;
   readonly intercept: number;
   readonly zero: number;
+  /** The stored value that marks a place without an image. */
+  readonly padding: number | undefined;
   readonly isIgnored: boolean;
   readonly isUnitUnknown: boolean;
 }
@@ -128,10 +151,16 @@ function mapOf(header: Header, layout: Layout, component: StoredComponent, large
   const { slope, intercept, isIgnored } = rescaleOf(header);
   const radians = component === 'phase' ? radiansPerUnit(header, layout) : undefined;
   const isUnitUnknown = component === 'phase' && radians === undefined;
+  const padding = paddingValue(header, layout);
   // Bright and dark are turned about the largest value that is stored, which so becomes zero, wherever the intercept would put it.
-  if (largest !== undefined) return { slope: -slope, intercept: slope * largest, zero: largest, isIgnored, isUnitUnknown };
+  if (largest !== undefined) return { slope: -slope, intercept: slope * largest, zero: largest, padding, isIgnored, isUnitUnknown };
   const factor = radians ?? 1;
-  return { slope: factor * slope, intercept: factor * intercept, zero: 0, isIgnored, isUnitUnknown };
+  // Padding that stands for zero anyway needs no care of its own.
+  const isZero = padding === 0 && intercept === 0;
+  return {
+    ...{ slope: factor * slope, intercept: factor * intercept, zero: 0 },
+    ...{ padding: isZero ? undefined : padding, isIgnored, isUnitUnknown },
+  };
 }
 
 const isInverted = (frames: readonly StoredFrame[]): boolean => frames[0]?.header.text('photometricInterpretation') === 'MONOCHROME1';
@@ -143,12 +172,6 @@ function largestStored(frames: readonly StoredFrame[], layout: Layout): number {
     for (const stored of storedValues(bytes, layout)) if (stored > largest && stored !== padding) largest = stored;
   }
   return Number.isFinite(largest) ? largest : 0;
-}
-
-/** Padding that stands for zero anyway needs no care of its own. */
-function paddingOf(header: Header, layout: Layout, { intercept, zero }: ValueMap): number | undefined {
-  const padding = paddingValue(header, layout);
-  return padding === 0 && zero === 0 && intercept === 0 ? undefined : padding;
 }
 
 /** The value that marks places without an image, read with the sign of the pixels whatever VR the file gave it. */

@@ -4,15 +4,15 @@ const rangePercentiles = [0.01, 0.998] as const;
 /** As many as 16 bits have: integers that span no more levels than these fall one into each, and the percentile is exact. */
 const nLevels = 1 << 16;
 
-/** 1st and 99.8th percentile; values for which `isLeftOut` holds do not count. The two ends are kept apart, so that a window can be made of them. */
-export function rangeOf(values: Float32Array, isLeftOut: (index: number) => boolean = () => false): readonly [number, number] {
-  const { low, high, counted } = extremes(values, isLeftOut);
+/** 1st and 99.8th percentile; values that `leftOut` marks do not count. The two ends are kept apart, so that a window can be made of them. */
+export function rangeOf(values: Float32Array, leftOut?: Uint8Array): readonly [number, number] {
+  const { low, high, counted } = extremes(values, leftOut);
   if (counted === 0 || !(high > low)) return counted === 0 ? [0, 1] : [low, low + 1];
   const counts = new Uint32Array(nLevels);
   const valueAt = new Float32Array(nLevels);
   const perLevel = (nLevels - 1) / (high - low);
   for (let i = 0; i < values.length; i++) {
-    if (isLeftOut(i)) continue;
+    if (leftOut?.[i] === 1) continue;
     const level = Math.round(((values[i] as number) - low) * perLevel);
     counts[level] = (counts[level] as number) + 1;
     valueAt[level] = values[i] as number;
@@ -22,12 +22,12 @@ export function rangeOf(values: Float32Array, isLeftOut: (index: number) => bool
   return to > from ? [from, to] : [from, from + 1];
 }
 
-function extremes(values: Float32Array, isLeftOut: (index: number) => boolean) {
+function extremes(values: Float32Array, leftOut: Uint8Array | undefined) {
   let low = Infinity;
   let high = -Infinity;
   let counted = 0;
   for (let i = 0; i < values.length; i++) {
-    if (isLeftOut(i)) continue;
+    if (leftOut?.[i] === 1) continue;
     const value = values[i] as number;
     if (value < low) low = value;
     if (value > high) high = value;
