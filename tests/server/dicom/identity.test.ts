@@ -108,9 +108,9 @@ describe('canaries', () => {
   test('are found by the search when they are there', () => {
     const image = accepted(madeFile());
     const withText = { ...image, warnings: [{ code: 'x', text: name }] };
-    expect(() => expectNoCanary({ accepted: [withText] })).toThrow();
+    expect(() => expectNoCanary({ accepted: [withText], fileKey: '' })).toThrow();
     const pixels = Uint16Array.from({ length: 256 }, (_, index) => canary[index % canary.length] ?? 0);
-    expect(() => expectNoCanary({ accepted: [accepted(madeFile({ pixels }))] })).toThrow();
+    expect(() => expectNoCanary({ accepted: [accepted(madeFile({ pixels }))], fileKey: '' })).toThrow();
   });
 
   test('in every VR, nested, private, in the file meta information, the preamble and behind the pixels come out nowhere', () => {
