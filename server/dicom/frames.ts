@@ -12,6 +12,9 @@ import { encapsulated, explicitBigEndian, uncompressed, whyNotRead } from './tra
 
 export const noPixels = refuse('no-pixels', 'The file holds a header and no pixels, or was cut off before them. Export the image itself.');
 
+/** All frames of a file, decoded: a kilobyte may stand for a frame of 32 MB. */
+const mostDecodedBytes = 128 * 1024 * 1024;
+
 /**
  * The bytes of every frame, in the order of the file. Those of uncompressed frames are views of the file's own bytes.
  * `nFrames` is what the header says; where the pixel data hold fewer or more, the file is refused.
@@ -21,12 +24,16 @@ export function framesOf(parsed: Parsed, layout: Layout, nFrames: number, decode
   if (pixelData === undefined || pixelData.length === 0) {
     return noPixels;
   }
+  if (!Number.isInteger(nFrames) || nFrames < 1) return refuse('size', 'The header claims an impossible number of frames.');
   if (uncompressed.has(transferSyntax)) return nativeFrames(parsed, pixelData, layout, nFrames);
   const decode = decoders.decoderOf(transferSyntax);
   if (decode === undefined || !encapsulated(transferSyntax))
     return refuse('transfer-syntax', `The pixels are ${whyNotRead(transferSyntax)}.`);
   if (items === undefined) {
     return refuse('transfer-syntax', 'The header says that the pixels are compressed, and they are not packed so. Export the image again.');
+  }
+  if (nFrames * layout.rows * layout.columns * layout.bytesPerPixel > mostDecodedBytes) {
+    return refuse('too-large', `Decoded, the frames need more than ${mostDecodedBytes >> 20} MB. Export them as several files.`);
   }
   const codestreams = codestreamsOf(items, nFrames);
   return isRefused(codestreams) ? codestreams : decoded(codestreams, (codestream) => decode(codestream, layout));

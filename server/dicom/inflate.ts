@@ -9,7 +9,7 @@ export function inflated(deflated: Uint8Array): Uint8Array | Refused {
   try {
     return new Uint8Array(inflateRawSync(deflated, { maxOutputLength: longestDataSet }));
   } catch (error) {
-    const code = error instanceof Error && 'code' in error ? error.code : undefined;
+    const code = typeof error === 'object' && error !== null && 'code' in error ? error.code : undefined;
     if (code === 'Z_BUF_ERROR') return cut;
     if (code === 'ERR_BUFFER_TOO_LARGE') {
       return refuse('too-large', `Inflated, the file is larger than ${longestDataSet >> 20} MB, the most that one file may have.`);
