@@ -45,6 +45,11 @@ function ScannerPart({ scanner }: { scanner: Scanner }) {
           name={`new case on ${scanner.name}`}
           href={{ pathname: '/cases/new', params: { scanner: scanner.id } }}
         />
+        <LinkText
+          label="inbox"
+          name={`inbox of ${scanner.name}`}
+          href={{ pathname: '/scanners/[scannerId]', params: { scannerId: scanner.id } }}
+        />
       </View>
       <View role="table" aria-label={`coils of ${scanner.name}`}>
         <View
