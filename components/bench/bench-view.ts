@@ -14,7 +14,13 @@ export type KspaceOf = 'image' | 'acquired';
 export type Knot = 'object' | 'reconstruction' | number;
 export type EyeTab = 'recipe' | 'numbers' | 'marks' | 'facts';
 
-export interface BenchView {
+/** Frames of the two images that lie on the table, counted from 0. */
+export interface ChosenFrames {
+  readonly badFrame: number;
+  readonly sourceFrame: number;
+}
+
+export interface BenchView extends ChosenFrames {
   readonly compare: Compare;
   /** Fraction of the picture's width, from the left: bad before it, simulated behind it. */
   readonly divider: number;
@@ -40,9 +46,10 @@ export interface BenchView {
 /** log10 of the magnitude over its maximum: wide enough that the noise of a usual image is dark grey and the centre is not white all over. */
 const logRange = [-4, -0.3] as const;
 
-export function startView(frame: PlaneGrid, range: readonly [number, number], knot: Knot): BenchView {
+export function startView(frame: PlaneGrid, range: readonly [number, number], knot: Knot, frames: ChosenFrames): BenchView {
   const imageWindow = windowOfRange(range[0], range[1]);
   return {
+    ...frames,
     compare: 'divider',
     divider: 0.5,
     kspaceLook: 'log',

@@ -66,6 +66,7 @@ export function Bench({ caseId, trialId, add }: BenchProps) {
         source={source.data}
         causes={causes.data}
         methods={methods.data}
+        frames={{ badFrame: trial?.compareWith?.frame ?? 0, sourceFrame: trial?.frame ?? 0 }}
         recipe={trial?.recipe ?? startRecipe(methods.data, causes.data, add)}
       />
     </Screen>

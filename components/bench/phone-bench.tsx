@@ -4,6 +4,7 @@ import { ScrollView, useWindowDimensions, View } from 'react-native';
 import type { Domain } from '@/components/image/edge-scale';
 import { Tabs, type Tab } from '@/components/ui/tabs';
 import { useTheme } from '@/components/ui/theme-context';
+import { BenchFrames, framesHeight } from './bench-frames';
 import { BenchHeader } from './bench-header';
 import { closedSheet, paneMargins, pictureSize, proportionOf, sheetHeight, type SheetStep } from './bench-measures';
 import { BenchNotices } from './bench-notices';
@@ -51,14 +52,18 @@ function SmallPane({ domain, width }: { domain: Domain; width: number }) {
 
 export function PhoneBench() {
   const { colours } = useTheme();
-  const { frame, view, change } = useBench();
+  const { frame, view, change, bad, source } = useBench();
   const screen = useWindowDimensions();
   const [step, setStep] = useState<SheetStep>('closed');
   const keep = useKeepAsTrial();
   const sheet = sheetHeight(step, screen.height);
   const room = {
     width: screen.width - paneMargins.horizontal,
-    height: screen.height - around - (step === 'closed' ? closedSheet + readoutHeight : sheetHeight('half', screen.height)),
+    height:
+      screen.height -
+      around -
+      framesHeight({ bad, source }) -
+      (step === 'closed' ? closedSheet + readoutHeight : sheetHeight('half', screen.height)),
   };
   const size = pictureSize(room, proportionOf(frame));
   const { phonePanes } = view;
@@ -72,6 +77,7 @@ export function PhoneBench() {
       <View style={{ height: screen.height - 44 - Math.min(sheet, sheetHeight('half', screen.height)), overflow: 'hidden' }}>
         <ScrollView style={{ flex: 1 }} contentContainerStyle={{ backgroundColor: colours.mat, flexGrow: 1 }}>
           <BenchNotices keep={keep} withKept />
+          <BenchFrames />
           {phonePanes === 'both' ? (
             <>
               <SmallPane domain="image" width={small} />

@@ -2,6 +2,7 @@
 import { ScrollView, useWindowDimensions, View } from 'react-native';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
+import { BenchFrames } from './bench-frames';
 import { BenchHeader } from './bench-header';
 import { paneMargins, pictureSize, proportionOf } from './bench-measures';
 import { BenchNotices } from './bench-notices';
@@ -28,6 +29,7 @@ export function TabletBench() {
       <BenchHeader layout="tablet" keep={keep} />
       <ScrollView style={{ flex: 1 }}>
         <Panes size={size} gutter={space(1)} />
+        <BenchFrames />
         <CompareBar shuttleLength={screen.width > 900 ? 220 : 150} />
         <NumbersLine keep={keep} />
         <BenchNotices keep={keep} />

@@ -9,7 +9,7 @@ import type { Image } from '@/server/contract/images';
 import type { Recipe } from '@/server/contract/recipe';
 import type { SimulationRequest } from '@/server/contract/simulations';
 import type { BenchState, CaseOnBench } from './bench-context';
-import { startView, type BenchView } from './bench-view';
+import { startView, type BenchView, type ChosenFrames } from './bench-view';
 import { placeIssues } from './issue-places';
 import { firstKnot } from './knots';
 import { recipeHistory, startHistory } from './recipe-history';
@@ -23,16 +23,25 @@ export interface OnTheBench {
   readonly causes: readonly Cause[];
   readonly methods: readonly Reconstruction[];
   readonly recipe: Recipe;
+  /** Those of a trial that is opened; else the first of each. */
+  readonly frames: ChosenFrames;
 }
 
+type Shown = Pick<BenchView, 'kspaceOf' | 'badFrame' | 'sourceFrame'>;
+
 /** The simulation that the bench asks for; without a phase-encode axis there is none: the bench asks and does not guess. */
-function requestOf({ bad, source, phaseEncode }: CaseOnBench, recipe: Recipe, kspaceOf: BenchView['kspaceOf']): SimulationRequest | null {
+function requestOf(
+  { bad, source, phaseEncode }: CaseOnBench,
+  recipe: Recipe,
+  { kspaceOf, badFrame, sourceFrame }: Shown,
+): SimulationRequest | null {
   if (phaseEncode === null) return null;
   return {
     imageId: source.id,
+    frame: sourceFrame,
     recipe,
     outputs: ['image', kspaceOf === 'acquired' ? 'kspace' : 'kspaceOfImage'],
-    compareWith: { imageId: bad.id },
+    compareWith: { imageId: bad.id, frame: badFrame },
     facts: { phaseEncode },
   };
 }
@@ -53,13 +62,17 @@ function useCase({ kase, bad, source, causes, methods }: OnTheBench): CaseOnBenc
 export function useBenchState(given: OnTheBench): { onBench: CaseOnBench; state: BenchState } {
   const onBench = useCase(given);
   const { bad, frame } = onBench;
-  const [view, setView] = useState(() => startView(frame, bad.range, firstKnot(given.recipe)));
+  const [view, setView] = useState(() => startView(frame, bad.range, firstKnot(given.recipe), given.frames));
   const change = useCallback((part: Partial<BenchView>) => setView((before) => ({ ...before, ...part })), []);
   const [history, dispatch] = useReducer(recipeHistory, given.recipe, startHistory);
-  const request = useMemo(() => requestOf(onBench, history.present, view.kspaceOf), [onBench, history.present, view.kspaceOf]);
+  const { kspaceOf, badFrame, sourceFrame } = view;
+  const request = useMemo(
+    () => requestOf(onBench, history.present, { kspaceOf, badFrame, sourceFrame }),
+    [onBench, history.present, kspaceOf, badFrame, sourceFrame],
+  );
   const simulation = useSimulation(request);
-  const badImage = usePixels(bad.id, 'image').data?.planes;
-  const badKspace = usePixels(bad.id, 'kspace').data?.planes;
+  const badImage = usePixels(bad.id, 'image', badFrame).data?.planes;
+  const badKspace = usePixels(bad.id, 'kspace', badFrame).data?.planes;
   const shown = useShown({ badImage, badKspace, simulation: simulation.shown }, view);
   const issues = useMemo(() => placeIssues(simulation.error instanceof ApiProblem ? simulation.error.issues : []), [simulation.error]);
   const blink = useBlink(view.compare === 'blink');

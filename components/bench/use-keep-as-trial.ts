@@ -13,12 +13,18 @@ export interface Keep {
 }
 
 export function useKeepAsTrial(): Keep {
-  const { kase, bad, source, history, phaseEncode } = useBench();
+  const { kase, bad, source, history, phaseEncode, view } = useBench();
   const keep = useKeepTrial(kase.id);
   const recipe = history.present;
   return {
     run: () =>
-      keep.mutate({ imageId: source.id, compareWith: { imageId: bad.id }, recipe, ...(phaseEncode ? { facts: { phaseEncode } } : {}) }),
+      keep.mutate({
+        imageId: source.id,
+        frame: view.sourceFrame,
+        compareWith: { imageId: bad.id, frame: view.badFrame },
+        recipe,
+        ...(phaseEncode ? { facts: { phaseEncode } } : {}),
+      }),
     busy: keep.isPending,
     disabled: phaseEncode === null || recipe.steps.length === 0,
     kept: keep.variables?.recipe === recipe ? keep.data : undefined,

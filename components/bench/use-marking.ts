@@ -47,7 +47,7 @@ export function useMarking(domain: Domain) {
     setDraft(null);
     if (!tool) return;
     add.mutate(
-      { imageId: bad.id, domain, kind: tool, points: points.map(([column, row]) => [column, row]), text: markText },
+      { imageId: bad.id, frame: view.badFrame, domain, kind: tool, points: points.map(([column, row]) => [column, row]), text: markText },
       { onSuccess: () => change({ tool: null, markText: '' }) },
     );
   };
@@ -55,10 +55,10 @@ export function useMarking(domain: Domain) {
 
   const marks = useMemo<PictureMark[]>(() => {
     const kept = lettered
-      .filter(({ mark }) => mark.domain === domain)
+      .filter(({ mark }) => mark.domain === domain && mark.frame === view.badFrame)
       .map(({ letter, mark: { id, kind, points, text } }) => ({ id, letter, kind, points, text }));
     return draft && tool ? [...kept, { id: 'draft', letter: '', kind: tool, points: draft, text: '' }] : kept;
-  }, [lettered, domain, draft, tool]);
+  }, [lettered, domain, draft, tool, view.badFrame]);
 
   return {
     marks,

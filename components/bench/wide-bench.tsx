@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { ScrollView, useWindowDimensions, View } from 'react-native';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
+import { BenchFrames, framesHeight } from './bench-frames';
 import { BenchHeader } from './bench-header';
 import { paneMargins, pictureSize, proportionOf } from './bench-measures';
 import { BenchNotices } from './bench-notices';
@@ -25,11 +26,14 @@ const profileFrom = 980;
 
 export function WideBench() {
   const { colours } = useTheme();
-  const { frame, view } = useBench();
+  const { frame, view, bad, source } = useBench();
   const screen = useWindowDimensions();
   const [handWidth, setHandWidth] = useState(screen.width - railWidth - eyeWidth);
   const keep = useKeepAsTrial();
-  const room = { width: (handWidth - space(5)) / 2 - paneMargins.horizontal, height: screen.height - fixedHeight - recipeHeight };
+  const room = {
+    width: (handWidth - space(5)) / 2 - paneMargins.horizontal,
+    height: screen.height - fixedHeight - recipeHeight - framesHeight({ bad, source }),
+  };
   const size = pictureSize(room, proportionOf(frame));
   return (
     <View style={{ flex: 1, minHeight: 0 }}>
@@ -37,6 +41,7 @@ export function WideBench() {
       <View style={{ flex: 1, minHeight: 0, flexDirection: 'row' }}>
         <ScrollView style={{ flex: 1, minWidth: 0 }} onLayout={({ nativeEvent }) => setHandWidth(nativeEvent.layout.width)}>
           <Panes size={size} gutter={space(4)} />
+          <BenchFrames />
           <CompareBar shuttleLength={258} />
           <NumbersLine keep={keep} />
           <BenchNotices keep={keep} />

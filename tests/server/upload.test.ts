@@ -39,7 +39,7 @@ describe('a file that cannot be taken', () => {
     ['of text under the name of an image', () => Buffer.from('TR 500 ms, TE 12 ms, and the ghosts again.\n'.repeat(9)), 'not-dicom'],
     ['that claims 65535 × 65535 pixels', claim, 'size'],
     ['without pixel data', () => discFile({ without: ['7FE0,0010'] }), 'no-pixels'],
-    ['that is a phase image', () => discFile({ attributes: { imageType: ['ORIGINAL', 'PRIMARY', 'P'] } }), 'not-magnitude'],
+    ['that mixes components', () => discFile({ attributes: { complexImageComponent: 'MIXED' } }), 'not-magnitude'],
     ['over the limit', () => Buffer.concat([discFile(), Buffer.alloc(1024 * 1024)]), 'too-large'],
   ])('%s is refused with its reason, and nothing is kept', async (_what, file, code) => {
     const before = await kept();

@@ -8,6 +8,7 @@ import { Text } from '@/components/ui/text';
 import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import type { Image } from '@/server/contract/images';
+import { LookForText } from './look-for-text';
 import { PhaseEncodeQuestion } from './phase-encode-question';
 import { RemovedTable } from './removed-table';
 import { WarningList } from './warning-list';
@@ -54,8 +55,9 @@ export function TakenImage({ imageId, withRemoved, onRemove }: TakenImageProps) 
           Names, numbers and dates are taken out: {count} {count === 1 ? 'attribute' : 'attributes'} removed.
         </Text>
       ) : null}
+      {image?.confirmedNoText === false ? <LookForText imageId={imageId} onGone={onRemove} /> : null}
       {image && image.warnings.length > 0 ? <WarningList warnings={image.warnings} /> : null}
-      {image && image.acquisition.phaseEncode.value === null ? <PhaseEncodeQuestion image={image} /> : null}
+      {image && image.use === 'measured' && image.acquisition.phaseEncode.value === null ? <PhaseEncodeQuestion image={image} /> : null}
       {image && withRemoved ? <RemovedTable deidentification={image.deidentification} /> : null}
     </View>
   );
