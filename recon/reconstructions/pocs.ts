@@ -92,7 +92,7 @@ export const pocs = defineReconstruction({
   drivers: [
     { fact: 'Partial Fourier fraction', does: 'sets how wide the symmetric band is from which the phase is known, 2f − 1 of k-space' },
     { fact: 'TE, in a gradient echo', does: 'lets the phase of the object grow, near air and metal most' },
-    { fact: 'Rounds of the reconstruction', does: 'sharpen the missing side; the first few do most' },
+    { fact: 'POCS rounds', does: 'sharpen the missing side; the first few do most' },
   ],
   needsObjectPhase: true,
   parameters: {

@@ -1,4 +1,5 @@
 /** A recipe in one line: 'Wrap-around: field of view 0.5; Partial Fourier: fraction 0.62'. */
+import { shownParameters } from '@/components/bench/shown-parameters';
 import type { Cause } from '@/server/contract/catalogue';
 import type { Recipe } from '@/server/contract/recipe';
 
@@ -11,7 +12,7 @@ export function recipeWords(recipe: Recipe, causes: readonly Cause[]): string {
     .map((step) => {
       const cause = causes.find(({ id }) => id === step.cause);
       if (!cause) return step.cause;
-      const values = cause.parameters.flatMap((parameter) => {
+      const values = shownParameters(cause.parameters, step.parameters).flatMap((parameter) => {
         const value = step.parameters[parameter.id];
         if (value === undefined) return [];
         if ('options' in parameter) return [parameter.options.find((option) => option.value === value)?.label ?? String(value)];
