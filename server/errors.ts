@@ -24,6 +24,7 @@ const titles: Record<ProblemCode, string> = {
   'unsupported-media-type': 'This is not taken in this form',
   'nothing-accepted': 'None of the files could be taken',
   'not-computable': 'This cannot be computed',
+  'text-questioned': 'This text may name a patient',
   'too-many-attempts': 'Too many attempts',
   unexpected: 'Something went wrong on the server',
   'database-away': 'The database is not reachable',

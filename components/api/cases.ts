@@ -3,6 +3,7 @@ import { keepPreviousData, useMutation, useQuery, useQueryClient, type QueryClie
 import { moveCase, writeFinding, type Transition } from '@/server/contract/case-parts';
 import { attachImage, changeCase, createCase, listCases, readCase, type Case, type Finding, type NewCase } from '@/server/contract/cases';
 import { call, type CallInput } from './call';
+import { callWithText } from './text-question';
 import { timelineKey } from './timeline';
 
 export type CaseQuery = NonNullable<CallInput<typeof listCases>['query']>;
@@ -30,13 +31,13 @@ export function keepCase(client: QueryClient, changed: Case): void {
 
 export function useCreateCase() {
   const client = useQueryClient();
-  return useMutation({ mutationFn: (body: NewCase) => call(createCase, { body }), onSuccess: (filed) => keepCase(client, filed) });
+  return useMutation({ mutationFn: (body: NewCase) => callWithText(createCase, { body }), onSuccess: (filed) => keepCase(client, filed) });
 }
 
 export function useChangeCase(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: CaseChange) => call(changeCase, { params: { caseId }, body }),
+    mutationFn: (body: CaseChange) => callWithText(changeCase, { params: { caseId }, body }),
     onSuccess: (changed) => keepCase(client, changed),
   });
 }
@@ -52,7 +53,7 @@ export function useAttachImage(caseId: string) {
 export function useMoveCase(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: Transition) => call(moveCase, { params: { caseId }, body }),
+    mutationFn: (body: Transition) => callWithText(moveCase, { params: { caseId }, body }),
     onSuccess: (moved) => keepCase(client, moved),
   });
 }
@@ -60,7 +61,7 @@ export function useMoveCase(caseId: string) {
 export function useWriteFinding(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: Finding) => call(writeFinding, { params: { caseId }, body }),
+    mutationFn: (body: Finding) => callWithText(writeFinding, { params: { caseId }, body }),
     onSuccess: (changed) => keepCase(client, changed),
   });
 }

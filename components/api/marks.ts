@@ -2,6 +2,7 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { addMark, listMarks, removeMark } from '@/server/contract/case-parts';
 import { call, type CallInput } from './call';
+import { callWithText } from './text-question';
 import { timelineKey } from './timeline';
 
 export const marksKey = (caseId: string) => ['marks', caseId] as const;
@@ -12,7 +13,7 @@ export const useMarks = (caseId: string) =>
 export function useAddMark(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: CallInput<typeof addMark>['body']) => call(addMark, { params: { caseId }, body }),
+    mutationFn: (body: CallInput<typeof addMark>['body']) => callWithText(addMark, { params: { caseId }, body }),
     onSuccess: () => {
       void client.invalidateQueries({ queryKey: marksKey(caseId) });
       void client.invalidateQueries({ queryKey: timelineKey(caseId) });

@@ -2,6 +2,7 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { keepTrial, listTrials, readTrialThumbnail } from '@/server/contract/case-parts';
 import { addressOf, call, type CallInput } from './call';
+import { callWithText } from './text-question';
 import { timelineKey } from './timeline';
 
 export const trialsKey = (caseId: string) => ['trials', caseId] as const;
@@ -15,7 +16,7 @@ export const useTrials = (caseId: string) =>
 export function useKeepTrial(caseId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: CallInput<typeof keepTrial>['body']) => call(keepTrial, { params: { caseId }, body }),
+    mutationFn: (body: CallInput<typeof keepTrial>['body']) => callWithText(keepTrial, { params: { caseId }, body }),
     onSuccess: () => {
       void client.invalidateQueries({ queryKey: trialsKey(caseId) });
       void client.invalidateQueries({ queryKey: timelineKey(caseId) });

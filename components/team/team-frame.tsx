@@ -10,6 +10,7 @@ import { useLayout } from '@/components/ui/use-layout';
 import { Foot } from './foot';
 import { hasFoot } from './places';
 import { Rail } from './rail';
+import { TextQuestionDialog } from './text-question-dialog';
 
 export function TeamFrame({ children }: { children: ReactNode }) {
   const { colours } = useTheme();
@@ -27,6 +28,7 @@ export function TeamFrame({ children }: { children: ReactNode }) {
       {wide ? <Rail pathname={pathname} /> : null}
       <View style={{ flex: 1, minWidth: 0, minHeight: 0 }}>{session.data ? children : waiting}</View>
       {!wide && hasFoot(pathname) ? <Foot pathname={pathname} /> : null}
+      <TextQuestionDialog />
     </View>
   );
 }

@@ -3,6 +3,7 @@ import { z } from 'zod';
 import { caseParams, caseSchema, caseStateSchema, findingSchema } from './cases';
 import { phaseEncodeSchema } from './facts';
 import { metricsSchema } from './planes';
+import { confirmedText } from './questioned-text';
 import { recipeSchema } from './recipe';
 import { everyMember, identifier, roleSchema, route, timestamp } from './route';
 
@@ -43,6 +44,7 @@ export const keepTrial = route({
     recipe: recipeSchema,
     facts: z.object({ phaseEncode: phaseEncodeSchema.optional() }).optional(),
     note: z.string().trim().max(400).default(''),
+    confirmedText,
   }),
   output: trialSchema,
 });
@@ -99,6 +101,7 @@ export const addMark = route({
       .min(1)
       .max(200),
     text: z.string().trim().max(400).default(''),
+    confirmedText,
   }),
   output: markSchema,
 });
@@ -128,7 +131,7 @@ export const addComment = route({
   access: everyMember,
   params: caseParams,
   status: 201,
-  body: z.object({ text: z.string().trim().min(1, 'an empty note cannot be saved').max(4000) }),
+  body: z.object({ text: z.string().trim().min(1, 'an empty note cannot be saved').max(4000), confirmedText }),
   output: commentSchema,
 });
 export const listComments = route({
@@ -146,7 +149,7 @@ export const writeFinding = route({
   summary: 'Write the finding, or a new version of it; the former stays in the timeline',
   access: ['lead-technologist', 'physicist'],
   params: caseParams,
-  body: findingSchema,
+  body: findingSchema.extend({ confirmedText }),
   output: caseSchema,
 });
 
@@ -188,7 +191,7 @@ export const transitionSchema = z.discriminatedUnion('action', [
   z.object({ action: z.literal('assign'), memberId: identifier }),
   z.object({ action: z.literal('investigate') }),
   z.object({ action: z.literal('ask-for-sign-off') }),
-  z.object({ action: z.literal('return'), reason: z.string().trim().min(1, 'say what is missing').max(1000) }),
+  z.object({ action: z.literal('return'), reason: z.string().trim().min(1, 'say what is missing').max(1000), confirmedText }),
   z.object({
     action: z.literal('sign-off'),
     /** Typed to confirm: the number of the case. */
@@ -196,8 +199,9 @@ export const transitionSchema = z.discriminatedUnion('action', [
     confidence: findingSchema.shape.confidence,
     lesson: findingSchema.shape.lesson,
     attested: z.array(z.object({ line: z.string().max(200), stands: z.boolean() })).max(12),
+    confirmedText,
   }),
-  z.object({ action: z.literal('reopen'), reason: z.string().trim().min(1, 'say why it is reopened').max(1000) }),
+  z.object({ action: z.literal('reopen'), reason: z.string().trim().min(1, 'say why it is reopened').max(1000), confirmedText }),
 ]);
 export type Transition = z.infer<typeof transitionSchema>;
 export const moveCase = route({

@@ -1,5 +1,6 @@
 /** Cases: file, list and find, read, change. */
 import { z } from 'zod';
+import { confirmedText } from './questioned-text';
 import { everyMember, identifier, roleSchema, route, timestamp } from './route';
 import { sightings, sightingSchema } from './sighting';
 
@@ -102,6 +103,7 @@ export const createCase = route({
         .array(z.object({ imageId: identifier, role: z.enum(imageRoles) }))
         .max(64)
         .default([]),
+      confirmedText,
     }),
   output: caseSchema,
 });
@@ -148,7 +150,7 @@ export const changeCase = route({
   summary: 'Change what a case says. `version` is the one that was read: a newer one is a 409',
   access: everyMember,
   params: caseParams,
-  body: z.object(caseFields).partial().extend({ version: z.number().int() }),
+  body: z.object(caseFields).partial().extend({ version: z.number().int(), confirmedText }),
   output: caseSchema,
 });
 

@@ -16,6 +16,7 @@ export const problemStatus = {
   'unsupported-media-type': 415,
   'nothing-accepted': 422,
   'not-computable': 422,
+  'text-questioned': 422,
   'too-many-attempts': 429,
   unexpected: 500,
   'database-away': 503,

@@ -1,6 +1,5 @@
 import { emptyDraft, forgetDraft, keepDraft, newCaseFrom, readDraft, type Draft } from '@/components/case/new/draft';
 import { removedKinds } from '@/components/case/new/removed-kinds';
-import { suspicionOf } from '@/components/case/new/suspicion';
 
 const image = '3f0c9a52-6d0b-4c57-9a2e-0b8f3f1d2c11';
 const draft: Draft = { ...emptyDraft, images: [image], seen: ['ghosts'], tried: 'scanned again' };
@@ -39,20 +38,6 @@ describe('a draft', () => {
       bodyRegion: '',
     });
   });
-});
-
-// Common practice: the signs by which free text is questioned for identity.
-describe('free text', () => {
-  test.each(['Mrs Hale moved', 'Dob 03.04.1961', 'born 1961-04-03', 'patient 4471203'])('“%s” is questioned', (text) => {
-    expect(suspicionOf(text)).toBeDefined();
-  });
-
-  test.each(['The patient moved', 'TR 640 ms, matrix 512 × 512', 'Room 3, coil head 20, serial 20-0417', 'at 127.713 MHz'])(
-    '“%s” is not',
-    (text) => {
-      expect(suspicionOf(text)).toBeUndefined();
-    },
-  );
 });
 
 // DICOM PS3.5 section 7.8: private elements have an odd group number. PS3.6: group 0010 is about the patient.
