@@ -34,6 +34,22 @@ async function ensureChromium() {
   return { note: "Debian's package installed", result: undefined };
 }
 
+/** The tests of the DICOM node have a real scanner's programs for a client. */
+async function ensureDcmtk() {
+  if (findProgram('storescu') && findProgram('echoscu')) return { note: 'found', result: undefined };
+  await installDebianPackage('dcmtk', "dcmtk, the tests' scanner,");
+  return { note: "Debian's package installed", result: undefined };
+}
+
+/** Others that read what the product hands out: a validator of DICOM, and numpy for Debian's own Python. */
+async function ensureReaders() {
+  const missing = [];
+  if (findProgram('dciodvfy') === undefined) missing.push(['dicom3tools', 'dciodvfy, the validator of DICOM,']);
+  if (!existsSync('/usr/lib/python3/dist-packages/numpy')) missing.push(['python3-numpy', "numpy for Debian's Python"]);
+  for (const [name = '', what = ''] of missing) await installDebianPackage(name, what);
+  return { note: missing.length > 0 ? "Debian's packages installed" : 'found', result: undefined };
+}
+
 /**
  * Runs Jest and counts.
  * @param {readonly string[]} projects
@@ -85,6 +101,8 @@ async function runEverything(folder) {
     return { note: found.installed ? "Debian's package installed" : found.bin, result: found };
   });
   if (isChosen(browserProject)) await step('Chromium', ensureChromium);
+  if (isChosen('server')) await step('dciodvfy, numpy', ensureReaders);
+  if (isChosen('server')) await step('dcmtk', ensureDcmtk);
 
   const cluster = await openCluster({ bin, folder: join(folder, 'postgres'), durable: false });
   try {

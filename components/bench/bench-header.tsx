@@ -13,6 +13,7 @@ import { Text } from '@/components/ui/text';
 import { fonts, space, type LayoutWidth } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { useBench } from './bench-context';
+import { BenchFiles } from './bench-files';
 import type { Keep } from './use-keep-as-trial';
 
 interface BenchHeaderProps {
@@ -121,6 +122,7 @@ export function BenchHeader({ layout, keep }: BenchHeaderProps) {
           <Title layout={layout} />
         </View>
         <GlyphButton glyph="undo" label="undo" disabled={!canUndo} onPress={undo} />
+        <BenchFiles keep={keep} />
         <MoreMenu keep={keep} />
       </View>
     );
@@ -145,6 +147,7 @@ export function BenchHeader({ layout, keep }: BenchHeaderProps) {
         </View>
         <GlyphButton glyph="undo" label="undo" disabled={!canUndo} onPress={undo} />
         <GlyphButton glyph="redo" label="redo" disabled={!canRedo} onPress={redo} />
+        <BenchFiles keep={keep} />
         {keepButton}
       </View>
     );
@@ -159,6 +162,7 @@ export function BenchHeader({ layout, keep }: BenchHeaderProps) {
       <View style={{ marginLeft: 'auto', flexDirection: 'row', alignItems: 'center' }}>
         <StepBack direction="undo" disabled={!canUndo} onPress={undo} />
         <StepBack direction="redo" disabled={!canRedo} onPress={redo} />
+        <BenchFiles keep={keep} />
         {keepButton}
       </View>
     </View>

@@ -23,6 +23,8 @@ export type RecipeAction =
   | { kind: 'set-reconstruction-parameter'; parameter: string; value: Value }
   | { kind: 'set-object-phase'; range: number }
   | { kind: 'open'; recipe: Recipe }
+  /** Another recipe in its place, with the way back. */
+  | { kind: 'replace'; recipe: Recipe }
   /** The hand left the control: the next change is another step back. */
   | { kind: 'let-go' }
   | { kind: 'undo' }
@@ -51,6 +53,8 @@ function changed(recipe: Recipe, action: Change): Recipe {
       return withStep(recipe, action.step, (step) => ({ ...step, parameters: { ...step.parameters, [action.parameter]: action.value } }));
     case 'switch':
       return withStep(recipe, action.step, (step) => ({ ...step, enabled: !isOn(step) }));
+    case 'replace':
+      return action.recipe;
     case 'remove':
       return { ...recipe, steps: recipe.steps.filter((_, i) => i !== action.step) };
     case 'set-reconstruction':

@@ -24,6 +24,7 @@ export const glyphPaths = {
   undo: 'M2 6H10.5A3.5 3.5 0 0 1 10.5 13H6M5 3L2 6L5 9',
   redo: 'M14 6H5.5A3.5 3.5 0 0 0 5.5 13H10M11 3L14 6L11 9',
   plus: 'M8 2V14M2 8H14',
+  save: 'M8 1.5V10M4.5 6.5L8 10L11.5 6.5M2 14H14',
   search: 'M2 2V10H10V2ZM10 10L14.5 14.5',
   more: 'M2 8H4M7 8H9M12 8H14',
   shut: 'M3 3L13 13M13 3L3 13',

@@ -8,6 +8,7 @@ import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import type { Trial } from '@/server/contract/case-parts';
+import { SaveTrial } from './save-trial';
 
 interface TrialRowProps {
   caseId: string;
@@ -70,7 +71,10 @@ export function TrialRow({ caseId, trial, words, wide }: TrialRowProps) {
         <Text variant="mono" role="cell" style={{ width: 64, textAlign: 'right' }}>
           {threeFigures(ssim)}
         </Text>
-        <View role="cell">{open}</View>
+        <View role="cell" style={{ flexDirection: 'row', alignItems: 'center', gap: space(1) }}>
+          <SaveTrial caseId={caseId} trial={trial} />
+          {open}
+        </View>
       </View>
     );
   }
@@ -86,7 +90,10 @@ export function TrialRow({ caseId, trial, words, wide }: TrialRowProps) {
           <Text variant="small">
             NRMSE {threeFigures(nrmse)} SSIM {threeFigures(ssim)}
           </Text>
-          <View style={{ marginVertical: -14 }}>{open}</View>
+          <View style={{ marginVertical: -14, flexDirection: 'row', alignItems: 'center', gap: space(1) }}>
+            <SaveTrial caseId={caseId} trial={trial} />
+            {open}
+          </View>
         </View>
       </View>
     </View>

@@ -35,7 +35,7 @@ function TrialsHead() {
       {head('recipe', { flex: 1 })}
       {head('NRMSE', { width: 64, textAlign: 'right' })}
       {head('SSIM', { width: 64, textAlign: 'right' })}
-      <View role="columnheader" aria-label="open" style={{ width: 29 }} />
+      <View role="columnheader" aria-label="save, open" style={{ width: 77 }} />
     </View>
   );
 }
