@@ -38,10 +38,10 @@ export async function openDecoders(): Promise<Decoders> {
     openJpeg2000(silently()),
     openHighThroughput(silently()),
   ]);
-  const jpeg = webAssemblyCodec(libjpeg.JPEGDecoder);
-  const jpegLs = webAssemblyCodec(charls.JpegLSDecoder);
-  const jpeg2000 = webAssemblyCodec(openjpeg.J2KDecoder);
-  const highThroughput = webAssemblyCodec(openjph.HTJ2KDecoder);
+  const jpeg = webAssemblyCodec(libjpeg, libjpeg.JPEGDecoder);
+  const jpegLs = webAssemblyCodec(charls, charls.JpegLSDecoder);
+  const jpeg2000 = webAssemblyCodec(openjpeg, openjpeg.J2KDecoder);
+  const highThroughput = webAssemblyCodec(openjph, openjph.HTJ2KDecoder);
   const decodeJpegLs = checked((codestream) => jpegHeaderOf(codestream, [markers.jpegLs]), jpegLs);
   const decodeJpeg2000 = checked(jpeg2000HeaderOf, jpeg2000);
   const decodeHighThroughput = checked(jpeg2000HeaderOf, highThroughput);

@@ -5,8 +5,8 @@ interface WebAssemblyDecoder {
   /** Throws numbers, which are addresses of exceptions. */
   decode(): void;
   getFrameInfo(): WebAssemblyFrame;
-  /** A view of the decoder's memory, which the next call may move. */
-  getDecodedBuffer(): Uint8Array;
+  /** Often a view of the decoder's memory, which the next call may move. */
+  getDecodedBuffer(): Uint8Array | Uint8ClampedArray;
   delete(): void;
 }
 
@@ -17,6 +17,11 @@ interface WebAssemblyFrame {
   readonly componentCount: number;
 }
 
+interface WebAssemblyModule {
+  /** All of its memory; another array whenever it grows. */
+  readonly HEAPU8: Uint8Array;
+}
+
 /** What the C++ code writes to its two streams goes to these. */
 interface WebAssemblyOptions {
   readonly print: (line: string) => void;
@@ -24,21 +29,21 @@ interface WebAssemblyOptions {
 }
 
 declare module '@cornerstonejs/codec-charls/decodewasmjs' {
-  const open: (options: WebAssemblyOptions) => Promise<{ readonly JpegLSDecoder: new () => WebAssemblyDecoder }>;
+  const open: (options: WebAssemblyOptions) => Promise<WebAssemblyModule & { readonly JpegLSDecoder: new () => WebAssemblyDecoder }>;
   export default open;
 }
 
 declare module '@cornerstonejs/codec-openjpeg/decodewasmjs' {
-  const open: (options: WebAssemblyOptions) => Promise<{ readonly J2KDecoder: new () => WebAssemblyDecoder }>;
+  const open: (options: WebAssemblyOptions) => Promise<WebAssemblyModule & { readonly J2KDecoder: new () => WebAssemblyDecoder }>;
   export default open;
 }
 
 declare module '@cornerstonejs/codec-openjph/wasmjs' {
-  const open: (options: WebAssemblyOptions) => Promise<{ readonly HTJ2KDecoder: new () => WebAssemblyDecoder }>;
+  const open: (options: WebAssemblyOptions) => Promise<WebAssemblyModule & { readonly HTJ2KDecoder: new () => WebAssemblyDecoder }>;
   export default open;
 }
 
 declare module '@cornerstonejs/codec-libjpeg-turbo-8bit/decodewasmjs' {
-  const open: (options: WebAssemblyOptions) => Promise<{ readonly JPEGDecoder: new () => WebAssemblyDecoder }>;
+  const open: (options: WebAssemblyOptions) => Promise<WebAssemblyModule & { readonly JPEGDecoder: new () => WebAssemblyDecoder }>;
   export default open;
 }

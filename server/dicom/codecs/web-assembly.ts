@@ -17,13 +17,13 @@ const mostMemory = 64 * 1024 * 1024;
 /** What decoders print is about damaged files, and would go to the log of the server. A new object each: it becomes the module. */
 export const silently = (): WebAssemblyOptions => ({ print: () => undefined, printErr: () => undefined });
 
-export function webAssemblyCodec(Decoder: new () => WebAssemblyDecoder): WebAssemblyCodec {
+export function webAssemblyCodec(module: WebAssemblyModule, Decoder: new () => WebAssemblyDecoder): WebAssemblyCodec {
   let worn = false;
   return {
     decode(codestream, coded, layout) {
       try {
-        const { samples, memory } = decodedBy(new Decoder(), codestream.subarray(0, coded.length), coded);
-        if (memory > mostMemory) worn = true;
+        const samples = decodedBy(new Decoder(), codestream.subarray(0, coded.length), coded);
+        if (module.HEAPU8.length > mostMemory) worn = true;
         return asFrame(samples, coded, layout);
       } catch {
         // Addresses of exceptions, traps and aborts: none says more than that the codestream is damaged.
@@ -36,15 +36,14 @@ export function webAssemblyCodec(Decoder: new () => WebAssemblyDecoder): WebAsse
 }
 
 /** The samples, none where the decoder found another image than announced. */
-function decodedBy(decoder: WebAssemblyDecoder, codestream: Uint8Array, coded: Coded): { samples: Uint8Array; memory: number } {
+function decodedBy(decoder: WebAssemblyDecoder, codestream: Uint8Array, coded: Coded): Uint8Array {
   try {
     decoder.getEncodedBuffer(codestream.length).set(codestream);
     decoder.decode();
     const { width, height, bitsPerSample, componentCount } = decoder.getFrameInfo();
-    const view = decoder.getDecodedBuffer();
     const same =
       width === coded.columns && height === coded.rows && bitsPerSample === coded.precision && componentCount === coded.components;
-    return { samples: same ? view.slice() : new Uint8Array(0), memory: view.buffer.byteLength };
+    return same ? new Uint8Array(decoder.getDecodedBuffer()) : new Uint8Array(0);
   } finally {
     decoder.delete();
   }
