@@ -1,6 +1,7 @@
 /**
  * Every way by which a file can come in. A new door is a new line here: it sends `file` under `name`, with whatever the way itself can carry of a
  * patient (headers, an address, titles of an association), and gives back the images that were made of it.
+ * What a scanner pushes has a test of its own beside its protocol: tests/server/push/canary.test.ts.
  */
 import type { Application } from '../application';
 import { givenName, patientNumber, surname } from './canary-file';
