@@ -49,6 +49,12 @@ describe('padding', () => {
     expect(codes(image)).not.toContain('negative-values');
   });
 
+  test('padding does not count in the range', () => {
+    const pixels = slope.map((value, index) => (index < 128 ? 60_000 : 1000 + value));
+    // Without it the lowest value is that of pixel 128: 1000 + 129.
+    expect(readMade({ pixelPaddingValue: 60_000 - 65_536 }, { pixels }).range[0]).toBeGreaterThanOrEqual(1129);
+  });
+
   test('a padding value of zero changes nothing and is not worth a word', () => {
     expect(codes(readMade({ pixelPaddingValue: 0 }))).toEqual(codes(readMade({})));
   });
