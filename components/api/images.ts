@@ -1,7 +1,15 @@
 /** Images: what is known of one, its pictures, facts that a member sets, and the upload with its progress. */
-import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { useMutation, useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import type { CorrectableFacts } from '@/server/contract/facts';
-import { correctFacts, readImage, readThumbnail, uploadImages, uploadResultSchema, type UploadResult } from '@/server/contract/images';
+import {
+  correctFacts,
+  readImage,
+  readThumbnail,
+  uploadImages,
+  uploadResultSchema,
+  type Image,
+  type UploadResult,
+} from '@/server/contract/images';
 import { ApiProblem, noAnswer, problemFrom } from './api-problem';
 import { addressOf, call } from './call';
 
@@ -46,7 +54,7 @@ export function readUploadAnswer(status: number, text: string): UploadResult {
 }
 
 /** Sends files in one request. XMLHttpRequest, because fetch does not report how much has been sent. */
-export function upload(files: readonly File[], onProgress: (done: number) => void): Promise<UploadResult> {
+export function upload(files: readonly File[], onProgress: (done: number) => void, signal?: AbortSignal): Promise<UploadResult> {
   const form = new FormData();
   for (const file of files) form.append('files', file, file.name);
   return new Promise((resolve, reject) => {
@@ -55,6 +63,7 @@ export function upload(files: readonly File[], onProgress: (done: number) => voi
     request.setRequestHeader('accept', 'application/json');
     request.upload.onprogress = (event) => onProgress(event.total > 0 ? event.loaded / event.total : 0);
     request.onerror = () => reject(noAnswer());
+    request.onabort = () => reject(new DOMException('The upload was cancelled.', 'AbortError'));
     request.onload = () => {
       try {
         resolve(readUploadAnswer(request.status, request.responseText));
@@ -62,16 +71,15 @@ export function upload(files: readonly File[], onProgress: (done: number) => voi
         reject(error instanceof Error ? error : noAnswer());
       }
     };
+    signal?.addEventListener('abort', () => request.abort(), { once: true });
     request.send(form);
   });
 }
 
-export function useUpload() {
-  const client = useQueryClient();
-  return useMutation({
-    mutationFn: ({ files, onProgress }: { files: readonly File[]; onProgress: (done: number) => void }) => upload(files, onProgress),
-    onSuccess: (result) => {
-      for (const image of result.images) client.setQueryData(imageKey(image.id), image);
-    },
+/** An image as it is kept for the screens that show it, fetched where it is not. */
+export const fetchImage = (client: QueryClient, imageId: string): Promise<Image> =>
+  client.fetchQuery({
+    queryKey: imageKey(imageId),
+    queryFn: ({ signal }) => call(readImage, { params: { imageId } }, signal),
+    staleTime: 300_000,
   });
-}

@@ -1,5 +1,6 @@
 /** A scanner's inbox: images that it sent and that are on no case. */
 import { and, count, desc, eq, inArray, lt, lte, notExists, sql, type SQL } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
 import type { Database } from '../client';
 import { caseImages } from '../schema/cases';
 import { images } from '../schema/images';
@@ -94,9 +95,24 @@ export async function noteDiscarded(db: Database, valuesDigests: string[]): Prom
 export const discardFromInbox = (db: Database, scannerId: string, imageIds: string[]): Promise<number> =>
   discard(db, and(inInbox(db, scannerId), inArray(images.id, imageIds)));
 
-/** Discards what has waited in any inbox since before `days` ago. */
+/** Discards what a member has just sent. */
+export const discardUploaded = (db: Database, uploaderId: string, imageIds: string[]): Promise<number> =>
+  imageIds.length === 0 ? Promise.resolve(0) : discard(db, and(eq(images.uploaderId, uploaderId), inArray(images.id, imageIds)));
+
+/** Discards what has waited in any inbox since before `days` ago; the neighbours of a slice that is on a case stay to be looked at beside it. */
 export const discardOlderThan = (db: Database, days: number): Promise<number> =>
-  discard(db, and(inInbox(db), lt(images.uploadedAt, sql`now() - make_interval(days => ${days})`)));
+  discard(db, and(inInbox(db), lt(images.uploadedAt, sql`now() - make_interval(days => ${days})`), noNeighbourOnCase(db)));
+
+function noNeighbourOnCase(db: Database): SQL {
+  const neighbours = alias(images, 'neighbours');
+  return notExists(
+    db
+      .select({ one: sql`1` })
+      .from(neighbours)
+      .innerJoin(caseImages, eq(caseImages.imageId, neighbours.id))
+      .where(and(eq(neighbours.departmentId, images.departmentId), eq(neighbours.seriesKey, images.seriesKey))),
+  );
+}
 
 /** Values that were discarded at least `unusedForMs` ago, and whether an image has them still or again. Younger ones may be on their way in. */
 export async function listDiscardedValues(db: Database, unusedForMs: number): Promise<{ digest: string; inUse: boolean }[]> {

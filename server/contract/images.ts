@@ -57,6 +57,8 @@ export const refusalCodes = [
   'burned-in-text',
   'too-slow',
   'unreadable',
+  'encrypted',
+  'archive',
 ] as const;
 export type RefusalCode = (typeof refusalCodes)[number];
 

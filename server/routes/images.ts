@@ -1,16 +1,15 @@
 import * as contract from '../contract/images';
 import { serve, type App } from '../serve';
 import { makeComplexImage, pairsOf } from '../services/complex-image';
-import { fileReader } from '../services/file-reader';
+import { fileReader, takenOf } from '../services/file-reader';
 import { confirmNoTextOn, discardImage } from '../services/look-for-text';
 import { formAskedFor } from '../services/planes-answer';
 import { correctFacts, readImage, readImplications, readPixels, readThumbnail } from '../services/read-image';
-import { takeUpload } from '../services/upload-images';
 
 export function serveImages(app: App): void {
   const { deps } = app;
   const { db } = deps;
-  serve(app, contract.uploadImages, ({ caller, request }) => takeUpload(deps, caller, request), {
+  serve(app, contract.uploadImages, ({ request }) => Promise.resolve(takenOf(request)), {
     reader: (callerOf) => fileReader(deps, callerOf),
     status: ({ images }) => (images.length > 0 ? contract.uploadImages.status : 422),
   });

@@ -1,46 +1,47 @@
 /**
- * The multipart reader. Each file is gathered in memory and handed to a worker thread as soon as it is whole; its bytes are gone
- * when its reading comes back. Nothing of an upload touches the disk here, and a file name lives only until the answer.
+ * The multipart reader. Each file is gathered in memory and taken as soon as it is whole, while the next comes in; no more than a few are in
+ * hand at once, and the rest of the upload waits in the network. A file name lives only until the answer.
  */
 import type { Request, RequestHandler } from 'express';
 import multer, { type StorageEngine } from 'multer';
+import type { Readable } from 'node:stream';
+import { discardUploaded } from '../../db/queries/inbox';
+import type { UploadResult } from '../contract/images';
 import type { Dependencies } from '../dependencies';
-import type { Read } from '../dicom/read';
-import { refuse } from '../dicom/refusal';
-import { departmentKey } from '../dicom/unique-identifiers';
 import { AppError, invalidAt } from '../errors';
 import type { Caller } from './sessions';
-
-/** What became of one file. */
-export interface FileReading {
-  readonly name: string;
-  readonly outcome: Read;
-}
-
-/** A file that has come in; its outcome follows from the worker. */
-interface Slot {
-  readonly name: string;
-  outcome?: Read;
-}
+import { takeFile, type ReceivedFile, type TakeDependencies } from './take-file';
 
 type Limits = Dependencies['env']['upload'];
 
 const mebibyte = 1024 * 1024;
 const longestName = 255;
+/** One that comes in, one that is read, one that is stored. */
+const inHand = 3;
 
-const slots = new WeakMap<Request, Slot[]>();
+interface Upload {
+  /** What became of each file, in the order in which they came. */
+  readonly results: (UploadResult | undefined)[];
+  /** When the files before have left a place free. */
+  readonly places: Promise<void>[];
+  received: number;
+}
 
-/** What the reader found in the files of a request, in the order in which they came. */
-export const readingsOf = (request: Request): FileReading[] =>
-  (slots.get(request) ?? []).flatMap(({ name, outcome }) => (outcome === undefined ? [] : [{ name, outcome }]));
+const uploads = new WeakMap<Request, Upload>();
 
-type CallerOf = (request: Request) => Pick<Caller, 'departmentId'>;
+/** What became of the files of a request. */
+export function takenOf(request: Request): UploadResult {
+  const results = (uploads.get(request)?.results ?? []).filter((result) => result !== undefined);
+  return { images: results.flatMap(({ images }) => images), refused: results.flatMap(({ refused }) => refused) };
+}
 
-/** Middleware that reads the files of the field `files` for the department of whoever sent them. */
-export function fileReader(deps: Pick<Dependencies, 'env' | 'workers' | 'identityKey'>, callerOf: CallerOf): RequestHandler {
+type CallerOf = (request: Request) => Pick<Caller, 'departmentId' | 'memberId'>;
+
+/** Middleware that takes the files of the field `files` for whoever sent them. */
+export function fileReader(deps: TakeDependencies, callerOf: CallerOf): RequestHandler {
   const { upload } = deps.env;
   const reader = multer({
-    storage: readingEngine(deps, callerOf),
+    storage: takingEngine(deps, callerOf),
     limits: { files: upload.files, fields: 16, fieldSize: 1024, parts: upload.files + 16 },
     defParamCharset: 'utf8',
   }).array('files');
@@ -48,58 +49,70 @@ export function fileReader(deps: Pick<Dependencies, 'env' | 'workers' | 'identit
     // Multipart framing adds little; a body that announces far more than the limit is not read at all.
     if (Number(request.headers['content-length'] ?? 0) > upload.totalBytes + mebibyte) throw tooMuch(upload);
     if (!request.is('multipart/form-data')) throw invalidAt(['files'], 'files are sent as multipart/form-data in the field `files`');
-    slots.set(request, []);
+    const begun: Upload = { results: [], places: [], received: 0 };
+    uploads.set(request, begun);
     reader(request, response, (error: unknown) => {
-      const empty = error === undefined && readingsOf(request).length === 0;
-      next(empty ? invalidAt(['files'], 'no file was sent') : error);
+      const empty = error === undefined && begun.results.length === 0;
+      const fault = empty ? invalidAt(['files'], 'no file was sent') : error;
+      const undone = error === undefined || request.socket.destroyed ? Promise.resolve() : undo(deps, callerOf(request), takenOf(request));
+      undone.then(() => next(fault), next);
     });
   };
+}
+
+/**
+ * An upload that is refused as a whole leaves nothing. One whose connection was lost leaves what had come in: its sender asks for that, and
+ * sends the rest.
+ */
+async function undo({ db }: TakeDependencies, { memberId }: Pick<Caller, 'memberId'>, { images }: UploadResult): Promise<void> {
+  await discardUploaded(
+    db,
+    memberId,
+    images.map(({ id }) => id),
+  );
 }
 
 const tooMuch = ({ totalBytes }: Limits) =>
   new AppError('too-large', { detail: `One upload may hold ${totalBytes / mebibyte} MB; send the files in several` });
 
-/** A storage engine of multer that keeps readings instead of files. */
-function readingEngine(
-  { env, workers, identityKey }: Pick<Dependencies, 'env' | 'workers' | 'identityKey'>,
-  callerOf: CallerOf,
-): StorageEngine {
-  const received = new WeakMap<Request, number>();
+/** A storage engine of multer that keeps what became of files instead of files. */
+function takingEngine(deps: TakeDependencies, callerOf: CallerOf): StorageEngine {
   return {
     _handleFile(request, file, done) {
-      const chunks: Buffer[] = [];
-      let size = 0;
-      file.stream.on('data', (chunk: Buffer) => {
-        size += chunk.length;
-        received.set(request, (received.get(request) ?? 0) + chunk.length);
-        // A file over the limit is read to its end, so that the others are still seen, but not kept.
-        if (size <= env.upload.fileBytes) chunks.push(chunk);
-        else chunks.length = 0;
+      const upload = uploads.get(request);
+      if (upload === undefined) throw new Error('a file came in before its request');
+      const place = upload.results.push(undefined) - 1;
+      // A connection that is lost while the file waits for its place is an error of the reading below as well.
+      file.stream.once('error', () => undefined);
+      const free = upload.places.at(-inHand) ?? Promise.resolve();
+      const taking = free.then(async () => {
+        const received = await gather(file.stream, file.originalname.slice(0, longestName), upload, deps.env.upload);
+        upload.results[place] = await takeFile(deps, callerOf(request), received);
       });
-      file.stream.once('error', done);
-      file.stream.once('end', () => {
-        if ((received.get(request) ?? 0) > env.upload.totalBytes) {
-          done(tooMuch(env.upload));
-          return;
-        }
-        const slot: Slot = { name: file.originalname.slice(0, longestName) };
-        slots.get(request)?.push(slot);
-        readWhole(chunks, size, departmentKey(identityKey, callerOf(request).departmentId)).then((outcome) => {
-          slot.outcome = outcome;
-          done(null, {});
-        }, done);
-      });
+      upload.places.push(
+        taking.then(
+          () => undefined,
+          () => undefined,
+        ),
+      );
+      taking.then(() => done(null, {}), done);
     },
     _removeFile(_request, _file, done) {
       done(null);
     },
   };
+}
 
-  async function readWhole(chunks: Buffer[], size: number, key: Uint8Array): Promise<Read> {
-    const { fileBytes } = env.upload;
-    if (size > fileBytes)
-      return refuse('too-large', `The file is larger than ${fileBytes / mebibyte} MB, the most that one file may have.`);
-    const outcome = await workers.readDicom({ bytes: Buffer.concat(chunks), key }, env.readMilliseconds);
-    return outcome ?? refuse('too-slow', `Reading the file took longer than ${env.readMilliseconds / 1000} s and was stopped.`);
+async function gather(stream: Readable, name: string, upload: Upload, limits: Limits): Promise<ReceivedFile> {
+  const chunks: Buffer[] = [];
+  let size = 0;
+  for await (const chunk of stream as AsyncIterable<Buffer>) {
+    size += chunk.length;
+    upload.received += chunk.length;
+    // A file over the limit is read to its end, so that the others are still seen, but not kept.
+    if (size <= limits.fileBytes) chunks.push(chunk);
+    else chunks.length = 0;
   }
+  if (upload.received > limits.totalBytes) throw tooMuch(limits);
+  return { name, size, bytes: size > limits.fileBytes ? null : Buffer.concat(chunks) };
 }

@@ -1,27 +1,14 @@
-/** Taking an upload: what the reader accepted is stored, what it refused is named with its reason. */
-import type { Request } from 'express';
+/**
+ * Storing what the door accepted. Values are noted as discarded before they are written, and an image that then has them takes that back, so
+ * that whatever breaks in between leaves nothing behind for longer than until the next sweep (server/push/retention.ts).
+ */
 import { addImages, type NewImage } from '../../db/queries/images';
-import type { Refusal, UploadResult } from '../contract/images';
+import { noteDiscarded } from '../../db/queries/inbox';
+import type { UploadResult } from '../contract/images';
 import type { Dependencies } from '../dependencies';
 import type { AcceptedImage } from '../dicom/read';
-import { readingsOf } from './file-reader';
+import { sha256 } from '../storage/disk-objects';
 import { describeImage } from './image-source';
-import type { Caller } from './sessions';
-
-/** Stores the accepted images of a request: values first, then all rows in one statement. */
-export async function takeUpload(
-  deps: Pick<Dependencies, 'db' | 'objects'>,
-  caller: Pick<Caller, 'memberId' | 'departmentId'>,
-  request: Request,
-): Promise<UploadResult> {
-  const accepted: ImageToStore[] = [];
-  const refused: Refusal[] = [];
-  for (const { name, outcome } of readingsOf(request)) {
-    if ('accepted' in outcome) accepted.push(...outcome.accepted.map((image) => ({ ...image, fileKey: outcome.fileKey })));
-    else refused.push({ ...outcome.refused, name });
-  }
-  return { images: await storeImages(deps, caller, accepted), refused };
-}
 
 /** Whose images they are, and through which door they came: a member's upload, unless it says that a scanner sent them. */
 export interface Origin {
@@ -36,26 +23,27 @@ export interface ImageToStore extends AcceptedImage {
   readonly fileKey?: string;
 }
 
-/** Stores images that came through the door. An object whose row then fails is unreachable and holds no identity. */
+/** Stores images that came through the door: values first, then all rows in one statement. */
 export async function storeImages(
   { db, objects }: Pick<Dependencies, 'db' | 'objects'>,
   origin: Origin,
   accepted: readonly ImageToStore[],
 ): Promise<UploadResult['images']> {
-  const rows: NewImage[] = [];
-  for (const image of accepted) {
-    const { values } = image;
-    const valuesDigest = await objects.put(new Uint8Array(values.buffer, values.byteOffset, values.byteLength));
-    rows.push(rowOf(image, valuesDigest, origin));
-  }
-  return (await addImages(db, rows)).map(describeImage);
+  const values = accepted.map((image) => bytesOf(image.values));
+  const digests = values.map(sha256);
+  await noteDiscarded(db, digests);
+  for (const bytes of values) await objects.put(bytes);
+  return (
+    await addImages(
+      db,
+      accepted.map((image, i) => rowOf(image, digests[i] ?? '', origin)),
+    )
+  ).map(describeImage);
 }
 
-function rowOf(
-  image: ImageToStore,
-  valuesDigest: string,
-  { departmentId, memberId, arrival, scannerId }: Origin,
-): NewImage {
+const bytesOf = ({ buffer, byteOffset, byteLength }: Float32Array): Uint8Array => new Uint8Array(buffer, byteOffset, byteLength);
+
+function rowOf(image: ImageToStore, valuesDigest: string, { departmentId, memberId, arrival, scannerId }: Origin): NewImage {
   const { rows, columns, frames, component, use, kspace, confirmedNoText, spacingMm, range } = image;
   const { facts, frameFacts, identifiers, warnings, deidentification } = image;
   return {

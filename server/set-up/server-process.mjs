@@ -16,6 +16,7 @@ import { SetUpError } from './run-command.mjs';
 /**
  * @typedef {object} ServerProcess
  * @property {string} logFile
+ * @property {number} processId
  * @property {Promise<string>} ready Resolves to the file of the demo accounts when the server serves; rejects with the end of its log
  *   when it ends before.
  * @property {Promise<unknown>} ended Resolves when the process has ended.
@@ -49,7 +50,8 @@ export function startServer(file, { dataFolder, env, onStep }) {
     });
     ended.then(() => reject(new SetUpError(`The server ended while it started. ${logFile} says:\n${endOf(logFile)}`)), reject);
   });
-  return { logFile, ready, ended, stop };
+  // A child without a number never started, and `ready` says so.
+  return { logFile, processId: child.pid ?? 0, ready, ended, stop };
 }
 
 /** @param {string} logFile */

@@ -5,6 +5,7 @@ import { growthFigures } from './growth';
 import { pipelineFigures } from './pipeline';
 import { previewFigures } from './preview';
 import { requestFigures } from './request';
+import { seriesFigures } from './series';
 import { transformFigures } from './transform';
 
 async function run(): Promise<void> {
@@ -15,6 +16,7 @@ async function run(): Promise<void> {
     ...(await growthFigures()),
     ...(await causeFigures()),
     ...(await requestFigures()),
+    ...(await seriesFigures()),
   ];
   console.log(tableOf(figures));
   if (process.argv.includes('--json')) console.log(jsonOf(figures, new Date()));

@@ -29,7 +29,7 @@ test('a technologist files a case from a file of the file picker', async () => {
   opened = await visitAs(browser, 'technologist');
   const { page } = opened;
   await page.getByRole('link', { name: 'new case' }).click();
-  const [picker] = await Promise.all([page.waitForEvent('filechooser'), page.getByRole('button', { name: 'choose a file' }).click()]);
+  const [picker] = await Promise.all([page.waitForEvent('filechooser'), page.getByRole('button', { name: 'choose files' }).click()]);
   await picker.setFiles(slice);
   await page.getByText('attributes removed').waitFor();
   await page.getByLabel('title').fill(title);

@@ -1,7 +1,8 @@
-/** Where files can be dropped, on a wide screen: a stitched frame that turns solid indigo while something is held over it. */
+/** Where files and folders can be dropped, on a wide screen: a stitched frame that turns solid indigo while something is held over it. */
 import { useState, type DragEvent, type ReactNode } from 'react';
 import { radius, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
+import { droppedFiles } from '../intake/dropped-files';
 
 interface DropAreaProps {
   onFiles: (files: File[]) => void;
@@ -14,8 +15,9 @@ export function DropArea({ onFiles, children }: DropAreaProps) {
   const drop = (event: DragEvent): void => {
     event.preventDefault();
     setOver(false);
-    const files = [...event.dataTransfer.files];
-    if (files.length > 0) onFiles(files);
+    void droppedFiles(event.dataTransfer).then((files) => {
+      if (files.length > 0) onFiles(files);
+    });
   };
   return (
     <div

@@ -1,4 +1,4 @@
-/** A button that opens the browser's own file picker. */
+/** A button that opens the browser's own picker, of files or of a folder with all that is in it. */
 import { useRef } from 'react';
 import { Button, type ButtonKind } from '@/components/ui/button';
 
@@ -8,10 +8,14 @@ interface FileButtonProps {
   grow?: boolean;
   tall?: boolean;
   busy?: boolean | number;
+  folder?: boolean;
   onFiles: (files: File[]) => void;
 }
 
-export function FileButton({ label, kind = 'quiet', grow = false, tall = false, busy = false, onFiles }: FileButtonProps) {
+/** Every browser knows it under this name (File and Directory Entries API); React's types do not. */
+const pickFolder = { webkitdirectory: '' };
+
+export function FileButton({ label, kind = 'quiet', grow = false, tall = false, busy = false, folder = false, onFiles }: FileButtonProps) {
   const input = useRef<HTMLInputElement>(null);
   return (
     <>
@@ -19,6 +23,7 @@ export function FileButton({ label, kind = 'quiet', grow = false, tall = false, 
         ref={input}
         type="file"
         multiple
+        {...(folder ? pickFolder : {})}
         hidden
         aria-label={label}
         onChange={(event) => {

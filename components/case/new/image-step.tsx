@@ -1,23 +1,23 @@
 /** Step 1: the scanner and the images. The header fills in what it can; files that were refused say why. */
 import { View } from 'react-native';
 import { Notice } from '@/components/ui/notice';
-import { ProgressThread } from '@/components/ui/progress-thread';
 import { Text } from '@/components/ui/text';
 import { TextField } from '@/components/ui/text-field';
 import { gutter, space } from '@/components/ui/theme';
 import { useLayout } from '@/components/ui/use-layout';
+import { DraftImages } from '../intake/draft-images';
+import { IntakeProgress } from '../intake/intake-progress';
+import { Refusals } from '../intake/refusals';
+import type { Intake } from '../intake/use-intake';
 import type { Suggestion } from './draft';
 import { DropArea } from './drop-area';
 import { FileButton } from './file-button';
-import { RefusalCard } from './refusal-card';
 import { ScannerBand } from './scanner-band';
-import { TakenImage } from './taken-image';
 import type { DraftForm } from './use-draft';
-import type { useIntake } from './use-intake';
 
 interface ImageStepProps {
   form: DraftForm;
-  intake: ReturnType<typeof useIntake>;
+  intake: Intake;
   suggestion: Suggestion;
   scannerFromHeader: boolean;
 }
@@ -26,50 +26,25 @@ export function ImageStep({ form, intake, suggestion, scannerFromHeader }: Image
   const wide = useLayout() === 'wide';
   const { draft, change, errors } = form;
   const title = draft.title ?? suggestion.title;
+  const busy = intake.progress ? intake.progress.settled / intake.progress.count : false;
   const choose = (
     <>
       <View style={{ flexDirection: 'row', gap: space(2) }}>
-        <FileButton
-          label={draft.images.length > 0 ? 'add a file' : 'choose a file'}
-          grow
-          busy={intake.progress?.done ?? false}
-          onFiles={intake.take}
-        />
+        <FileButton label={draft.images.length > 0 ? 'add files' : 'choose files'} grow busy={busy} onFiles={intake.take} />
+        <FileButton label="choose a folder" folder grow busy={busy} onFiles={intake.take} />
       </View>
-      {intake.progress ? <ProgressThread {...intake.progress} /> : null}
+      <IntakeProgress intake={intake} />
       {intake.failure ? <Notice kind="failed" text={intake.failure.message} /> : null}
       <Text variant="detail" tone="inkSoft">
-        {wide ? 'Or drop DICOM files here. ' : ''}Names, numbers and dates are taken out while an image is read. A photograph of the screen
-        is refused: it shows names.
+        {wide ? 'Or drop DICOM files, a folder or a zip here. ' : 'A zip is opened. '}Names, numbers and dates are taken out while an image
+        is read. A photograph of the screen is refused: it shows names.
       </Text>
     </>
   );
   return (
     <View>
-      {intake.refused.map((refusal, index) => (
-        <RefusalCard
-          key={`${refusal.name} ${index}`}
-          refusal={refusal}
-          onLeaveOut={() => intake.leaveOut(refusal)}
-          onChooseAnother={(files) => {
-            intake.leaveOut(refusal);
-            intake.take(files);
-          }}
-        />
-      ))}
-      {draft.images.map((imageId, index) => (
-        <TakenImage
-          key={imageId}
-          imageId={imageId}
-          withRemoved={index === 0}
-          onRemove={() =>
-            change(
-              'images',
-              draft.images.filter((other) => other !== imageId),
-            )
-          }
-        />
-      ))}
+      <Refusals intake={intake} />
+      <DraftImages images={draft.images} onChange={(images) => change('images', images)} />
       <View style={{ padding: gutter.phone, gap: space(3) }}>{wide ? <DropArea onFiles={intake.take}>{choose}</DropArea> : choose}</View>
       <ScannerBand form={form} fromHeader={scannerFromHeader} />
       <View style={{ padding: gutter.phone }}>

@@ -25,7 +25,7 @@ import { StepTabs, steps, type Step } from './step-tabs';
 import { coilOf, scannerOf, suggest } from './suggest';
 import { TriedStep } from './tried-step';
 import { useDraft, type DraftForm } from './use-draft';
-import { useIntake } from './use-intake';
+import { useIntake } from '../intake/use-intake';
 
 interface NewCaseScreenProps {
   memberId: string;
@@ -61,15 +61,18 @@ export function NewCaseScreen({ memberId, scannerId }: NewCaseScreenProps) {
   const scanner = scanners.data?.find(({ id }) => id === draft.scannerId);
   const suggestion = suggest(draft, facts, scanner?.name);
   const named = facts && scanners.data ? scannerOf(facts, scanners.data) : undefined;
-  const intake = useIntake((images: Image[]) => {
-    const before = form.current();
-    form.change('images', [...before.images, ...images.map(({ id }) => id)]);
-    const [first] = images;
-    const fitting = first && before.scannerId === null ? scannerOf(first.acquisition, scanners.data ?? []) : undefined;
-    if (!first || !fitting) return;
-    form.change('scannerId', fitting.id);
-    form.change('coilId', coilOf(first.acquisition, fitting));
-  });
+  const intake = useIntake(
+    (images: Image[]) => {
+      const before = form.current();
+      form.change('images', [...before.images, ...images.map(({ id }) => id)]);
+      const [first] = images;
+      const fitting = first && before.scannerId === null ? scannerOf(first.acquisition, scanners.data ?? []) : undefined;
+      if (!first || !fitting) return;
+      form.change('scannerId', fitting.id);
+      form.change('coilId', coilOf(first.acquisition, fitting));
+    },
+    () => form.current().images,
+  );
   const create = useCreateCase();
   const save = (): void => {
     const body = newCaseFrom(draft, suggestion);

@@ -3,23 +3,26 @@ import { useState } from 'react';
 import { View } from 'react-native';
 import { useAttachImage } from '@/components/api/cases';
 import { Notice } from '@/components/ui/notice';
-import { ProgressThread } from '@/components/ui/progress-thread';
 import { Select } from '@/components/ui/select';
 import { space } from '@/components/ui/theme';
 import { imageRoles } from '@/server/contract/cases';
 import { FileButton } from '../new/file-button';
-import { RefusalCard } from '../new/refusal-card';
-import { useIntake } from '../new/use-intake';
+import { IntakeProgress } from '../intake/intake-progress';
+import { Refusals } from '../intake/refusals';
+import { useIntake } from '../intake/use-intake';
 import { imageRoleWords } from '../words';
 
 type ImageRole = (typeof imageRoles)[number];
 
-export function AddImage({ caseId }: { caseId: string }) {
+export function AddImage({ caseId, onCase }: { caseId: string; onCase: readonly string[] }) {
   const [role, setRole] = useState<ImageRole>('comparison');
   const attach = useAttachImage(caseId);
-  const intake = useIntake((images) => {
-    for (const image of images) attach.mutate({ imageId: image.id, role });
-  });
+  const intake = useIntake(
+    (images) => {
+      for (const image of images) attach.mutate({ imageId: image.id, role });
+    },
+    () => onCase,
+  );
   const failure = attach.error ?? intake.failure;
   return (
     <View style={{ gap: space(3), paddingTop: space(3) }}>
@@ -32,21 +35,16 @@ export function AddImage({ caseId }: { caseId: string }) {
             onChange={(id) => setRole(imageRoles.find((other) => other === id) ?? 'comparison')}
           />
         </View>
-        <FileButton label="choose a file" tall busy={intake.progress?.done ?? false} onFiles={intake.take} />
-      </View>
-      {intake.progress ? <ProgressThread {...intake.progress} /> : null}
-      {failure ? <Notice kind="failed" text={failure.message} /> : null}
-      {intake.refused.map((refusal, index) => (
-        <RefusalCard
-          key={`${refusal.name} ${index}`}
-          refusal={refusal}
-          onLeaveOut={() => intake.leaveOut(refusal)}
-          onChooseAnother={(files) => {
-            intake.leaveOut(refusal);
-            intake.take(files);
-          }}
+        <FileButton
+          label="choose files"
+          tall
+          busy={intake.progress ? intake.progress.settled / intake.progress.count : false}
+          onFiles={intake.take}
         />
-      ))}
+      </View>
+      <IntakeProgress intake={intake} />
+      {failure ? <Notice kind="failed" text={failure.message} /> : null}
+      <Refusals intake={intake} />
     </View>
   );
 }

@@ -5,9 +5,12 @@ import { gutter, space } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import type { Case } from '@/server/contract/cases';
 import { ImageFigures } from './image-figures';
+import { Neighbours } from './neighbours';
 
 interface ImagesMatProps {
   images: Case['images'];
+  /** Where it is given, the series around an image can be looked along. */
+  found?: Case;
   /** Pixels at the left and right. */
   gutters?: number;
 }
@@ -18,9 +21,11 @@ export const figureSize = (room: number): number => {
   return Math.max(120, Math.min(204, Math.floor((room - (across - 1) * space(2)) / across)));
 };
 
-export function ImagesMat({ images, gutters = gutter.phone }: ImagesMatProps) {
+export function ImagesMat({ images, found, gutters = gutter.phone }: ImagesMatProps) {
   const { colours } = useTheme();
   const [room, setRoom] = useState(0);
+  const [openSeries, setOpenSeries] = useState<string | null>(null);
+  const opened = images.find(({ imageId }) => imageId === openSeries);
   const bad = images.filter(({ role }) => role === 'bad');
   const others = images.filter(({ role }) => role !== 'bad');
   return (
@@ -31,10 +36,17 @@ export function ImagesMat({ images, gutters = gutter.phone }: ImagesMatProps) {
       >
         {room > 0
           ? [...bad, ...others].map((image) => (
-              <ImageFigures key={image.imageId} image={image} size={figureSize(room)} withKspace={image.role === 'bad'} />
+              <ImageFigures
+                key={image.imageId}
+                image={image}
+                size={figureSize(room)}
+                withKspace={image.role === 'bad'}
+                onOpenSeries={found && (() => setOpenSeries(image.imageId))}
+              />
             ))
           : null}
       </View>
+      {found && opened ? <Neighbours key={opened.imageId} found={found} image={opened} onClose={() => setOpenSeries(null)} /> : null}
     </View>
   );
 }

@@ -17,12 +17,12 @@ export function ImagesSection({ found, bleed }: ImagesSectionProps) {
     <Section title="Images">
       {found.images.length > 0 ? (
         <View style={{ marginLeft: -bleed.left, marginRight: -bleed.right }}>
-          <ImagesMat images={found.images} gutters={bleed.left} />
+          <ImagesMat images={found.images} found={found} gutters={bleed.left} />
         </View>
       ) : (
         <EmptyState text="No image yet. It may come later, and from somebody else." />
       )}
-      {found.may.edit ? <AddImage caseId={found.id} /> : null}
+      {found.may.edit ? <AddImage caseId={found.id} onCase={found.images.map(({ imageId }) => imageId)} /> : null}
     </Section>
   );
 }
