@@ -3,8 +3,9 @@
  * is DICOM at all, and finds every cut: the parser itself lets some pass (implicit VR, undefined lengths).
  * File format: DICOM PS3.10 section 7; a bare data set without preamble, as some exports are, is taken when it reads cleanly.
  */
-import dicomParser, { type DataSet, type Element, type ParseDicomOptions } from 'dicom-parser';
+import dicomParser, { type DataSet, type Element } from 'dicom-parser';
 import { pixelDataTag } from './allow-list';
+import { TooManyElements, walkElements } from './counted-elements';
 import { itemsFrom, type Items } from './encapsulation';
 import { inflated } from './inflate';
 import { cut, isRefused, refuse, type Refused } from './refusal';
@@ -25,6 +26,8 @@ const preambleLength = 128;
 const undefinedLength = 0xffffffff;
 /** The first element of the meta information, its group length, takes twelve bytes behind the prefix. */
 const metaStart = preambleLength + 4 + 12;
+/** Meta information is a few hundred bytes long: a dozen identifiers and titles. */
+const longestMeta = 1 << 16;
 
 export function parse(bytes: Uint8Array): Parsed | Refused {
   if (bytes.length === 0) return refuse('empty', 'The file is empty (0 bytes). Copy or export it again.');
@@ -33,13 +36,12 @@ export function parse(bytes: Uint8Array): Parsed | Refused {
   if (container.transferSyntax === deflatedReference) return refuse('transfer-syntax', `The pixels are ${whyNotRead(deflatedReference)}.`);
   if (container.transferSyntax !== deflated) return parseDataSet(bytes, container);
   const whole = inflated(bytes.subarray(container.start));
-  return isRefused(whole) ? whole : parseDataSet(whole, { ...container, transferSyntax: explicitLittleEndian, bare: true });
+  return isRefused(whole) ? whole : parseDataSet(whole, { ...container, transferSyntax: explicitLittleEndian, start: 0 });
 }
 
-/** `meta`: elements of the meta information where `bytes` are a bare data set. */
-function parseDataSet(bytes: Uint8Array, { transferSyntax, bare, meta }: Container): Parsed | Refused {
-  const dataSet = guarded(() => parseDicom(bytes, { untilTag: pixelDataTag, ...(bare ? { TransferSyntaxUID: transferSyntax } : {}) }));
-  if (isRefused(dataSet)) return dataSet;
+function parseDataSet(bytes: Uint8Array, { transferSyntax, start, meta }: Container): Parsed | Refused {
+  const { dataSet, stumbled } = walkElements(bytes, start, transferSyntax, pixelDataTag);
+  if (stumbled !== undefined) return refusedFor(stumbled);
   if (isCut(dataSet, bytes.length)) return cut;
   Object.assign(dataSet.elements, meta);
   const pixelData = dataSet.elements[pixelDataTag];
@@ -50,14 +52,6 @@ function parseDataSet(bytes: Uint8Array, { transferSyntax, bare, meta }: Contain
   return isRefused(items) ? items : { dataSet, transferSyntax, pixelData, items };
 }
 
-/** The parser inflates what calls itself deflated, wherever it stands and without a limit: never here. */
-function parseDicom(bytes: Uint8Array, options: ParseDicomOptions): DataSet {
-  const inflater = () => {
-    throw new Error('deflated inside a data set');
-  };
-  return dicomParser.parseDicom(bytes, { ...options, inflater });
-}
-
 /** How much of what follows the pixels is looked at for its tags: signatures and padding are short. */
 const longestTail = 1 << 20;
 
@@ -66,55 +60,50 @@ export function elementsAfter({ dataSet, transferSyntax, pixelData, items }: Par
   if (pixelData === undefined) return {};
   const end = items?.end ?? pixelData.dataOffset + pixelData.length;
   const tail = new Uint8Array(dataSet.byteArray.subarray(end, end + longestTail));
-  try {
-    return parseDicom(tail, { TransferSyntaxUID: transferSyntax }).elements;
-  } catch (thrown) {
-    return elementsBefore(thrown);
-  }
+  return walkElements(tail, 0, transferSyntax, '').dataSet.elements;
 }
 
-/** What the parser had read when it stumbled. */
-function elementsBefore(thrown: unknown): DataSet['elements'] {
-  const dataSet: unknown = typeof thrown === 'object' && thrown !== null && 'dataSet' in thrown ? thrown.dataSet : undefined;
-  return isDataSet(dataSet) ? dataSet.elements : {};
-}
-
-const isDataSet = (value: unknown): value is DataSet =>
-  typeof value === 'object' && value !== null && 'elements' in value && typeof value.elements === 'object';
-
-/** How the data set is written, whether it comes without preamble and meta information, and else where it starts. */
+/** How the data set is written and where it starts. */
 interface Container {
   readonly transferSyntax: string;
-  readonly bare: boolean;
   readonly start: number;
+  /** Elements of the meta information, where there is one. */
   readonly meta?: DataSet['elements'];
 }
 
 function containerOf(bytes: Uint8Array): Container | Refused {
   if (!hasPrefix(bytes)) return isCutPreamble(bytes) ? cut : bareContainer(bytes);
-  const start = endOfMeta(bytes);
   // What follows may be deflated, which cannot be walked; but the length, too, may be wrong.
-  const found = metaOf(bytes.subarray(0, start));
-  const header = isRefused(found) || found.transferSyntax === undefined ? metaOf(bytes) : found;
+  const found = metaOf(bytes.subarray(0, saidEndOfMeta(bytes)));
+  const header = isRefused(found) || found.transferSyntax === undefined ? metaOf(bytes.subarray(0, longestMeta)) : found;
   if (isRefused(header)) return header;
   const { transferSyntax, elements: meta } = header;
-  if (transferSyntax !== undefined) return { transferSyntax, bare: false, start, meta };
+  if (transferSyntax !== undefined) return { transferSyntax, start: endOf(meta), meta };
   return refuse('unreadable', 'The file does not say how it is written (no transfer syntax). It may be cut off: export it again.');
 }
 
 function metaOf(bytes: Uint8Array): { transferSyntax: string | undefined; elements: DataSet['elements'] } | Refused {
-  return guarded(() => {
+  try {
     const header = dicomParser.readPart10Header(bytes, { untilTag: '' });
     return { transferSyntax: header.string('x00020010'), elements: header.elements };
-  });
+  } catch (thrown) {
+    return refusedFor(thrown);
+  }
 }
 
-/** Where the data set starts. A file that does not begin with the group length, as it must, is read on until another group comes. */
-function endOfMeta(bytes: Uint8Array): number {
+const endOf = (meta: DataSet['elements']): number =>
+  Object.values(meta).reduce((end, { dataOffset, length }) => Math.max(end, dataOffset + length), preambleLength + 4);
+
+/** Where the meta information ends by its own word. One that does not begin with its length, as it must, or goes on behind it, is read on
+ *  until another group comes. */
+function saidEndOfMeta(bytes: Uint8Array): number {
   if (bytes.length < metaStart) return bytes.length;
-  const view = new DataView(bytes.buffer, bytes.byteOffset + preambleLength + 4, 12);
-  const saysLength = view.getUint32(0, true) === 0x0000_0002 && textAt(bytes, preambleLength + 8, 2) === 'UL';
-  return saysLength ? Math.min(bytes.length, metaStart + view.getUint32(8, true)) : bytes.length;
+  const view = new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
+  const at = preambleLength + 4;
+  const saysLength = view.getUint32(at, true) === 0x0000_0002 && textAt(bytes, at + 4, 2) === 'UL';
+  const end = saysLength ? metaStart + view.getUint32(at + 8, true) : bytes.length;
+  const goesOn = end + 2 <= bytes.length && view.getUint16(end, true) === 0x0002;
+  return Math.min(goesOn ? bytes.length : end, longestMeta);
 }
 
 function hasPrefix(bytes: Uint8Array): boolean {
@@ -132,8 +121,8 @@ function bareContainer(bytes: Uint8Array): Container | Refused {
   if (bytes.length < 8) return notDicom;
   const view = new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
   if (view.getUint16(0, true) !== 0x0008 || view.getUint16(2, true) > 0x0070) return notDicom;
-  if (/^[A-Z]{2}$/.test(textAt(bytes, 4, 2))) return { transferSyntax: explicitLittleEndian, bare: true, start: 0 };
-  return view.getUint32(4, true) <= 1024 ? { transferSyntax: implicitLittleEndian, bare: true, start: 0 } : notDicom;
+  if (/^[A-Z]{2}$/.test(textAt(bytes, 4, 2))) return { transferSyntax: explicitLittleEndian, start: 0 };
+  return view.getUint32(4, true) <= 1024 ? { transferSyntax: implicitLittleEndian, start: 0 } : notDicom;
 }
 
 const textAt = (bytes: Uint8Array, from: number, length: number): string => String.fromCharCode(...bytes.subarray(from, from + length));
@@ -154,14 +143,15 @@ function isCut(dataSet: DataSet, length: number): boolean {
   });
 }
 
-/** The parser throws strings, errors and objects that hold either; which of them says that bytes were missing is in its words. */
-function guarded<Result extends object>(action: () => Result): Result | Refused {
-  try {
-    return action();
-  } catch (thrown) {
-    const inner = typeof thrown === 'object' && thrown !== null && 'exception' in thrown ? thrown.exception : thrown;
-    const words = inner instanceof Error ? inner.message : String(inner);
-    if (/past end|over(read|run)|maxP ?osition|greater than or equal to 'byteArray' length/.test(words)) return cut;
-    return refuse('unreadable', 'The file starts like DICOM, but its elements cannot be read: it is damaged. Export it again.');
-  }
+/** The parser throws strings and errors; which of them says that bytes were missing is in its words. */
+function refusedFor(thrown: unknown): Refused {
+  if (thrown instanceof TooManyElements) return tooManyElements;
+  const words = thrown instanceof Error ? thrown.message : String(thrown);
+  if (/past end|over(read|run)|maxP ?osition|greater than or equal to 'byteArray' length/.test(words)) return cut;
+  return refuse('unreadable', 'The file starts like DICOM, but its elements cannot be read: it is damaged. Export it again.');
 }
+
+const tooManyElements = refuse(
+  'too-large',
+  'The header holds more elements than those of the longest series that one file may have. Export the series in parts.',
+);
