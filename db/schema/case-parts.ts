@@ -1,5 +1,6 @@
 /** What members add to a case: trials, marks, comments, findings, signatures. */
 import { index, integer, jsonb, pgTable, text, timestamp, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
+import type { Acquisition } from '../../recon/acquisition';
 import type { Recipe } from '../../recon/recipe';
 import { cases } from './cases';
 import { images } from './images';
@@ -30,6 +31,8 @@ export const trials = pgTable(
     compareImageId: uuid('compare_image_id').references(() => images.id),
     compareFrame: integer('compare_frame'),
     phaseEncode: phaseEncodeWord('phase_encode').notNull(),
+    /** What it ran with: a scan fact that is corrected later does not change what was kept. Null in trials older than this column. */
+    acquisition: jsonb().$type<Acquisition>(),
     recipe: jsonb().$type<Recipe>().notNull(),
     metrics: jsonb().$type<Record<string, unknown>>().notNull(),
     digest: text().notNull(),

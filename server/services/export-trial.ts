@@ -1,6 +1,6 @@
 /**
- * Files of a trial, and of a recipe on an image. A file of a trial is computed anew, and handed out only if its pixels are those that were
- * kept: after a correction of scan facts, or with a newer model, they may not be.
+ * Files of a trial, and of a recipe on an image. A file of a trial is computed anew with what it ran with, and handed out only if its pixels are
+ * those that were kept: with a newer model they may not be.
  */
 import { findTrial } from '../../db/queries/case-parts';
 import { findCaseOf } from '../../db/queries/cases';
@@ -39,15 +39,16 @@ export async function readTrialFile(
   gone: AbortSignal,
 ): Promise<Binary> {
   const { trial, caseNumber } = await requireTrialOf(deps, caller, { caseId, trialId });
-  const { imageId, frame, phaseEncode } = trial;
-  const run = await prepareRun(deps, caller, { imageId, frame, recipe: wireRecipe(trial.recipe), facts: { phaseEncode } });
+  const { imageId, frame, phaseEncode, acquisition: keptAcquisition } = trial;
+  const recipe = wireRecipe(trial.recipe);
+  const run = await prepareRun(deps, caller, { imageId, frame, recipe, facts: { phaseEncode }, keptAcquisition });
   const about = derivationOf(deps, caller, run, {
     ...{ caseNumber, instanceNumber: trial.number, object: `trial ${trialId}`, study: `case ${caseId}` },
     title: `Pickglass ${deps.version}, trial ${trial.number} of case ${caseNumber}`,
   });
   const { bytes, digest } = await runExport(deps, run, about, file, gone);
   if (digest !== trial.digest) {
-    const detail = 'The scan facts or the model changed since this trial was kept, and it no longer gives the same pixels: keep it again';
+    const detail = 'The model changed since this trial was kept, and it no longer gives the same pixels: keep it again';
     throw new AppError('not-computable', { detail });
   }
   return fileAnswer(bytes, nameOf(caseNumber, trial.number, file));

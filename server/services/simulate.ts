@@ -29,6 +29,8 @@ interface Wish {
   readonly recipe: Recipe;
   readonly compareWith?: Named | null | undefined;
   readonly facts?: { readonly phaseEncode?: PhaseEncode | undefined } | undefined;
+  /** What a kept trial ran with; left out, the scan facts of the image say. */
+  readonly keptAcquisition?: Acquisition | null;
 }
 
 /** Everything that a run needs, checked: what a simulation and a trial have in common. */
@@ -57,7 +59,7 @@ export async function simulate(
 export async function prepareRun(deps: Pick<Dependencies, 'db' | 'values'>, caller: Caller, wish: Wish): Promise<Run> {
   const row = await requireNamedImage(deps.db, caller, wish.imageId, ['imageId']);
   requireAnalysable(row, ['imageId']);
-  const acquisition = acquisitionForRun(row, wish.frame, wish.facts?.phaseEncode);
+  const acquisition = wish.keptAcquisition ?? acquisitionForRun(row, wish.frame, wish.facts?.phaseEncode);
   const recipe = checkedRecipe(wish.recipe, acquisition);
   const source = await sourceOf(deps, row, wish.frame);
   if (!wish.compareWith) return { row, source, acquisition, recipe };

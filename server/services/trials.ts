@@ -33,6 +33,7 @@ export async function keepTrial(deps: Dependencies, caller: Caller, { caseId, no
       imageId: row.id,
       frame: wish.frame,
       phaseEncode: acquisition.phaseEncode,
+      acquisition,
       digest: result.digest,
     },
     compareImageId: wish.compareWith?.imageId,

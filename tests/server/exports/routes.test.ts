@@ -1,6 +1,8 @@
 /** Files of a trial over HTTP: what comes, under which name, and that it is the trial that was kept. */
 import { createHash } from 'node:crypto';
 import dicomParser from 'dicom-parser';
+import { eq } from 'drizzle-orm';
+import { trials } from '../../../db/schema/case-parts';
 import { recipeFileSchema } from '../../../server/contract/recipe-file';
 import { trialFiles } from '../../../server/contract/exports';
 import { openApplication, type Application } from '../application';
@@ -53,10 +55,23 @@ describe('the files of a trial', () => {
     expect([image === uids[0], study === uids[1], series === uids[2]]).toEqual([false, true, false]);
   });
 
-  it('are not handed out when the trial no longer gives the pixels that were kept', async () => {
+  it('stay what they were when a scan fact of the image is corrected afterwards', async () => {
     const disc = await keepTrialOf(application, discFile());
+    const before = await fileOf(application, disc, 'image.npy');
     const agent = await application.as('physicist');
+    // Another TR would move the ghost of the recipe.
     await agent.patch(`/api/images/${disc.image.id}/facts`).send({ repetitionTimeMs: 640 }).expect(200);
+    const after = await fileOf(application, disc, 'image.npy');
+    expect(after.status).toBe(200);
+    expect(after.body.equals(before.body)).toBe(true);
+  });
+
+  it('are not handed out when the model no longer gives the pixels that were kept', async () => {
+    const disc = await keepTrialOf(application, discFile());
+    await application.deps.db
+      .update(trials)
+      .set({ digest: '0'.repeat(64) })
+      .where(eq(trials.id, disc.trial.id));
     const answer = await fileOf(application, disc, 'image.png');
     expect([answer.status, JSON.parse(String(answer.body)).code]).toEqual([422, 'not-computable']);
   });
