@@ -51,7 +51,7 @@ const layers: readonly Layer[] = [
     name: 'workers',
     has: /^workers\//,
     // The thread that listens for scanners is a worker, and what it speaks is kept with the push.
-    imports: [/^recon\//, /^server\/dicom\//, /^server\/push\/node\//],
+    imports: [/^recon\//, /^server\/dicom\//, /^server\/mrd\//, /^server\/push\/node\//],
     typesOf: [/^server\/contract\//],
     packages: /^(node:|piscina$|fast-png$|ndarray)/,
     advice: 'A worker parses a message, calls recon or the DICOM reader and hands buffers back: HTTP and the database stay outside.',

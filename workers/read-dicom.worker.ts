@@ -1,11 +1,13 @@
-/** Reads one DICOM file on a worker thread. Message in: the bytes of a file and a key; out: `Read`, its values transferred, not copied.
- *  The decoders are opened with the thread, before its first file. */
+/** Reads one file, DICOM or raw data, on a worker thread. Message in: the bytes of a file and a key; out: `Read`, its values transferred, not
+ *  copied. The decoders are opened with the thread, before its first file; HDF5 with the first file that needs it. */
 import { move, transferableSymbol, valueSymbol } from 'piscina';
 import { openDecoders } from '../server/dicom/codecs/decoders';
 import { auditedRead } from '../server/dicom/profile/stored';
 import { readDicom, type Read } from '../server/dicom/read';
 import { isRefused } from '../server/dicom/refusal';
 import { unpack, type Packed } from '../server/dicom/unpack';
+import { openHdf5, type Hdf5 } from '../server/mrd/hdf5';
+import { isHdf5, readMrd } from '../server/mrd/read';
 
 export interface ReadDicomJob {
   readonly bytes: Uint8Array;
@@ -19,15 +21,25 @@ export interface ReadDicomJob {
 const handedOver = (read: Read, buffers: ArrayBuffer[]) => move({ [transferableSymbol]: buffers, [valueSymbol]: read });
 
 let decoders = openDecoders();
+let hdf5: Promise<Hdf5> | undefined;
 
 export default async function readDicomTask({ bytes: sent, key, packed }: ReadDicomJob): Promise<ReturnType<typeof handedOver> | Read> {
   const bytes = packed ? unpack(sent, packed) : sent;
   if (isRefused(bytes)) return bytes;
-  if ((await decoders).worn()) decoders = openDecoders();
-  const read = auditedRead(readDicom(bytes, key, await decoders));
+  const read = auditedRead(isHdf5(bytes) ? await readRawData(bytes, key) : await readImages(bytes, key));
   if ('refused' in read) return read;
   return handedOver(
     read,
     read.accepted.map(({ values }) => values.buffer),
   );
+}
+
+async function readImages(bytes: Uint8Array, key: Uint8Array): Promise<Read> {
+  if ((await decoders).worn()) decoders = openDecoders();
+  return readDicom(bytes, key, await decoders);
+}
+
+async function readRawData(bytes: Uint8Array, key: Uint8Array): Promise<Read> {
+  if (hdf5 === undefined || (await hdf5).worn()) hdf5 = openHdf5();
+  return readMrd(bytes, key, await hdf5);
 }

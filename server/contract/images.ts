@@ -59,6 +59,8 @@ export const refusalCodes = [
   'unreadable',
   'encrypted',
   'archive',
+  'not-cartesian',
+  'raw-kind',
 ] as const;
 export type RefusalCode = (typeof refusalCodes)[number];
 

@@ -8,7 +8,7 @@ import { buildWhenChanged } from './built-from.mjs';
 
 const folder = 'dist-server';
 /** Packages that find other files in their folder: scripts of threads, WebAssembly. */
-const external = ['piscina', 'pino', 'pino-http', '@cornerstonejs/*'];
+const external = ['piscina', 'pino', 'pino-http', '@cornerstonejs/*', 'h5wasm'];
 /** CommonJS packages in an ES module still ask for Node's own modules with `require`. */
 const banner = "import { createRequire as requireFrom } from 'node:module';\nconst require = requireFrom(import.meta.url);";
 const sources = ['server', 'workers', 'recon', 'db', 'package-lock.json'];

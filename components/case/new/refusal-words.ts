@@ -20,4 +20,6 @@ export const refusalTitles: Record<RefusalCode, string> = {
   unreadable: 'This file cannot be read.',
   encrypted: 'This file is encrypted.',
   archive: 'This archive, or a file in it, is not opened.',
+  'not-cartesian': 'These raw data are not on a Cartesian grid.',
+  'raw-kind': 'Raw data of this kind are not read here.',
 };
