@@ -25,7 +25,7 @@ export function Inbox({ scanner }: { scanner: { id: string; name: string } }) {
       {!data && !error ? <LoadingWarp what="fetching the inbox" /> : null}
       {data ? (
         <Text variant="small" tone="inkSoft">
-          {`Without names. What nobody takes is deleted after ${data.keptDays} ${data.keptDays === 1 ? 'day' : 'days'}.`}
+          {`Without names. What nobody takes is deleted after ${data.keptDays} ${data.keptDays === 1 ? 'day' : 'days'}, unless a case has part of its series.`}
         </Text>
       ) : null}
       {data?.total === 0 ? <EmptyState text="Nothing waits. What this scanner sends comes here." /> : null}

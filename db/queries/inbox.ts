@@ -117,12 +117,11 @@ function noNeighbourOnCase(db: Database): SQL {
 /** Values that were discarded at least `unusedForMs` ago, and whether an image has them still or again. Younger ones may be on their way in. */
 export async function listDiscardedValues(db: Database, unusedForMs: number): Promise<{ digest: string; inUse: boolean }[]> {
   return db
-    .select({
-      digest: discardedValues.valuesDigest,
-      inUse: sql<boolean>`exists (select 1 from ${images} where ${images.valuesDigest} = ${discardedValues.valuesDigest})`,
-    })
+    .select({ digest: discardedValues.valuesDigest, inUse: sql<boolean>`count(${images.id}) > 0` })
     .from(discardedValues)
-    .where(lte(discardedValues.discardedAt, sql`now() - make_interval(secs => ${unusedForMs / 1000})`));
+    .leftJoin(images, eq(images.valuesDigest, discardedValues.valuesDigest))
+    .where(lte(discardedValues.discardedAt, sql`now() - make_interval(secs => ${unusedForMs / 1000})`))
+    .groupBy(discardedValues.valuesDigest);
 }
 
 export async function forgetDiscarded(db: Database, digest: string): Promise<void> {

@@ -53,9 +53,12 @@ function referenceOf(bytes: Buffer): Outcome['reference'] {
   return { '00081150': attribute('UI', sopClass), '00081155': attribute('UI', instance) };
 }
 
+/** This is the event loop: what is read here of a stranger's file is short. */
+const longestMeta = 4096;
+
 function metaUid(bytes: Buffer, tag: string): string | undefined {
   try {
-    const uid = dicomParser.readPart10Header(bytes, { untilTag: '' }).string(tag);
+    const uid = dicomParser.readPart10Header(bytes.subarray(0, longestMeta), { untilTag: '' }).string(tag);
     return uid !== undefined && /^[0-9.]{1,64}$/.test(uid) ? uid : undefined;
   } catch {
     // What is no DICOM file has no identifiers; the door has said so.

@@ -9,6 +9,11 @@ let application: Application;
 beforeAll(async () => {
   application = await openApplication({ variables: { INBOX_DAYS: '14' } });
 });
+beforeEach(async () => {
+  await application.deps.sql`delete from case_images`;
+  await application.deps.sql`delete from images`;
+  await sweep(application.deps, 0);
+});
 afterAll(() => application.close());
 
 /** Sends discs as the scanner; each is another file. */

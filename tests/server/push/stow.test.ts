@@ -28,7 +28,6 @@ const store = (body: Buffer, contentType = `multipart/related; type="application
     .post('/api/dicomweb/studies')
     .set('Authorization', `Bearer ${token}`)
     .set('Content-Type', contentType)
-    .serialize((sent: unknown) => String(sent))
     .parse((response, done) => {
       const chunks: Buffer[] = [];
       response.on('data', (chunk: Buffer) => chunks.push(chunk));
