@@ -35,12 +35,12 @@ export function SeriesCard({ slices, chosen, withRemoved, onChange }: SeriesCard
     <View style={{ paddingHorizontal: gutter.phone, paddingVertical: space(4), borderBottomWidth: 1, borderBottomColor: colours.rule }}>
       <View style={{ flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', marginVertical: -12 }}>
         <Badge glyph="verified" word={`${slices.length} slices taken in`} />
-        <LinkText label="leave it out" name="leave the series out" onPress={() => onChange([])} />
+        <LinkText label="leave it out" name="leave it out: the whole series" onPress={() => onChange([])} />
       </View>
       <Text variant="small" tone="inkSoft" style={{ paddingTop: space(3) }}>
         {image ? imageLines(image) : 'reading the facts'}
       </Text>
-      <Text variant="detailStrong" style={{ paddingTop: space(2), paddingBottom: space(1) }}>
+      <Text variant="detailStrong" level={2} style={{ paddingTop: space(2), paddingBottom: space(1) }}>
         Which slices show it? {count} on the case.
       </Text>
       <SliceStrip

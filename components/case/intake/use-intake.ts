@@ -1,7 +1,7 @@
 /** Taking files in: what was chosen is laid out file by file, sent, and of what arrived it is proposed which images go on the case. */
 import { useQueryClient } from '@tanstack/react-query';
 import { useRef, useState } from 'react';
-import { fetchImage } from '@/components/api/images';
+import { fetchImage, imageKey } from '@/components/api/images';
 import { fetchSlices } from '@/components/api/series';
 import type { Image, Refusal } from '@/server/contract/images';
 import { isOfTheSystem } from './dropped-files';
@@ -9,7 +9,7 @@ import { fileToSend, type FileToSend } from './file-to-send';
 import { canUnpack, isArchive, openArchive } from './open-archive';
 import { propose } from './propose';
 import { Run } from './run';
-import { sendSeries } from './send-series';
+import { sendSeries, type Line } from './send-series';
 
 export interface IntakeProgress {
   /** Files that have arrived or were refused, of all. */
@@ -44,12 +44,15 @@ export function useIntake(onTaken: (images: Image[]) => void, onCase: () => read
     if (files.length === 0) return;
     const arrived: string[] = [];
     setProgress({ settled: 0, count: files.length, state: 'sending' });
-    const finish = async (): Promise<void> => {
-      const chosenIds = await propose(arrived, onCase(), (imageId) => fetchSlices(client, imageId));
-      const images = await Promise.all(chosenIds.map((imageId) => fetchImage(client, imageId)));
-      if (images.length > 0) onTaken(images);
+    const line: Line = {
+      ...current.line,
+      send: async (lot, onProgress) => {
+        const result = await current.line.send(lot, onProgress);
+        for (const image of result.images) client.setQueryData(imageKey(image.id), image);
+        return result;
+      },
     };
-    await sendSeries(files, current.line, {
+    await sendSeries(files, line, {
       onProgress: (settled) =>
         setProgress((before) => ({ settled, count: files.length, state: before?.state === 'paused' ? 'paused' : 'sending' })),
       onLost: () => setState('waiting'),
@@ -58,7 +61,10 @@ export function useIntake(onTaken: (images: Image[]) => void, onCase: () => read
         setRefused((before) => [...before, ...result.refused]);
       },
     });
-    await finish();
+    const came = await Promise.all(arrived.map((imageId) => fetchImage(client, imageId)));
+    const proposed = await propose(came, onCase(), (imageId) => fetchSlices(client, imageId));
+    const images = await Promise.all(proposed.map((imageId) => fetchImage(client, imageId)));
+    if (images.length > 0) onTaken(images);
   };
 
   const take = async (chosen: readonly File[]): Promise<void> => {

@@ -17,7 +17,7 @@ export function RemovedTable({ deidentification }: { deidentification: Image['de
   ];
   return (
     <View style={{ paddingTop: space(3) }}>
-      <Text variant="label" level={3}>
+      <Text variant="label" level={2}>
         Taken out at the door
       </Text>
       {rows.map(([kind, count]) => (

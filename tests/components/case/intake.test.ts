@@ -148,18 +148,24 @@ const slices = (...imageIds: string[]): Slice[] =>
 
 describe('of what came in', () => {
   const series = slices('a', 'b', 'c', 'd', 'e', 'f', 'g');
-  const read = async (imageId: string) => (series.some((slice) => slice.imageId === imageId) ? series : slices(imageId));
+  const read = async () => series;
+  const came = (...ids: string[]) =>
+    ids.map((id) => ({ id, series: id === 'x' ? null : 'head', component: 'magnitude' as const, rows: 256, columns: 256 }));
 
   test('the middle slice of a whole series is proposed, whatever the order in which it came', async () => {
-    expect(await propose(['g', 'c', 'a', 'b', 'd', 'f', 'e'], [], read)).toEqual(['d']);
+    expect(await propose(came('g', 'c', 'a', 'b', 'd', 'f', 'e'), [], read)).toEqual(['d']);
+  });
+
+  test('so it is of a series that somebody else has sent before', async () => {
+    expect(await propose(came('g2', 'c2', 'a2', 'b2', 'd2', 'f2', 'e2'), [], read)).toEqual(['d']);
   });
 
   test('a few pictures are all meant', async () => {
-    expect(await propose(['f', 'x', 'a'], [], read)).toEqual(['f', 'a', 'x']);
+    expect(await propose(came('f', 'x', 'a'), [], read)).toEqual(['f', 'a', 'x']);
   });
 
   test('a series of which a slice is chosen already is left as it is', async () => {
-    expect(await propose(['a', 'c', 'd', 'e', 'f', 'g'], ['b'], read)).toEqual([]);
+    expect(await propose(came('a', 'c', 'd', 'e', 'f', 'g'), ['b'], read)).toEqual([]);
   });
 });
 
