@@ -30,7 +30,7 @@ const variables = z.object({
   UPLOAD_FILES: wholeNumber(1, 1000).default(64),
   UPLOAD_TOTAL_MIB: wholeNumber(1, 16_384).default(512),
   WORKER_THREADS: wholeNumber(1, 64).default(2),
-  /** Seconds that reading one file may take. */
+  /** The most seconds that reading one file may take; a small file gets less (workers/reading-thread.ts). */
   READ_SECONDS: wholeNumber(1, 600).default(15),
   /** Where scanners send to. Left out, nothing listens. 0 takes a free port; 104 is DICOM's own, 11112 the one without privileges. */
   DICOM_NODE_PORT: wholeNumber(0, 65_535).optional(),

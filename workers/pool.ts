@@ -27,6 +27,7 @@ import type {
   TrialResult,
 } from './job';
 import type { ReadDicomJob } from './read-dicom.worker';
+import { openReadingThread } from './reading-thread';
 
 export interface WorkerFiles {
   readonly simulate: string;
@@ -54,8 +55,8 @@ export interface WorkerPool {
   swatch(job: SwatchJob, gone?: AbortSignal): Promise<ThumbnailResult>;
   measure(job: MeasureJob, gone?: AbortSignal): Promise<MeasureResult>;
   pair(job: PairJob, gone?: AbortSignal): Promise<PairResult>;
-  /** Reads one file; `undefined` when it took longer than `limitMs`, whose thread is then stopped. */
-  readDicom(job: ReadDicomJob, limitMs: number): Promise<Read | undefined>;
+  /** Reads one file; `undefined` when it took longer than its size allows, or than `mostMs`, and was stopped. */
+  readDicom(job: ReadDicomJob, mostMs: number): Promise<Read | undefined>;
   /** Threads that are up. */
   threads(): number;
   close(): Promise<void>;
@@ -68,9 +69,9 @@ const longestQueue = 256;
 
 export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
   // The environment of the server holds its secrets; a worker needs none of it.
-  const shared = { execArgv: files.execArgv, env: {} };
-  const pool = new Piscina({ ...shared, filename: files.simulate, minThreads: threads, maxThreads: threads, maxQueue: longestQueue });
-  const reader = openReader(new Piscina({ ...shared, filename: files.readDicom, minThreads: 1, maxThreads: 1 }));
+  const { simulate: filename, execArgv } = files;
+  const pool = new Piscina({ filename, execArgv, env: {}, minThreads: threads, maxThreads: threads, maxQueue: longestQueue });
+  const reader = openReadingThread(files.readDicom, files.execArgv);
   const run = async <Result>(
     job: SimulateJob | TrialJob | ExportJob | PixelsJob | ThumbnailJob | SwatchJob | MeasureJob | PairJob,
     gone?: AbortSignal,
@@ -97,34 +98,6 @@ export function openWorkers(files: WorkerFiles, threads: number): WorkerPool {
     async close() {
       await Promise.all([pool.destroy(), reader.close()]);
     },
-  };
-}
-
-/** A thread of its own for files, so that a long upload holds up no slider. It gets one file at a time: the limit is for reading one,
- *  and not for waiting behind others. */
-function openReader(pool: Piscina) {
-  let last: Promise<unknown> = Promise.resolve();
-  const readNow = async (job: ReadDicomJob, limitMs: number): Promise<Read | undefined> => {
-    const signal = AbortSignal.timeout(limitMs);
-    try {
-      return (await pool.run(job, { signal })) as Read;
-    } catch (error) {
-      if (signal.aborted) return undefined;
-      throw error;
-    }
-  };
-  return {
-    read(job: ReadDicomJob, limitMs: number): Promise<Read | undefined> {
-      const reading = last.then(() => readNow(job, limitMs));
-      // What becomes of one file is told to its own caller; the next one only waits for its end.
-      last = reading.then(
-        () => undefined,
-        () => undefined,
-      );
-      return reading;
-    },
-    threads: () => pool.threads.length,
-    close: () => pool.destroy(),
   };
 }
 
