@@ -35,8 +35,7 @@ async function takeOne(deps: TakeDependencies, origin: Origin, name: string, byt
   const { workers, env, identityKey } = deps;
   const key = departmentKey(identityKey, origin.departmentId);
   const read = await workers.readDicom({ bytes, key, packed }, env.readMilliseconds);
-  if (read === undefined)
-    return refusedAs(name, refuse('too-slow', `Reading the file took longer than ${env.readMilliseconds / 1000} s and was stopped.`));
+  if (read === undefined) return refusedAs(name, refuse('too-slow', 'Reading the file took too long for its size and was stopped.'));
   if ('refused' in read) return refusedAs(name, read);
   const { fileKey } = read;
   const images = await storeImages(
