@@ -7,7 +7,8 @@ import { readDicom, type Read } from '../server/dicom/read';
 import { isRefused } from '../server/dicom/refusal';
 import { unpack, type Packed } from '../server/dicom/unpack';
 import { openHdf5, type Hdf5 } from '../server/mrd/hdf5';
-import { isHdf5, readMrd } from '../server/mrd/read';
+import { readMrd } from '../server/mrd/read';
+import { isHdf5 } from '../server/mrd/signature';
 
 export interface ReadDicomJob {
   readonly bytes: Uint8Array;
@@ -39,7 +40,11 @@ async function readImages(bytes: Uint8Array, key: Uint8Array): Promise<Read> {
   return readDicom(bytes, key, await decoders);
 }
 
+/** An instance that a file has worn out is replaced between files. */
 async function readRawData(bytes: Uint8Array, key: Uint8Array): Promise<Read> {
-  if (hdf5 === undefined || (await hdf5).worn()) hdf5 = openHdf5();
-  return readMrd(bytes, key, await hdf5);
+  hdf5 ??= openHdf5();
+  const opened = await hdf5;
+  const read = readMrd(bytes, key, opened);
+  if (opened.worn()) hdf5 = openHdf5();
+  return read;
 }

@@ -5,6 +5,7 @@
 import { Piscina } from 'piscina';
 import type { Read } from '../server/dicom/read';
 import { refuse } from '../server/dicom/refusal';
+import { hdf5Signature, isHdf5 } from '../server/mrd/signature';
 import type { ReadDicomJob } from './read-dicom.worker';
 
 export interface ReadingThread {
@@ -19,6 +20,7 @@ const leastMs = 1800;
 /** Compressed or not, a megabyte took 0.1 s at most; the rest is for a machine that has other work. */
 const perMebibyteMs = 500;
 const mebibyte = 1 << 20;
+const nothing = new Uint8Array(0);
 
 /** Of objects of the language, which a header becomes. Pixels lie outside and have limits of their own (server/dicom). */
 const heapMebibytes = 192;
@@ -36,24 +38,26 @@ export function openReadingThread(filename: string, execArgv: string[]): Reading
   });
   // A thread that ends without a job has harmed nobody; the pool starts another.
   pool.on('error', () => undefined);
-  let ready: Promise<unknown> | undefined;
+  const ready = new Map<Uint8Array, Promise<unknown>>();
   let last: Promise<unknown> = Promise.resolve();
 
-  /** Once an empty file has been refused, a thread is up: no file pays for the start of its thread. */
-  const whenReady = (key: Uint8Array): Promise<unknown> => {
-    ready ??= pool.run({ bytes: new Uint8Array(0), key } satisfies ReadDicomJob).catch((error: unknown) => {
-      ready = undefined;
+  /** Once the beginning of a file has been refused, a thread is up and has opened what reads its kind: no file pays for that with its time. */
+  const whenReady = (beginning: Uint8Array, key: Uint8Array): Promise<unknown> => {
+    const opened = ready.get(beginning) ?? pool.run({ bytes: beginning, key } satisfies ReadDicomJob);
+    ready.set(beginning, opened);
+    return opened.catch((error: unknown) => {
+      ready.clear();
       throw error;
     });
-    return ready;
   };
   const readNow = async (job: ReadDicomJob, mostMs: number): Promise<Read | undefined> => {
-    await whenReady(job.key);
+    await whenReady(nothing, job.key);
+    if (isHdf5(job.bytes)) await whenReady(hdf5Signature, job.key);
     const signal = AbortSignal.timeout(Math.min(mostMs, timeOf(job)));
     try {
       return (await pool.run(job, { signal })) as Read;
     } catch (error) {
-      ready = undefined;
+      ready.clear();
       if (signal.aborted) return undefined;
       if (isOutOfMemory(error)) return outOfMemory;
       throw error;

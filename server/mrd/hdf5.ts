@@ -8,6 +8,7 @@ import { existsSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
+import { MrdFault } from './fault';
 
 /** A type in memory, as h5wasm describes it. */
 export interface Hdf5Type {
@@ -95,9 +96,10 @@ export async function openHdf5(): Promise<Hdf5> {
         library.FS.writeFile(path, bytes);
         const id = library.open(path, library.H5F_ACC_RDONLY, false, -1, -1);
         if (id < 0n) throw new Error('the library does not open the file');
-        const result = look(fileOf(library, id));
+        const result = outcomeOf(() => look(fileOf(library, id)));
         library.close_file(id);
         brokeDown = false;
+        if (result instanceof MrdFault) throw result;
         return result;
       } finally {
         release();
@@ -105,6 +107,16 @@ export async function openHdf5(): Promise<Hdf5> {
       }
     },
   };
+}
+
+/** A file that is refused has done no harm to the library, other than one over which the library itself throws. */
+function outcomeOf<Result>(look: () => Result): Result | MrdFault {
+  try {
+    return look();
+  } catch (error) {
+    if (error instanceof MrdFault) return error;
+    throw error;
+  }
 }
 
 function fileOf(library: H5wasm, id: bigint): Hdf5File {

@@ -19,20 +19,22 @@ import { readHeader, type MrdHeader } from './header';
 import { counters, framesPerPlane, kspaceOf, type Kspace, type KspaceFrame } from './kspace';
 import { warningsOf } from './warnings';
 
-const signature = [0x89, 0x48, 0x44, 0x46, 0x0d, 0x0a, 0x1a, 0x0a];
-/** Whether bytes begin as HDF5 (HDF5 File Format Specification, superblock). */
-export const isHdf5 = (bytes: Uint8Array): boolean => signature.every((byte, i) => bytes[i] === byte);
+/** No superblock is shorter: less is not worth the library's breakdown over it. */
+const shortest = 48;
 
 /** Reads one file; `key` is the department's. Its name is no input. */
 export function readMrd(bytes: Uint8Array, key: Uint8Array, hdf5: Hdf5): Read {
+  if (bytes.length < shortest) return cutFile.refusal;
   try {
     const { header, kspace } = hdf5.read(bytes, collect);
     return { accepted: [imageOf(header, kspace)], fileKey: fileKeyOf(key, createHash('sha256').update(bytes).digest('hex')) };
   } catch (error) {
     // What the library throws over a damaged file is of many kinds, and says nothing to a technologist.
-    return error instanceof MrdFault ? error.refusal : broken('it cannot be read to its end').refusal;
+    return error instanceof MrdFault ? error.refusal : cutFile.refusal;
   }
 }
+
+const cutFile = broken('it cannot be read to its end');
 
 function collect(file: Hdf5File): { header: MrdHeader; kspace: Kspace } {
   const group = groupOf(file);
