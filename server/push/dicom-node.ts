@@ -24,7 +24,8 @@ type NodeDependencies = PushDependencies & { readonly log: Logger };
 /** Objects on their way or being read at once: with the limit of one object, what the node may take of memory. */
 const objects = 4;
 const connections = 32;
-const patienceMs = 30_000;
+/** Between two images of an association a scanner may have to make the next one first. */
+const patienceMs = 120_000;
 /** A thread that answers nothing for so long hangs; the machine may be busy for a while. */
 const lifeSignMs = 30_000;
 const pauseBeforeRestartMs = 1000;

@@ -11,6 +11,8 @@ import type { MessageOrder } from './message-order';
 /** Answers are a few hundred bytes: a sender that lets so many pile up does not read them. */
 const longestUnread = 64 * 1024;
 const serviceProvider = 2;
+/** Whoever connects has something to say. */
+const strangersPatienceMs = 10_000;
 
 export class GatedSocket extends EventEmitter {
   private readonly frames = new PduFrames();
@@ -119,9 +121,12 @@ export class GatedSocket extends EventEmitter {
   /** Starts the clock for the next whole unit. */
   private wait(): void {
     clearTimeout(this.timer);
-    this.timer = setTimeout(() => {
-      if (this.ending || this.order === undefined) this.destroy();
-      else this.abort('unexpected');
-    }, this.patienceMs);
+    this.timer = setTimeout(
+      () => {
+        if (this.ending || this.order === undefined) this.destroy();
+        else this.abort('unexpected');
+      },
+      this.order === undefined ? strangersPatienceMs : this.patienceMs,
+    );
   }
 }

