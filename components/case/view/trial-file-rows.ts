@@ -7,7 +7,7 @@ export const trialFileRows: readonly { readonly id: TrialFile; readonly label: s
   { id: 'image16.png', label: 'image, PNG 16 bits', aside: 'marked' },
   { id: 'kspace.png', label: 'k-space, PNG 8 bits', aside: 'marked' },
   { id: 'kspace16.png', label: 'k-space, PNG 16 bits', aside: 'marked' },
-  { id: 'image.npy', label: 'image, NumPy array', aside: 'float32' },
-  { id: 'kspace.npy', label: 'k-space, NumPy array', aside: 'complex64' },
+  { id: 'image.npy', label: 'image, .npy array', aside: 'float32' },
+  { id: 'kspace.npy', label: 'k-space, .npy array', aside: 'complex64' },
   { id: 'recipe.json', label: 'recipe, JSON', aside: 'opens again' },
 ];
