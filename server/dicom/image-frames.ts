@@ -44,8 +44,8 @@ export function frameCount(header: Header): number | Refused {
   return refuse('size', 'The header does not say how many frames there are.');
 }
 
-/** Values that one file may unfold to: 128 frames of 512², 128 MB. */
-const mostValues = 1 << 25;
+/** Values that one file may unfold to: 64 frames of 512², or one of 4096². Reading them takes a quarter of a gigabyte at most, and about a second. */
+const mostValues = 1 << 24;
 
 export function refuseTooMany(frames: number, pixels: number): Refused | undefined {
   if (frames * pixels <= mostValues) return undefined;

@@ -37,7 +37,7 @@ export function runLengthBomb(_material: Material, chance: Chance): Uint8Array {
   const [side, frames] = chance.oneOf([
     [256, 1],
     [512, 1],
-    [512, 16],
+    [512, 64],
     [1024, 4],
     [512, 128],
     [4096, 1],

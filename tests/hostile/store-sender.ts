@@ -9,8 +9,8 @@ import { joined } from '../../server/dicom/elements';
 const mrImageStorage = '1.2.840.10008.5.1.4.1.1.4';
 const applicationContext = '1.2.840.10008.3.1.1.1';
 const longestUnit = 64 * 1024;
-/** What a C-STORE is answered with, or that the association was ended in its place. */
-export type StoreAnswer = number | 'aborted';
+/** The status of a C-STORE; or that its transfer syntax was not agreed (PS3.8 table 9-18), or the association ended in its place. */
+export type StoreAnswer = number | 'not-agreed' | 'aborted';
 
 const ascii = (text: string): Uint8Array => new TextEncoder().encode(text);
 function big(bytes: 2 | 4, value: number): Uint8Array {
@@ -68,13 +68,23 @@ export async function store({ port, calling, called }: Node, transferSyntax: str
   try {
     await once(socket, 'connect');
     socket.write(associateRequest(calling, called, transferSyntax));
-    if ((await units.next()).value?.[0] !== 2) return 'aborted';
+    const accepted = (await units.next()).value;
+    if (accepted?.[0] !== 2) return 'aborted';
+    if (!isAgreed(accepted)) return 'not-agreed';
     for (const fragment of [...fragments(storeRequest(), 1), ...fragments(dataSet, 0)]) socket.write(fragment);
     const answer = (await units.next()).value;
     return answer?.[0] === 4 ? statusIn(answer) : 'aborted';
   } finally {
     socket.destroy();
   }
+}
+
+/** The result of the only presentation context: items follow 74 bytes, and an item of type 21 has its result in byte 6. */
+function isAgreed(accepted: Buffer): boolean {
+  for (let at = 74; at + 8 <= accepted.length; at += 4 + accepted.readUInt16BE(at + 2)) {
+    if (accepted[at] === 0x21) return accepted[at + 6] === 0;
+  }
+  return false;
 }
 
 /** Element (0000,0900) of the command set. */
