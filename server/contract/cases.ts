@@ -101,7 +101,8 @@ export const createCase = route({
     .extend({
       images: z
         .array(z.object({ imageId: identifier, role: z.enum(imageRoles) }))
-        .max(64)
+        // A series from a scanner's inbox becomes a case in one step.
+        .max(1000)
         .default([]),
       confirmedText,
     }),

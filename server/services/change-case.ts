@@ -22,14 +22,18 @@ export async function fileCase(db: Database, caller: Caller, { images, ...fields
     await addCaseImages(tx, filed.id, uniqueByImage(images));
     await addEvents(tx, [
       { caseId: filed.id, actorId: caller.memberId, kind: 'filed', to: 'reported', text: `Filed as case ${filed.number}` },
-      ...images.map(({ role }) => ({
-        caseId: filed.id,
-        actorId: caller.memberId,
-        kind: 'image-added' as const,
-        text: `Image added: ${role}`,
-      })),
+      ...added(images).map((text) => ({ caseId: filed.id, actorId: caller.memberId, kind: 'image-added' as const, text })),
     ]);
     return readCase(tx, caller, filed.id);
+  });
+}
+
+/** A line for each role: a series of 200 images is one event. */
+function added(images: readonly { role: string }[]): string[] {
+  const roles = [...new Set(images.map(({ role }) => role))];
+  return roles.map((role) => {
+    const count = images.filter((image) => image.role === role).length;
+    return count === 1 ? `Image added: ${role}` : `${count} images added: ${role}`;
   });
 }
 

@@ -52,6 +52,17 @@ it('an image leaves the inbox when a case takes it, and cannot be discarded from
   await technologist.get(`/api/images/${taken}`).expect(200);
 });
 
+it('a series of 100 images becomes one case with one line in its timeline', async () => {
+  const ids = await sendDiscs(...Array.from({ length: 100 }, (_, i) => i + 1));
+  const technologist = await application.as('technologist');
+  const images = ids.map((imageId) => ({ imageId, role: 'bad' }));
+  const filed = await technologist.post('/api/cases').send({ title: 'Sent', scannerId: application.own.scannerId, images }).expect(201);
+  expect(filed.body.images).toHaveLength(100);
+  const timeline = await technologist.get(`/api/cases/${filed.body.id}/timeline`).expect(200);
+  expect(JSON.stringify(timeline.body)).toContain('100 images added: bad');
+  expect((await pageOf(application)).inbox.total).toBe(0);
+});
+
 it('an upload of a member is no image of an inbox and is not discarded through it', async () => {
   const image = await uploadOne(application, discFile({ rows: 50 }));
   expect(await discard([image.id])).toBe(0);
