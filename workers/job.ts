@@ -96,11 +96,11 @@ export interface ExportResult {
   readonly digest: string;
 }
 
-/** The stored values of an image, or their transform. */
+/** The stored values of an image, their transform, or that of their magnitude, which a complex image is held against a simulation by. */
 export interface PixelsJob {
   readonly kind: 'pixels';
   readonly source: ImageSource;
-  readonly domain: Domain;
+  readonly domain: Domain | 'kspaceOfImage';
   readonly form: PlaneForm;
 }
 

@@ -1,7 +1,7 @@
 /** Runs transforms, recipes and small pictures on a worker thread. Parses the message, calls recon, hands the bytes back. */
 import { performance } from 'node:perf_hooks';
 import { complexOf, magnitudeOf } from '../recon/complex-image';
-import { transform } from '../recon/fourier';
+import { transform, transformOfReal } from '../recon/fourier';
 import { prepare, simulate, type PreparedObject, type Simulation } from '../recon/simulate';
 import type { Recipe } from '../recon/recipe';
 import { rangeOf } from '../server/dicom/value-range';
@@ -92,7 +92,7 @@ function runExport({ source, recipe, acquisition, form, about }: ExportJob): Exp
 }
 
 function readPixels({ source, domain, form }: PixelsJob): Planes {
-  const planes = encodePlanes([domain === 'image' ? storedPlane(source) : kspacePlane(source)], form);
+  const planes = encodePlanes([pixelPlanes[domain](source)], form);
   return handBack(planes, [planes.bytes.buffer]);
 }
 
@@ -105,6 +105,13 @@ const kspacePlane = (source: ImageSource): NamedPlane => ({
   domain: 'kspace',
   plane: preparedObject(source, undefined).kspace(),
 });
+
+const kspaceOfImagePlane = (source: ImageSource): NamedPlane => ({
+  name: 'kspace',
+  domain: 'kspace',
+  plane: transformOfReal(pictureOf(source)),
+});
+const pixelPlanes = { image: storedPlane, kspace: kspacePlane, kspaceOfImage: kspaceOfImagePlane } as const;
 
 function pair({ parts, first, second }: PairJob): PairResult {
   const values = complexOf(parts, new Float32Array(first), new Float32Array(second));

@@ -39,8 +39,8 @@ async function fetchPlanes(route: Route, input: Parameters<typeof send>[1], sign
   }
 }
 
-/** An image as it is stored, or its k-space: log magnitude and phase of the transform of what is stored. */
-export const usePixels = (imageId: string | null, domain: 'image' | 'kspace', frame = 0) =>
+/** An image as it is stored, or its k-space: log magnitude and phase of the transform of what is stored, or of its magnitude. */
+export const usePixels = (imageId: string | null, domain: 'image' | 'kspace' | 'kspaceOfImage', frame = 0) =>
   useQuery({
     queryKey: ['pixels', imageId, domain, frame],
     queryFn: ({ signal }) => fetchPlanes(readPixels, { params: { imageId }, query: { domain, frame } }, signal),

@@ -4,10 +4,11 @@ import { View } from 'react-native';
 import { LinkText } from '@/components/ui/link-text';
 import { anchorOf, Menu, type Anchor } from '@/components/ui/menu';
 import { useBench } from './bench-context';
+import { hasOwnPhase } from './own-phase';
 import { initialValues, usualObjectPhase } from './recipe-order';
 
 export function AddStep() {
-  const { causes, history, dispatch, change, phaseEncode } = useBench();
+  const { causes, source, history, dispatch, change, phaseEncode } = useBench();
   const trigger = useRef<View>(null);
   const [anchor, setAnchor] = useState<Anchor | null>(null);
   const add = (id: string): void => {
@@ -18,7 +19,7 @@ export function AddStep() {
     dispatch({
       kind: 'add',
       step: { cause: id, parameters: initialValues(cause.parameters) },
-      objectPhase: cause.needsObjectPhase ? { range: usualObjectPhase, seed } : undefined,
+      objectPhase: cause.needsObjectPhase && !hasOwnPhase(source) ? { range: usualObjectPhase, seed } : undefined,
     });
     change({ knot: steps.length, tab: 'recipe' });
   };

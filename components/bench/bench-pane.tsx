@@ -49,9 +49,9 @@ function useWindowDrag(domain: Domain, isDifference: boolean) {
 }
 
 export function BenchPane({ domain, width, height, side = 'bad', headHeight, withoutHead = false, readout }: BenchPaneProps) {
-  const { view, change, frame, phaseEncode, shown, blinksToBad } = useBench();
+  const { view, change, bad, frame, phaseEncode, shown, blinksToBad } = useBench();
   // Without a phase-encode axis nothing is simulated: the bad picture stands alone.
-  const content = phaseEncode === null ? 'bad' : contentOf(domain, view, side, blinksToBad);
+  const content = phaseEncode === null ? 'bad' : contentOf(domain, view, side, blinksToBad, bad);
   const grid = useMemo(() => (domain === 'image' ? frame : kspaceGrid(frame)), [domain, frame]);
   const layers = useMemo(() => layersOf(content, view.divider, shown[domain]), [content, view.divider, shown, domain]);
   const marking = useMarking(domain);

@@ -8,7 +8,8 @@ import { windowOfRange, type Window } from '@/components/image/window-level';
 
 export type Compare = 'side-by-side' | 'divider' | 'blink' | 'difference';
 export type KspaceLook = 'log' | 'phase';
-/** `image`: the transform of the magnitude that is shown. `acquired`: samples before reconstruction; only a simulation has them. */
+/** `image`: the transform of the magnitude that is shown. `acquired`: samples before reconstruction, phase
+ *  included; a simulation has them, and a complex image, but no magnitude. */
 export type KspaceOf = 'image' | 'acquired';
 /** The object, a step by its index in the recipe, or the reconstruction. */
 export type Knot = 'object' | 'reconstruction' | number;

@@ -11,6 +11,7 @@ import { ProblemNotice } from '@/components/ui/problem-notice';
 import { Screen } from '@/components/ui/screen';
 import { imagesOf } from './bench-images';
 import { BenchTable } from './bench-table';
+import { hasOwnPhase } from './own-phase';
 import { startRecipe } from './recipe-start';
 
 interface BenchProps {
@@ -67,7 +68,7 @@ export function Bench({ caseId, trialId, add }: BenchProps) {
         causes={causes.data}
         methods={methods.data}
         frames={{ badFrame: trial?.compareWith?.frame ?? 0, sourceFrame: trial?.frame ?? 0 }}
-        recipe={trial?.recipe ?? startRecipe(methods.data, causes.data, add)}
+        recipe={trial?.recipe ?? startRecipe(methods.data, causes.data, add, hasOwnPhase(source.data))}
       />
     </Screen>
   );

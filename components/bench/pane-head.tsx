@@ -18,8 +18,8 @@ interface PaneHeadProps {
 }
 
 export function PaneHead({ domain, content, compact = false }: PaneHeadProps) {
-  const { view, kase } = useBench();
-  const caution = cautionOf(domain, content, view);
+  const { view, kase, bad } = useBench();
+  const caution = cautionOf(domain, content, view, bad);
   const span = domain === 'image' ? view.differenceSpan : view.logDifferenceSpan;
   const nBad = kase.images.filter(({ role }) => role === 'bad').length;
   return (

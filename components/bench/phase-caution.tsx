@@ -6,16 +6,24 @@ import { fixed } from '@/components/ui/number-text';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme-context';
 import { useBench } from './bench-context';
+import { hasOwnPhase } from './own-phase';
 import { usualObjectPhase } from './recipe-order';
 
 export function PhaseCaution() {
   const { colours } = useTheme();
-  const { history, dispatch, change } = useBench();
+  const { source, history, dispatch, change } = useBench();
   const range = history.present.objectPhase?.range;
   const set = (): void => {
     dispatch({ kind: 'set-object-phase', range: usualObjectPhase });
     dispatch({ kind: 'let-go' });
   };
+  if (hasOwnPhase(source)) {
+    return (
+      <Text variant="small" tone="inkSoft">
+        The image is complex: the phase of the object is the one that was measured.
+      </Text>
+    );
+  }
   return (
     <View style={{ flexDirection: 'row', alignItems: 'center', gap: 8, minHeight: 28 }}>
       {range === undefined ? <Glyph name="danger" colour={colours.weld} size={14} /> : null}

@@ -34,9 +34,9 @@ const around = 44 + headHeight + paneMargins.below + tabsHeight;
 
 function SmallPane({ domain, width }: { domain: Domain; width: number }) {
   const { colours } = useTheme();
-  const { frame, view, blinksToBad, phaseEncode } = useBench();
+  const { bad, frame, view, blinksToBad, phaseEncode } = useBench();
   const size = pictureSize({ width, height: width }, proportionOf(frame));
-  const content = phaseEncode === null ? 'bad' : contentOf(domain, view, 'simulated', blinksToBad);
+  const content = phaseEncode === null ? 'bad' : contentOf(domain, view, 'simulated', blinksToBad, bad);
   return (
     <View style={{ flexDirection: 'row', backgroundColor: colours.mat, paddingTop: 4 }}>
       <BenchPane domain={domain} side="simulated" {...size} withoutHead />

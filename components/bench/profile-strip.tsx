@@ -11,14 +11,16 @@ import { Text } from '@/components/ui/text';
 import { fonts } from '@/components/ui/theme';
 import { useTheme } from '@/components/ui/theme-context';
 import { useBench } from './bench-context';
+import { hasOwnPhase } from './own-phase';
 
 const height = 36;
 
 function useProfiles(domain: Domain) {
-  const { badPlanes, simulation, view, frame, phaseEncode } = useBench();
+  const { bad: badImage, badPlanes, simulation, view, frame, phaseEncode } = useBench();
+  const kspaceName = view.kspaceOf === 'acquired' && hasOwnPhase(badImage) ? 'kspace.log' : 'kspaceOfImage.log';
   const axis = phaseEncode === 'row' ? 'columns' : 'rows';
   const bad = domain === 'image' ? badPlanes.image?.get('image') : badPlanes.kspace?.get('kspace.log');
-  const simulated = simulation.shown?.planes.get(domain === 'image' ? 'image' : 'kspaceOfImage.log');
+  const simulated = simulation.shown?.planes.get(domain === 'image' ? 'image' : kspaceName);
   const gain = domain === 'image' ? (simulation.shown?.metrics?.gain ?? 1) : 1;
   const { cursor } = view;
   return useMemo(() => {

@@ -59,7 +59,7 @@ function kspacePlace(cursor: Cursor, frame: PlaneGrid, phaseEncode: PhaseEncode 
   ];
 }
 
-/** `name`: which k-space of the simulation is on the table. */
+/** `name`: which k-space is on the table. Of the bad image it is given only where there is such a one: not of a magnitude as acquired. */
 export function kspaceReadout(
   cursor: Cursor,
   frame: PlaneGrid,
@@ -70,14 +70,13 @@ export function kspaceReadout(
   const { x, y } = positionMm(cursor, kspaceGrid(frame));
   const at = (planes: ReadonlyMap<string, DisplayPlane> | undefined, key: string): number | null => read(planes?.get(key), y, x);
   const isTaken = (log: number | null): boolean => log !== null && log > -8;
-  const ofBad = name === 'kspace' ? null : at(bad, 'kspace.log');
-  const log = at(simulation?.planes, `${name}.log`);
-  const phase = ofBad === null ? (isTaken(log) ? at(simulation?.planes, `${name}.phase`) : null) : at(bad, 'kspace.phase');
+  const log = bad ? at(bad, 'kspace.log') : at(simulation?.planes, `${name}.log`);
+  const phase = isTaken(log) ? (bad ? at(bad, 'kspace.phase') : at(simulation?.planes, `${name}.phase`)) : null;
   return [
     ...kspacePlace(cursor, frame, phaseEncode),
     item(
       'log K',
-      words(ofBad ?? (isTaken(log) ? log : null), (value) => fixed(value, 2)),
+      words(isTaken(log) ? log : null, (value) => fixed(value, 2)),
     ),
     item('phase', words(phase, degrees), '°'),
   ];

@@ -10,6 +10,7 @@ import type { Recipe } from '@/server/contract/recipe';
 import type { SimulationRequest } from '@/server/contract/simulations';
 import type { BenchState, CaseOnBench } from './bench-context';
 import { startView, type BenchView, type ChosenFrames } from './bench-view';
+import { hasOwnPhase } from './own-phase';
 import { placeIssues } from './issue-places';
 import { firstKnot } from './knots';
 import { recipeHistory, startHistory } from './recipe-history';
@@ -59,10 +60,13 @@ function useCase({ kase, bad, source, causes, methods }: OnTheBench): CaseOnBenc
   );
 }
 
+/** Of a complex image the k-space as acquired is what there is to see first. */
+const startOn = (bad: Image, view: BenchView): BenchView => (hasOwnPhase(bad) ? { ...view, kspaceOf: 'acquired' } : view);
+
 export function useBenchState(given: OnTheBench): { onBench: CaseOnBench; state: BenchState } {
   const onBench = useCase(given);
   const { bad, frame } = onBench;
-  const [view, setView] = useState(() => startView(frame, bad.range, firstKnot(given.recipe), given.frames));
+  const [view, setView] = useState(() => startOn(bad, startView(frame, bad.range, firstKnot(given.recipe), given.frames)));
   const change = useCallback((part: Partial<BenchView>) => setView((before) => ({ ...before, ...part })), []);
   const [history, dispatch] = useReducer(recipeHistory, given.recipe, startHistory);
   const { kspaceOf, badFrame, sourceFrame } = view;
@@ -72,7 +76,9 @@ export function useBenchState(given: OnTheBench): { onBench: CaseOnBench; state:
   );
   const simulation = useSimulation(request);
   const badImage = usePixels(bad.id, 'image', badFrame).data?.planes;
-  const badKspace = usePixels(bad.id, 'kspace', badFrame).data?.planes;
+  // A magnitude is its own image: the two are one and the same then.
+  const badKspaceOf = hasOwnPhase(bad) && kspaceOf === 'image' ? 'kspaceOfImage' : 'kspace';
+  const badKspace = usePixels(bad.id, badKspaceOf, badFrame).data?.planes;
   const shown = useShown({ badImage, badKspace, simulation: simulation.shown }, view);
   const issues = useMemo(() => placeIssues(simulation.error instanceof ApiProblem ? simulation.error.issues : []), [simulation.error]);
   const blink = useBlink(view.compare === 'blink');

@@ -145,10 +145,13 @@ export const correctFacts = route({
 export const readPixels = route({
   method: 'get',
   path: '/api/images/:imageId/pixels',
-  summary: 'Stored values (domain=image, float32) or their transform (domain=kspace, complex64) as planes',
+  summary: 'Stored values (domain=image), their transform (kspace), or that of their magnitude (kspaceOfImage) as planes',
   access: everyMember,
   params: imageParams,
-  query: z.object({ frame: z.coerce.number().int().min(0).default(0), domain: z.enum(['image', 'kspace']).default('image') }),
+  query: z.object({
+    frame: z.coerce.number().int().min(0).default(0),
+    domain: z.enum(['image', 'kspace', 'kspaceOfImage']).default('image'),
+  }),
   answers: 'binary',
 });
 

@@ -6,6 +6,7 @@ import { setMemberFacts } from '../../db/queries/images';
 import type { Database } from '../../db/client';
 import { implications } from '../../recon/implications';
 import { fromMillimetres } from '../../recon/units';
+import type { PixelsJob } from '../../workers/job';
 import type { CorrectableFacts } from '../contract/facts';
 import type { Image, implicationSchema } from '../contract/images';
 import type { Dependencies } from '../dependencies';
@@ -13,7 +14,7 @@ import { acquisitionOf } from '../dicom/acquisition';
 import { AppError } from '../errors';
 import type { Binary } from '../serve';
 import { describeImage, currentFacts, requireImage, sourceOf } from './image-source';
-import { planesAnswer, type PlaneForm } from './planes-answer';
+import { planesAnswer } from './planes-answer';
 import type { Caller } from './sessions';
 
 export async function readImage(db: Database, caller: Caller, imageId: string): Promise<Image> {
@@ -47,7 +48,7 @@ interface Asked {
 export async function readPixels(
   deps: Dependencies,
   caller: Caller,
-  { imageId, frame, domain, form }: Asked & { frame: number; form: PlaneForm },
+  { imageId, frame, domain, form }: Pick<PixelsJob, 'domain' | 'form'> & { imageId: string; frame: number },
   gone: AbortSignal,
 ): Promise<Binary> {
   const row = await requireImage(deps.db, caller, imageId);

@@ -60,6 +60,9 @@ export async function prepareRun(deps: Pick<Dependencies, 'db' | 'values'>, call
   const row = await requireNamedImage(deps.db, caller, wish.imageId, ['imageId']);
   requireAnalysable(row, ['imageId']);
   const acquisition = wish.keptAcquisition ?? acquisitionForRun(row, wish.frame, wish.facts?.phaseEncode);
+  if (row.component === 'complex' && wish.recipe.objectPhase !== undefined) {
+    throw invalidAt(['recipe', 'objectPhase'], 'the image is complex: it has a phase of its own, and takes no synthetic one');
+  }
   const recipe = checkedRecipe(wish.recipe, acquisition);
   const source = await sourceOf(deps, row, wish.frame);
   if (!wish.compareWith) return { row, source, acquisition, recipe };

@@ -173,3 +173,17 @@ describe('two images that do not belong together', () => {
       .expect(404);
   });
 });
+
+test('the k-space of the magnitude of a complex image is Hermitian: the one to hold a simulated image against', async () => {
+  const image = await made({ magnitudeId: (await magnitude()).id, phaseId: (await phase()).id });
+  const [ofImage] = await pixels(image, 'domain=kspaceOfImage');
+  expect(hermitianDefect(complexOf(ofImage))).toBeLessThan(1e-6);
+});
+
+test('a complex image takes no synthetic phase: its own was measured', async () => {
+  const image = await made({ magnitudeId: (await magnitude()).id, phaseId: (await phase()).id });
+  const body = { imageId: image.id, outputs: ['image'], recipe: { ...motionRecipe(), objectPhase: { range: 1.6, seed: 1 } } };
+  const answer = await (await application.as('physicist')).post('/api/simulations').send(body);
+  expect(answer.status).toBe(400);
+  expect(answer.body.issues).toMatchObject([{ path: ['recipe', 'objectPhase'] }]);
+});

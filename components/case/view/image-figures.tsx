@@ -9,7 +9,9 @@ import { LinkText } from '@/components/ui/link-text';
 import { ProblemNotice } from '@/components/ui/problem-notice';
 import { space } from '@/components/ui/theme';
 import type { Case } from '@/server/contract/cases';
+import type { Image } from '@/server/contract/images';
 import type { Slice } from '@/server/contract/series';
+import { kspaceOrigin } from '@/components/bench/own-phase';
 import { imageRoleWords } from '../words';
 import { EmptyFrame } from './empty-frame';
 import { Figure } from './figure';
@@ -20,6 +22,12 @@ interface ImageFiguresProps {
   withKspace: boolean;
   /** Opens the series around the image. */
   onOpenSeries?: (() => void) | undefined;
+}
+
+/** Short, below a small picture: what its k-space is. */
+function kspaceNote(image: Image, frame: number): string {
+  if (image.kspace === 'raw') return kspaceOrigin(image, frame);
+  return image.component === 'magnitude' ? 'not raw data' : image.component;
 }
 
 const kspaceRole = { word: 'its k-space', glyph: 'image', tone: 'matInk' } as const;
@@ -49,7 +57,7 @@ export function ImageFigures({ image: { imageId, role }, size, withKspace, onOpe
           alt={`k-space of the ${words.word}`}
           role={kspaceRole}
           edge="phase-encode line"
-          note={image.component === 'magnitude' ? 'not raw data' : image.component}
+          note={kspaceNote(image, frame)}
         />
       ) : null}
     </View>

@@ -60,7 +60,7 @@ describe('the readout', () => {
   });
 
   it('says nothing of a sample that was never taken', () => {
-    const items = kspaceReadout({ row: 1, column: 3 }, frame, 'column', { bad, simulation: untaken }, 'kspace');
+    const items = kspaceReadout({ row: 1, column: 3 }, frame, 'column', { bad: undefined, simulation: untaken }, 'kspace');
     expect(items.slice(4).map(({ value }) => value)).toEqual(['–', '–']);
   });
 });
