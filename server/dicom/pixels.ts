@@ -70,17 +70,31 @@ export function layoutOf(header: Header): Layout | Refused {
   return { rows, columns, bytesPerPixel: bitsAllocated === 8 ? 1 : 2, bitsStored, shift: highBit + 1 - bitsStored, signed };
 }
 
-/** Stored values as the integers they stand for. Bits outside BitsStored, where old files kept overlays, are masked away. */
-function storedValues(frame: Uint8Array, { rows, columns, bytesPerPixel, bitsStored, shift, signed }: Layout): Int32Array {
+/** Pixels that are taken at once: a frame of 4096² would need 64 MB for its integers alone. */
+const stripPixels = 1 << 16;
+
+/** Stored values as the integers they stand for, strip by strip; each strip is written over by the next. Bits outside BitsStored, where old files
+ *  kept overlays, are masked away. */
+function* strips(frame: Uint8Array, { rows, columns, bytesPerPixel, bitsStored, shift, signed }: Layout): Generator<Strip> {
   const view = new DataView(frame.buffer, frame.byteOffset, frame.byteLength);
-  const stored = new Int32Array(rows * columns);
+  const nPixels = rows * columns;
+  const whole = new Int32Array(Math.min(stripPixels, nPixels));
   const unused = 32 - bitsStored;
-  for (let i = 0; i < stored.length; i++) {
-    const word = bytesPerPixel === 1 ? view.getUint8(i) : view.getUint16(2 * i, true);
-    const top = (word >>> shift) << unused;
-    stored[i] = signed ? top >> unused : top >>> unused;
+  for (let start = 0; start < nPixels; start += stripPixels) {
+    const stored = whole.subarray(0, Math.min(stripPixels, nPixels - start));
+    for (let i = 0; i < stored.length; i++) {
+      const word = bytesPerPixel === 1 ? view.getUint8(start + i) : view.getUint16(2 * (start + i), true);
+      const top = (word >>> shift) << unused;
+      stored[i] = signed ? top >> unused : top >>> unused;
+    }
+    yield { start, stored };
   }
-  return stored;
+}
+
+interface Strip {
+  /** The first of its pixels. */
+  readonly start: number;
+  readonly stored: Int32Array;
 }
 
 /** Values of frames that make one image: the same component, one size. */
@@ -92,15 +106,13 @@ export function readPixels(frames: readonly StoredFrame[], layout: Layout, compo
   const found: Found = { padded: 0, negative: 0, zeros: 0, ignoredRescales: 0, inverted: largest !== undefined, unknownUnit: false };
   const isPadding = frames.some(({ header }) => header.numbers('pixelPaddingValue').length > 0) ? new Uint8Array(values.length) : undefined;
   frames.forEach((frame, index) => {
-    const part = [index * nPixels, (index + 1) * nPixels] as const;
     const map = mapOf(frame.header, layout, component, largest);
     if (map.isIgnored) found.ignoredRescales++;
     if (map.isUnitUnknown) found.unknownUnit = true;
-    mapFrame(
-      { stored: storedValues(frame.bytes, layout), values: values.subarray(...part), isPadding: isPadding?.subarray(...part) },
-      map,
-      found,
-    );
+    for (const { start, stored } of strips(frame.bytes, layout)) {
+      const part = [index * nPixels + start, index * nPixels + start + stored.length] as const;
+      mapStrip({ stored, values: values.subarray(...part), isPadding: isPadding?.subarray(...part) }, map, found);
+    }
   });
   const zeroFraction = (found.zeros + found.padded) / values.length;
   return {
@@ -121,7 +133,7 @@ interface Mapped {
 }
 
 /** The loop over pixels: millions of them, so it calls nothing. */
-function mapFrame({ stored, values, isPadding }: Mapped, { slope, intercept, zero, padding }: ValueMap, found: Found): void {
+function mapStrip({ stored, values, isPadding }: Mapped, { slope, intercept, zero, padding }: ValueMap, found: Found): void {
   for (let pixel = 0; pixel < stored.length; pixel++) {
     const level = stored[pixel] as number;
     if (level === padding) {
@@ -169,7 +181,9 @@ function largestStored(frames: readonly StoredFrame[], layout: Layout): number {
   let largest = -Infinity;
   for (const { bytes, header } of frames) {
     const padding = paddingValue(header, layout);
-    for (const stored of storedValues(bytes, layout)) if (stored > largest && stored !== padding) largest = stored;
+    for (const { stored } of strips(bytes, layout)) {
+      for (const level of stored) if (level > largest && level !== padding) largest = level;
+    }
   }
   return Number.isFinite(largest) ? largest : 0;
 }
