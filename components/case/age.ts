@@ -9,6 +9,12 @@ export function ageOf(openedAt: string, now: number): string {
   return hours < 24 ? `${hours} h` : `${Math.floor(hours / 24)} d`;
 }
 
+/** When it was, in words: `just now`, `12 min ago`. */
+export function agoOf(at: string, now: number): string {
+  const age = ageOf(at, now);
+  return age === 'just now' ? age : `${age} ago`;
+}
+
 /** `day 3, 09:15`: days since the case was opened (the day of opening is day 0) and the time of day where the reader is. */
 export function dayOf(at: string, openedAt: string): string {
   const time = new Date(at);

@@ -1,7 +1,7 @@
 /** What the scanner's page says of push: what to set at the scanner, what came and what was refused, and who may send. */
 import { View } from 'react-native';
 import { usePush } from '@/components/api/push';
-import { ageOf } from '@/components/case/age';
+import { agoOf } from '@/components/case/age';
 import { useNow } from '@/components/case/use-now';
 import { LoadingWarp } from '@/components/ui/loading-warp';
 import { ProblemNotice } from '@/components/ui/problem-notice';
@@ -25,7 +25,7 @@ export function PushPanel({ scannerId }: { scannerId: string }) {
   if (error) return <ProblemNotice error={error} onRetry={() => void refetch()} />;
   if (push === undefined) return <LoadingWarp what="fetching how it sends" />;
   const { received, refused } = push;
-  const ago = (at: string | null): string => (at === null ? 'never' : `${ageOf(at, now)} ago`);
+  const ago = (at: string | null): string => (at === null ? 'never' : agoOf(at, now));
   return (
     <View role="region" aria-label="push from the scanner" style={{ gap: space(3) }}>
       <View>

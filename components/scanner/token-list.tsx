@@ -1,7 +1,7 @@
 /** Tokens with which a scanner sends over the web (STOW-RS). A new one is shown once, at the moment it is drawn. */
 import { View } from 'react-native';
 import { useDrawToken, useRevokeToken } from '@/components/api/push';
-import { ageOf } from '@/components/case/age';
+import { agoOf } from '@/components/case/age';
 import { useNow } from '@/components/case/use-now';
 import { Button } from '@/components/ui/button';
 import { LinkText } from '@/components/ui/link-text';
@@ -31,7 +31,7 @@ export function TokenList({ scannerId, push }: { scannerId: string; push: Scanne
           style={{ flexDirection: 'row', alignItems: 'center', gap: space(3), borderBottomWidth: 1, borderBottomColor: colours.rule }}
         >
           <Text variant="small" tone="inkSoft" style={{ flex: 1 }}>
-            {`drawn ${ageOf(token.drawnAt, now)} ago by ${token.drawnBy}, ${token.lastUsedAt ? `used ${ageOf(token.lastUsedAt, now)} ago` : 'never used'}`}
+            {`drawn ${agoOf(token.drawnAt, now)} by ${token.drawnBy}, ${token.lastUsedAt ? `used ${agoOf(token.lastUsedAt, now)}` : 'never used'}`}
           </Text>
           {push.mayChange ? <LinkText label="revoke" onPress={() => revoke.mutate(token.id)} /> : null}
         </View>

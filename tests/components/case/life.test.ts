@@ -1,4 +1,4 @@
-import { ageOf, dayOf } from '@/components/case/age';
+import { ageOf, agoOf, dayOf } from '@/components/case/age';
 import { numberFault, nearestTrial } from '@/components/case/sign/attest-lines';
 import { actionsOf } from '@/components/case/view/case-actions';
 import { changedFields, changeOf, contestedFields, type CaseDraft } from '@/components/case/view/edit-conflict';
@@ -99,6 +99,10 @@ describe('an age', () => {
       '23 h',
       '1 d',
     ]);
+  });
+
+  test('that lies back is some time ago, and what is just now is not', () => {
+    expect([0, 12].map((minutes) => agoOf(opened, Date.parse(opened) + minutes * 60_000))).toEqual(['just now', '12 min ago']);
   });
 
   test('on the trail counts calendar days from the day of opening', () => {
