@@ -7,10 +7,12 @@ import { significant } from '@/components/ui/number-text';
 import { ProblemNotice } from '@/components/ui/problem-notice';
 import { Text } from '@/components/ui/text';
 import { space } from '@/components/ui/theme';
+import type { Image } from '@/server/contract/images';
 import { EyeHeading } from './eye-heading';
 import { FactRow } from './fact-row';
 import { benchFacts, factText, originWords, type BenchFact } from './fact-words';
 import { useCaseOnBench } from './bench-context';
+import { hasOwnPhase } from './own-phase';
 import { PhaseEncodeChoice } from './phase-encode-choice';
 
 const names = Object.keys(benchFacts) as BenchFact[];
@@ -79,6 +81,14 @@ function Implications() {
   );
 }
 
+/** What stands between the samples and the picture. */
+function assumedOf(image: Image): string {
+  if (image.kspace === 'raw') return 'The image is the transform of raw data: nothing was filtered, filled in or corrected.';
+  const maybe = 'The scanner may have filtered, interpolated and combined it before it was sent.';
+  if (hasOwnPhase(image)) return `The image is complex: its phase is its own, and its k-space is not symmetric. ${maybe}`;
+  return `The image is a magnitude: its phase is gone and its k-space is symmetric. ${maybe}`;
+}
+
 export const FactsTab = memo(function FactsTab() {
   const { bad } = useCaseOnBench();
   const origin = originWords(bad.acquisition.phaseEncode);
@@ -97,8 +107,7 @@ export const FactsTab = memo(function FactsTab() {
       <Implications />
       <EyeHeading title="What was assumed" />
       <Text variant="detail" tone="inkSoft" style={{ paddingBottom: space(4) }}>
-        The image is a magnitude: its phase is gone and its k-space is symmetric. The scanner may have filtered, interpolated and combined
-        it before it was sent. What the header does not say is not guessed.
+        {assumedOf(bad)} What the header does not say is not guessed.
       </Text>
       {bad.warnings.map(({ code, text }) => (
         <Text key={code} variant="detail" tone="weld" style={{ paddingBottom: space(2) }}>
