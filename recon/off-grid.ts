@@ -33,7 +33,8 @@ const kernelTable = Float64Array.from({ length: tableSteps * width + 2 }, (_, i)
 
 /** Weights of the samples from `first` on about `place`. They lie whole samples apart, so that one fraction of a step serves them all. */
 function writeWeights(weights: Float64Array, first: number, place: number): void {
-  const position = (first - place + width / 2) * tableSteps;
+  // Rounding may put the first sample a hair before the end of the kernel.
+  const position = Math.max(0, (first - place + width / 2) * tableSteps);
   const below = Math.floor(position);
   const fraction = position - below;
   for (let tap = 0; tap < width; tap++) {
@@ -81,8 +82,8 @@ export function fineKspace(kspace: ComplexPlane): FineKspace {
   return { ...fine, coarseRows: rows, coarseColumns: columns };
 }
 
-/** `index`, which lies at most one turn outside, among the n of a circle. */
-const wrapped = (index: number, n: number): number => (index < 0 ? index + n : index >= n ? index - n : index);
+/** `index` among the n of a circle. The kernel may go round a short one more than once. */
+const wrapped = (index: number, n: number): number => (index >= 0 && index < n ? index : ((index % n) + n) % n);
 
 /** Weights along both axes, and places of the samples about one column, worked out once for all rows that they are used in. */
 const acrossWeights = new Float64Array(width);
