@@ -5,7 +5,7 @@ import { routes } from '../../server/contract/routes';
 import { signIn, whoAmI } from '../../server/contract/session';
 import { answerErrors, asAppError } from '../../server/errors';
 import { openLog } from '../../server/log';
-import { refuseUnserved, serve, serveAnyone, type App } from '../../server/serve';
+import { type App, refuseUnserved, serve, serveAnyone, serveScanner } from '../../server/serve';
 import { openApplication, type Application } from './application';
 
 let application: Application;
@@ -24,9 +24,10 @@ it('a server that leaves out a route of the contract does not start, and names i
   expect(() => refuseUnserved(app)).toThrow('GET /api/session');
 });
 
-it('a route for members cannot be served to anyone by mistake, nor the other way round', () => {
+it('a route for members cannot be served to anyone or to scanners by mistake, nor the other way round', () => {
   expect(() => serveAnyone(emptyApp(), whoAmI, () => Promise.reject(new Error('never called')))).toThrow('is for members');
-  expect(() => serve(emptyApp(), signIn, () => Promise.reject(new Error('never called')))).toThrow('open to anyone');
+  expect(() => serve(emptyApp(), signIn, () => Promise.reject(new Error('never called')))).toThrow('not for members');
+  expect(() => serveScanner(emptyApp(), whoAmI, () => Promise.reject(new Error('never called')))).toThrow('not for scanners');
 });
 
 it('an output that breaks the contract is not sent', async () => {
