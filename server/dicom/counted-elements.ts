@@ -6,8 +6,8 @@
 import dicomParser, { type ByteArrayParser, type DataSet } from 'dicom-parser';
 import { explicitBigEndian, implicitLittleEndian } from './transfer-syntax';
 
-/** About 150,000 elements. An enhanced file of 2,000 frames takes some 250 words for the functional groups of each. */
-const mostWords = 500_000;
+/** About 75,000 elements. An enhanced file of 1,000 frames takes some 250 words for the functional groups of each. */
+const mostWords = 250_000;
 
 export class TooManyElements extends Error {}
 

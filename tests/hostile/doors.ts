@@ -4,6 +4,7 @@
  */
 import { z } from 'zod';
 import { uploadResultSchema, type Image } from '../../server/contract/images';
+import { problemSchema } from '../../server/contract/problem';
 import { joined } from '../../server/dicom/elements';
 import type { RealServer } from '../bench/real-server';
 import type { Mutated } from './mutations';
@@ -57,7 +58,13 @@ async function uploaded({ origin, cookie }: RealServer, { bytes, name = 'x.dcm' 
   const response = await fetch(`${origin}/api/images`, { method: 'POST', headers: { cookie, Accept: 'application/json' }, body: form });
   const answer: unknown = await response.json();
   const result = uploadResultSchema.safeParse(answer);
-  if (!result.success) return { code: String(response.status), refused: true, crash: `answered with ${response.status}` };
+  if (!result.success) {
+    // A name that breaks the framing of the request is an error of the whole request, with its reason.
+    const problem = problemSchema.safeParse(answer);
+    const isRefused =
+      response.status === 400 && problem.success && (problem.data.detail ?? problem.data.issues?.[0]?.message) !== undefined;
+    return { code: `HTTP ${response.status}`, refused: true, ...(isRefused ? {} : { crash: `answered with ${response.status}` }) };
+  }
   const { images, refused } = result.data;
   if (images.length === 0) {
     const [first] = refused;
