@@ -8,6 +8,7 @@ import { defineCause } from '../cause';
 import type { EncodingDirection } from '../lines';
 import { keepLines, linesAlong } from '../lines';
 import { choice, quantity } from '../parameter';
+import { moreLines, smootherPhase } from '../partial-fourier-remedies';
 
 export const partialFourier = defineCause({
   id: 'partial-fourier',
@@ -73,20 +74,8 @@ export const partialFourier = defineCause({
     },
   ],
   remedies: [
-    {
-      change: 'Raise the fraction: 7/8, or all lines',
-      who: 'technologist',
-      price:
-        'Longer in proportion, or a longer shortest TE and other contrast in echo-planar scans; SNR rises with the square root of the fraction',
-      moves: { time: 'rises', snr: 'rises', contrast: 'changes' },
-    },
-    {
-      change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less',
-      who: 'technologist',
-      price: 'Other contrast; a refocusing pulse raises SAR: check the conditions of an implant',
-      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
-    },
-    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
+    moreLines('Raise the fraction: 7/8, or all lines'),
+    ...smootherPhase,
     {
       change: 'Try the other reconstruction of the missing side, iterative instead of homodyne, where the console offers it',
       who: 'physicist',

@@ -14,6 +14,7 @@ import { inverse } from '../fourier';
 import type { ComplexPlane } from '../grid';
 import { linesAlong, weightLines } from '../lines';
 import { reachOf, shortfall } from '../reach';
+import { moreLines, smootherPhase } from '../partial-fourier-remedies';
 
 /** W of every line; `side` is +1 where the lines above the centre are complete, −1 where those below are. */
 export function homodyneWeight(nLines: number, centre: number, reach: number, side: 1 | -1): Float64Array {
@@ -63,20 +64,8 @@ export const homodyne = defineReconstruction({
     },
   ],
   remedies: [
-    {
-      change: 'Take more of the missing side: 6/8, 7/8 or all lines',
-      who: 'technologist',
-      price:
-        'Longer in proportion, or a longer shortest TE and other contrast in echo-planar scans; SNR rises with the square root of the fraction',
-      moves: { time: 'rises', snr: 'rises', contrast: 'changes' },
-    },
-    {
-      change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less',
-      who: 'technologist',
-      price: 'Other contrast; a refocusing pulse raises SAR: check the conditions of an implant',
-      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
-    },
-    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
+    moreLines('Take more of the missing side: 6/8, 7/8 or all lines'),
+    ...smootherPhase,
     {
       change: 'The iterative reconstruction of the missing side (POCS) instead',
       who: 'physicist',

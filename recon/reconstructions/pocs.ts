@@ -16,6 +16,7 @@ import type { Lines } from '../lines';
 import { quantity } from '../parameter';
 import { reachOf, shortfall } from '../reach';
 import { giveBackPlane } from '../spare-arrays';
+import { moreLines, smootherPhase } from '../partial-fourier-remedies';
 
 /** A copy with the samples within the reach of the shorter side along `lines`, |k| < ks. */
 function symmetricBand<P extends ComplexPlane>(kspace: P, lines: Lines, ks: number): P {
@@ -118,20 +119,8 @@ export const pocs = defineReconstruction({
     },
   ],
   remedies: [
-    {
-      change: 'Take more of the missing side: 6/8, 7/8 or all lines',
-      who: 'technologist',
-      price:
-        'Longer in proportion, or a longer shortest TE and other contrast in echo-planar scans; SNR rises with the square root of the fraction',
-      moves: { time: 'rises', snr: 'rises', contrast: 'changes' },
-    },
-    {
-      change: 'Shorten TE, or take a spin echo instead of a gradient echo, so that the phase varies less',
-      who: 'technologist',
-      price: 'Other contrast; a refocusing pulse raises SAR: check the conditions of an implant',
-      moves: { contrast: 'changes', sar: 'changes', implantConditions: 'changes' },
-    },
-    { change: 'Shim again over the region', who: 'technologist', price: 'Seconds to a minute', moves: { time: 'once' } },
+    moreLines('Take more of the missing side: 6/8, 7/8 or all lines'),
+    ...smootherPhase,
     {
       change: 'More rounds',
       who: 'physicist',
